@@ -1,0 +1,63 @@
+import { z } from "zod";
+
+const text = z.string();
+const reason = z.object({ reason: text });
+const check = z.object({ serial: text, title: text });
+const change = z.object({ what: text });
+
+/**
+ * The kinds of event and what each carries: enough to write its sentence without another query.
+ * Names that may change (people) are looked up; wording at the time (serials, titles) is kept.
+ */
+export const eventPayloads = {
+  "project.created": z.object({ name: text }),
+  "project.edited": change,
+  "project.archived": z.object({ name: text }),
+  "project.restored": z.object({ name: text }),
+  "member.joined": z.object({ role: text }),
+  "member.role-changed": z.object({ name: text, from: text, to: text }),
+  "member.removed": z.object({ name: text }),
+  "invitation.sent": z.object({ role: text }),
+  "invitation.withdrawn": z.object({ role: text }),
+  "board.created": z.object({ code: text, name: text }),
+  "board.edited": z.object({ code: text, name: text }),
+  "board.archived": z.object({ code: text, name: text }),
+  "board.restored": z.object({ code: text, name: text }),
+  "revision.created": z.object({ code: text, letter: text }),
+  "revision.released": z.object({ code: text, letter: text }),
+  "unit.created": z.object({ serial: text }),
+  "unit.edited": z.object({ serial: text }),
+  "unit.archived": z.object({ serial: text }),
+  "unit.restored": z.object({ serial: text }),
+  "slot.created": z.object({ position: z.number() }),
+  "slot.edited": z.object({ position: z.number() }),
+  "slot.archived": z.object({ position: z.number() }),
+  "unit.placed": z.object({ serial: text, position: z.number() }),
+  "unit.removed": z.object({ serial: text, position: z.number() }),
+  "procedure.issued": z.object({ code: text, number: z.number(), note: text }),
+  "traveler.started": z.object({ serial: text, number: z.number() }),
+  "traveler.moved": z.object({ serial: text, from: z.number(), to: z.number(), kept: z.number(), changed: z.number() }),
+  "attempt.recorded": check.extend({
+    verdict: z.enum(["conforms", "guard-band", "does-not-conform"]),
+    reading: text,
+    from: text,
+    to: text,
+    firstPass: z.boolean(),
+  }),
+  "attempt.voided": check.merge(reason),
+  "check.reopened": check.merge(reason),
+  "check.doubted": check.merge(reason),
+  "concession.granted": check.merge(reason),
+  "concession.withdrawn": check.merge(reason),
+  "hold.lifted": check.merge(reason),
+  "prerequisite.added": z.object({ check: text, needs: text }),
+  "prerequisite.removed": z.object({ check: text, needs: text }),
+  "evidence.attached": z.object({ kind: text, fileName: text }),
+  "evidence.removed": z.object({ kind: text, fileName: text }),
+  "log.written": z.object({ title: text }),
+  "log.edited": z.object({ title: text }),
+  "log.archived": z.object({ title: text }),
+} as const satisfies Record<string, z.ZodType>;
+
+export type EventKind = keyof typeof eventPayloads;
+export type EventPayload<Kind extends EventKind> = z.infer<(typeof eventPayloads)[Kind]>;
