@@ -17,6 +17,7 @@ export default defineConfig({
           name: "integration",
           include: ["tests/integration/**/*.test.ts", "tests/access/**/*.test.ts"],
           fileParallelism: false,
+          server: { deps: { inline: ["next-auth"] } },
           testTimeout: 30_000,
           hookTimeout: 60_000,
         },
