@@ -1,0 +1,3 @@
+import { handlers } from "@/lib/auth/auth";
+
+export const { GET, POST } = handlers;
