@@ -1,0 +1,48 @@
+import type { Verdict } from "@/db/schema/travelers";
+
+/** What POST …/attempts is sent. Plain JSON, so that a queue survives a new build of the application. */
+export type AttemptBody = {
+  /** Client-made UUID: the attempt's own id, the same at every repeat. */
+  id: string;
+  checkId: string;
+  /** ISO instant by the device's clock. */
+  performedAt: string;
+  record: unknown;
+  note: string;
+  instrumentId: string | null;
+  attachmentIds: string[];
+};
+
+/** A file taken for the attempt that has not been uploaded yet. */
+export type HeldFile = { uploadId: string; file: Blob; fileName: string };
+
+/** Why an attempt is still on the device, in the words the person reads. */
+export type Trouble = {
+  /** waiting: goes out by itself. refused: the person decides. signed-out: goes out after signing in. */
+  kind: "waiting" | "refused" | "signed-out";
+  sentence: string;
+  fields?: Record<string, string>;
+};
+
+/** One attempt on its way to the server. It leaves the device only when the server has it or the person discards it. */
+export type HeldAttempt = {
+  /** Order in which they were made on this device; given by the store. */
+  order: number;
+  /** Who made it. Another person signed in on the same device neither sees nor sends it. */
+  userId: string;
+  project: string;
+  serial: string;
+  checkTitle: string;
+  /** The verdict the device gave as one typed; the server gives its own. */
+  foreseen: Verdict;
+  /** In a few characters: "4.983 V". */
+  summary: string;
+  body: AttemptBody;
+  files: HeldFile[];
+  tries: number;
+  /** Milliseconds since 1970; not sent before. */
+  notBefore: number;
+  trouble: Trouble | null;
+};
+
+export type NewAttempt = Omit<HeldAttempt, "order" | "tries" | "notBefore" | "trouble">;
