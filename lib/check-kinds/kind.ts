@@ -12,6 +12,8 @@ export type JudgeContext = {
   instrumentRanges: InstrumentRange[];
   /** Kinds of the evidence that goes with the attempt. */
   evidence: AttachmentKind[];
+  /** The builder's note beside the record: what does not conform by eye must be described. */
+  note: string;
 };
 
 /** One reading, judged. Values in base units. */
@@ -51,35 +53,69 @@ export type SpecFormProps<Typed> = {
 };
 
 /** How a recorded attempt shows on the traveler, on the printed sheet (empty when nothing is recorded) and in a mail. */
-export type RecordViewProps<Spec, Record> = { spec: Spec; record: Record | undefined; readings: JudgedReading[] };
+export type RecordViewProps<Spec, Entry> = { spec: Spec; record: Entry | undefined; readings: JudgedReading[] };
+
+/** Evidence without which an attempt of a check cannot be recorded. */
+export type Requires = { kinds: AttachmentKind[]; minimum: number };
 
 /**
  * One kind of check, whole: one folder, one entry in list.ts.
- * Spec: what the procedure says. Record: what the builder enters. Both are stored as JSON and read through the schemas.
+ * Spec: what the procedure says. Typed: the same as the editor's form holds it. Entry: what the builder enters.
+ * Spec and entry are stored as JSON and read again through the schemas. Schemas named …Shape only say what is there,
+ * so that a half-filled form passes; what is wrong with it is said by specFromTyped and judge.
  */
-export type CheckKindDefinition<Spec, Typed, Record> = {
-  name: string;
+export type CheckKindDefinition<Name extends string, Spec, Typed, Entry> = {
+  name: Name;
   /** In the procedure editor: "Reading with limits". */
   label: string;
   /** One sentence for the editor on when to take it. */
   description: string;
-  /** Parses what was typed in the editor (limits with units …) to the stored spec, and reads the stored spec again. */
-  specSchema: z.ZodType<Spec, Typed>;
-  emptySpec: Typed;
+  /** Reads the stored spec. */
+  specShape: z.ZodType<Spec>;
+  typedShape: z.ZodType<Typed>;
+  /** Turns what was typed in the editor (limits with units …) into the spec that is stored, or says what is wrong where. */
+  specFromTyped: z.ZodType<Spec, Typed>;
+  emptyTyped: Typed;
   /** From the stored spec back to the form. */
-  typedSpec: (spec: Spec) => Typed;
-  recordSchema: z.ZodType<Record>;
-  emptyRecord: (spec: Spec) => Record;
-  judge: (spec: Spec, record: Record, context: JudgeContext) => Judged;
+  typedFromSpec: (spec: Spec) => Typed;
+  entryShape: z.ZodType<Entry>;
+  emptyEntry: (spec: Spec) => Entry;
+  judge: (spec: Spec, entry: Entry, context: JudgeContext) => Judged;
   /** "4.75 … 5.25 V", "by eye", "photo": the expectation in a few characters, for rows and mails. */
   expectation: (spec: Spec) => string;
   /** "4.983 V", "conforms": the record in a few characters, for rows, events and mails. */
-  summary: (spec: Spec, record: Record, readings: JudgedReading[]) => string;
+  summary: (spec: Spec, entry: Entry, readings: JudgedReading[]) => string;
   /** True when the verdict comes from readings; then the bench has Record instead of Conforms / Does not conform. */
   measured: boolean;
-  /** Kinds of evidence without which it cannot be recorded. */
-  requires: (spec: Spec) => { kinds: AttachmentKind[]; minimum: number } | undefined;
-  BenchForm: ComponentType<BenchFormProps<Spec, Record>>;
+  requires: (spec: Spec) => Requires | undefined;
+  BenchForm: ComponentType<BenchFormProps<Spec, Entry>>;
   SpecForm: ComponentType<SpecFormProps<Typed>>;
-  RecordView: ComponentType<RecordViewProps<Spec, Record>>;
+  RecordView: ComponentType<RecordViewProps<Spec, Entry>>;
+};
+
+export type Read<Value> = { ok: true; value: Value } | { ok: false; message: string; fields: Record<string, string> };
+
+/**
+ * A kind as the rest of the program sees it: specs and entries are unknown JSON that the kind reads through its own
+ * schemas. A stored spec that does not fit throws; what a person typed or entered never does.
+ */
+export type CheckKind<Name extends string = string> = {
+  name: Name;
+  label: string;
+  description: string;
+  measured: boolean;
+  emptyTyped: unknown;
+  typedFromSpec: (spec: unknown) => unknown;
+  /** Editor form → the spec to store. Field paths are those of the form. */
+  readTyped: (typed: unknown) => Read<unknown>;
+  emptyEntry: (spec: unknown) => unknown;
+  readEntry: (entry: unknown) => Read<unknown>;
+  judge: (spec: unknown, entry: unknown, context: JudgeContext) => Judged;
+  expectation: (spec: unknown) => string;
+  /** Empty when the record is of another shape. */
+  summary: (spec: unknown, entry: unknown, readings: JudgedReading[]) => string;
+  requires: (spec: unknown) => Requires | undefined;
+  BenchForm: ComponentType<BenchFormProps<unknown, unknown>>;
+  SpecForm: ComponentType<SpecFormProps<unknown>>;
+  RecordView: ComponentType<RecordViewProps<unknown, unknown>>;
 };

@@ -1,0 +1,28 @@
+import { defineKind } from "../define-kind";
+import { NOTHING_STATED, statedEntryShape, summariseStated } from "../stated-verdict";
+import { BenchForm } from "./BenchForm";
+import { judge, requires } from "./judge";
+import { RecordView } from "./RecordView";
+import { specFromTyped, specShape, typedShape } from "./schema";
+import { SpecForm } from "./SpecForm";
+
+export const capture = defineKind({
+  name: "capture",
+  label: "Capture",
+  description: "The builder adds a scope picture or scope data and says whether it conforms.",
+  specShape,
+  typedShape,
+  specFromTyped,
+  emptyTyped: { expects: "" },
+  typedFromSpec: (spec) => spec,
+  entryShape: statedEntryShape,
+  emptyEntry: () => NOTHING_STATED,
+  judge,
+  expectation: (spec) => spec.expects || "capture",
+  summary: (_spec, entry) => summariseStated(entry),
+  measured: false,
+  requires,
+  BenchForm,
+  SpecForm,
+  RecordView,
+});

@@ -1,0 +1,30 @@
+import { formatLimits, formatQuantity } from "@/lib/calc/units";
+import { defineKind } from "../define-kind";
+import { limitsOf } from "../typed-limits";
+import { BenchForm } from "./BenchForm";
+import { judge } from "./judge";
+import { RecordView } from "./RecordView";
+import { entryShape, specFromTyped, specShape, typedShape } from "./schema";
+import { SpecForm } from "./SpecForm";
+
+export const reading = defineKind({
+  name: "reading",
+  label: "Reading with limits",
+  description: "The builder measures one value; the limits, the instrument and the project's rule give the verdict.",
+  specShape,
+  typedShape,
+  specFromTyped,
+  emptyTyped: { unit: "V", limits: "", expected: "" },
+  typedFromSpec: (spec) => ({ unit: spec.unit, limits: spec.limits.typed, expected: spec.expected?.typed ?? "" }),
+  entryShape,
+  emptyEntry: () => ({ typed: "" }),
+  judge,
+  expectation: (spec) => formatLimits(limitsOf(spec.limits), spec.unit),
+  summary: (spec, entry, readings) =>
+    readings[0] ? formatQuantity(readings[0].value, readings[0].unit) : `${entry.typed} ${spec.unit}`,
+  measured: true,
+  requires: () => undefined,
+  BenchForm,
+  SpecForm,
+  RecordView,
+});

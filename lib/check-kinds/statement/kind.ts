@@ -1,0 +1,28 @@
+import { defineKind } from "../define-kind";
+import { NOTHING_STATED, statedEntryShape, summariseStated } from "../stated-verdict";
+import { BenchForm } from "./BenchForm";
+import { judge } from "./judge";
+import { RecordView } from "./RecordView";
+import { specFromTyped, specShape, typedShape } from "./schema";
+import { SpecForm } from "./SpecForm";
+
+export const statement = defineKind({
+  name: "statement",
+  label: "Statement",
+  description: "The builder looks, listens or tries, and says whether it conforms.",
+  specShape,
+  typedShape,
+  specFromTyped,
+  emptyTyped: { expects: "" },
+  typedFromSpec: (spec) => spec,
+  entryShape: statedEntryShape,
+  emptyEntry: () => NOTHING_STATED,
+  judge,
+  expectation: (spec) => spec.expects || "by eye",
+  summary: (_spec, entry) => summariseStated(entry),
+  measured: false,
+  requires: () => undefined,
+  BenchForm,
+  SpecForm,
+  RecordView,
+});

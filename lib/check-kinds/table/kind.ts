@@ -1,0 +1,47 @@
+import { formatLimits } from "@/lib/calc/units";
+import { defineKind } from "../define-kind";
+import { limitsOf } from "../typed-limits";
+import { BenchForm } from "./BenchForm";
+import { judge } from "./judge";
+import { RecordView } from "./RecordView";
+import { entryShape, specFromTyped, specShape, typedShape, type Spec } from "./schema";
+import { SpecForm } from "./SpecForm";
+
+export const table = defineKind({
+  name: "table",
+  label: "Table of readings",
+  description: "Several readings in rows and columns, e.g. every rail at three points; the worst cell decides.",
+  specShape,
+  typedShape,
+  specFromTyped,
+  emptyTyped: { columns: ["no load"], rows: [{ label: "", unit: "V", limits: "", cells: [""] }] },
+  typedFromSpec: ({ columns, rows }) => ({
+    columns,
+    rows: rows.map((row) => ({
+      label: row.label,
+      unit: row.unit,
+      limits: row.limits.typed,
+      cells: columns.map((_, c) => row.cells[c]?.typed ?? ""),
+    })),
+  }),
+  entryShape,
+  emptyEntry: ({ columns, rows }) => ({ cells: rows.map(() => columns.map(() => "")) }),
+  judge,
+  expectation,
+  summary: (_spec, _entry, readings) => {
+    const wrong = readings.filter((reading) => reading.verdict === "does-not-conform").length;
+    return wrong === 0 ? `all ${readings.length} conform` : `${wrong} of ${readings.length} do not conform`;
+  },
+  measured: true,
+  requires: () => undefined,
+  BenchForm,
+  SpecForm,
+  RecordView,
+});
+
+/** One row shows its limits; more show how many readings there are. */
+function expectation({ columns, rows }: Spec): string {
+  const [only, ...rest] = rows;
+  if (only && rest.length === 0) return `${only.label} ${formatLimits(limitsOf(only.limits), only.unit)}`;
+  return `${rows.length} × ${columns.length} readings`;
+}
