@@ -1,7 +1,7 @@
 import { refuse, ok, type Answer } from "@/lib/actions/answer";
 
-/** Reads a JSON body of at most `limit` bytes without trusting content-length. An empty body is undefined. */
-export async function readJson(request: Request, limit = 1_000_000): Promise<Answer<unknown>> {
+/** Reads a body of at most `limit` bytes without trusting content-length. */
+export async function readBytes(request: Request, limit: number): Promise<Answer<Buffer>> {
   const chunks: Uint8Array[] = [];
   let size = 0;
   const reader = request.body?.getReader();
@@ -15,9 +15,16 @@ export async function readJson(request: Request, limit = 1_000_000): Promise<Ans
     }
     chunks.push(value);
   }
-  if (size === 0) return ok(undefined);
+  return ok(Buffer.concat(chunks));
+}
+
+/** Reads a JSON body. An empty body is undefined. */
+export async function readJson(request: Request, limit = 1_000_000): Promise<Answer<unknown>> {
+  const bytes = await readBytes(request, limit);
+  if (!bytes.ok) return bytes;
+  if (bytes.value.length === 0) return ok(undefined);
   try {
-    return ok(JSON.parse(new TextDecoder("utf-8", { fatal: true }).decode(Buffer.concat(chunks))));
+    return ok(JSON.parse(new TextDecoder("utf-8", { fatal: true }).decode(bytes.value)));
   } catch {
     return refuse("invalid", "The body is not JSON in UTF-8. Nothing was changed.");
   }

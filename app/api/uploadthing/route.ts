@@ -1,0 +1,3 @@
+import { receiveUploadRequest } from "@/lib/attachment/upload-handler";
+
+export const POST = receiveUploadRequest;

@@ -1,0 +1,88 @@
+import { database } from "@/db/client";
+import { findTargetCheck, findTargetEntry } from "@/db/queries/attachments";
+import type { AttachmentKind } from "@/db/schema/evidence";
+import { grant } from "@/lib/access/grant";
+import type { Viewer } from "@/lib/access/scope";
+import { ok, refuse, type Answer } from "@/lib/actions/answer";
+import { limit } from "@/lib/http/rate-limit";
+import { cleanFileName } from "@/lib/storage/file-name";
+import { largestBytes, sizeText } from "@/lib/storage/limits";
+import type { UploadInput } from "./schema";
+
+/** What the object store hands back, signed, when the file is there. No secret in it. */
+export type UploadMetadata = {
+  userId: string;
+  project: string;
+  uploadId: string;
+  kinds: AttachmentKind[];
+  fileName: string;
+  checkId: string | null;
+  logEntryId: string | null;
+};
+
+/** Whether the person may send this file to this place; asked before a link to send it to is given out. */
+export async function admitUpload(
+  viewer: Viewer | undefined,
+  input: UploadInput,
+  files: readonly { name: string; size: number }[],
+): Promise<Answer<UploadMetadata>> {
+  const db = database();
+  const granted = await grant(db, viewer, input.project, "evidence.attach");
+  if (!granted.ok) return granted;
+  const scope = granted.value;
+
+  const [file, ...rest] = files;
+  if (!file || rest.length > 0) return refuse("invalid", "Send one file at a time. Nothing was kept.");
+  const name = cleanFileName(file.name);
+  if (!name.ok) return name;
+  const fits = checkSize(name.value, file.size, input.kinds);
+  if (!fits.ok) return fits;
+  const there = await checkTarget(scope, input);
+  if (!there.ok) return there;
+  const slow = await limit("uploads", scope.viewer.userId);
+  if (!slow.ok) return slow;
+
+  return ok({
+    userId: scope.viewer.userId,
+    project: scope.slug,
+    uploadId: input.uploadId,
+    kinds: input.kinds,
+    fileName: name.value,
+    checkId: input.checkId ?? null,
+    logEntryId: input.logEntryId ?? null,
+  });
+}
+
+export function checkSize(name: string, bytes: number, kinds: readonly AttachmentKind[]): Answer<void> {
+  if (!Number.isInteger(bytes) || bytes < 0)
+    return refuse("invalid", `The size of ${name} is missing. Nothing was kept.`);
+  if (bytes === 0) return refuse("invalid", `${name} is empty (0 bytes). Nothing was kept.`);
+  const most = largestBytes(kinds);
+  if (bytes <= most) return ok(undefined);
+  return refuse(
+    "too-large",
+    `${name} has ${sizeText(bytes)}; the most that can be kept here is ${sizeText(most)}. Nothing was kept.`,
+  );
+}
+
+type InProject = { projectId: string };
+type Target = { checkId?: string | null | undefined; logEntryId?: string | null | undefined };
+
+/** The unit the file will belong to, through its check or log entry. */
+export async function checkTarget(scope: InProject, target: Target): Promise<Answer<{ unitId: string | null }>> {
+  if (target.checkId && target.logEntryId)
+    return refuse("invalid", "A file belongs to a check or to a log entry, not to both.");
+  if (target.checkId) {
+    const check = await findTargetCheck(database(), scope, target.checkId);
+    return check
+      ? ok({ unitId: check.unitId })
+      : refuse("not-found", "There is no such check in this project. Nothing was kept.");
+  }
+  if (target.logEntryId) {
+    const entry = await findTargetEntry(database(), scope, target.logEntryId);
+    return entry
+      ? ok({ unitId: entry.unitId })
+      : refuse("not-found", "There is no such log entry in this project. Nothing was kept.");
+  }
+  return ok({ unitId: null });
+}
