@@ -1,0 +1,10 @@
+/** @type {import("next").NextConfig} */
+const config = {
+  // A second server on the same tree (the browser tests, a throw-away gallery) builds into a folder of its own.
+  distDir: process.env.NEXT_DIST_DIR ?? ".next",
+  poweredByHeader: false,
+  // Native code and worker threads that a bundler would break.
+  serverExternalPackages: ["sharp", "@node-rs/argon2", "graphile-worker", "pino"],
+};
+
+export default config;
