@@ -1,18 +1,23 @@
+import type { Stage } from "@/db/schema/procedures";
 import type { CheckState, Verdict } from "@/db/schema/travelers";
 
-/** All that the state of one check depends on, and nothing more. Voided attempts and retired checks are left out. */
-export type CheckHistory = {
+/** Where a check stands on its unit's traveler, and what it waits for. */
+export type PlacedCheck = {
   id: string;
   unitId: string;
   serial: string;
+  stage: Stage;
   title: string;
-  /** Place on the unit's traveler. */
   position: number;
   holdPoint: boolean;
   /** A maintainer lifted the hold for this unit: it neither blocks what comes after nor casts doubt on it. */
   lifted: boolean;
   /** Ids of the checks that must hold first, in this unit or another. */
   needs: readonly string[];
+};
+
+/** All that the state of one check depends on. Voided attempts and retired checks are left out. */
+export type CheckHistory = PlacedCheck & {
   /** The last valid attempt. */
   last: { id: string; arrival: number; verdict: Verdict } | null;
   /** Arrival of the newest valid attempt that does not conform. */

@@ -13,10 +13,8 @@ const later = (a: Doubt | undefined, b: Doubt | undefined) => (!a || (b && b.arr
  * Newest failures are carried along the edges until nothing changes. Arrivals only grow, so it ends even if the edges
  * went round in a circle; along a chain within a unit one pass is enough.
  */
-export function findDoubt(
-  histories: readonly CheckHistory[],
-  byId: ReadonlyMap<string, CheckHistory>,
-): Map<string, Doubt> {
+export function findDoubt(histories: readonly CheckHistory[]): Map<string, Doubt> {
+  const byId = new Map(histories.map((history) => [history.id, history]));
   const units = groupUnits(histories);
   const inherited = new Map<string, Doubt>();
   const own = (check: CheckHistory): Doubt | undefined =>

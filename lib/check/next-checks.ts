@@ -1,11 +1,15 @@
+import type { Stage } from "@/db/schema/procedures";
 import type { CheckState } from "@/db/schema/travelers";
-import { holds, type CheckHistory, type DerivedCheck } from "./check-history";
-import { groupUnits } from "./unit-order";
+import { holds, type PlacedCheck } from "./check-history";
+import { findBlockers } from "./find-blockers";
+
+export type StandingCheck = PlacedCheck & { state: CheckState };
 
 export type NextCheck = {
   checkId: string;
   unitId: string;
   serial: string;
+  stage: Stage;
   title: string;
   state: CheckState;
   /** Waiting checks that it holds back, directly or through others. */
@@ -25,37 +29,36 @@ const REASONS: Partial<Record<CheckState, string>> = {
 };
 
 /** Ranks what the bench should do next by how many waiting checks it lets go. */
-export function nextChecks(
-  histories: readonly CheckHistory[],
-  derived: ReadonlyMap<string, DerivedCheck>,
-): NextCheck[] {
-  const dependants = dependantsOf(histories, derived);
-  const free = histories.filter((check) => {
-    const own = derived.get(check.id);
-    return own !== undefined && URGENCY.includes(own.state) && own.blockers.length === 0;
-  });
-  const ranked = free.map((check) => {
-    const state = derived.get(check.id)?.state ?? "untested";
-    const holdsBack = countHeldBack(check.id, dependants, derived);
-    return { check, state, holdsBack, urgency: URGENCY.indexOf(state) };
-  });
-  ranked.sort(
-    (a, b) =>
-      b.holdsBack - a.holdsBack ||
-      a.urgency - b.urgency ||
-      a.check.serial.localeCompare(b.check.serial, "en") ||
-      a.check.position - b.check.position ||
-      (a.check.id < b.check.id ? -1 : 1),
+export function nextChecks(checks: readonly StandingCheck[]): NextCheck[] {
+  const states = new Map(checks.map((check) => [check.id, check.state]));
+  const blockers = findBlockers(checks, (id) => states.get(id) ?? "untested");
+  const dependants = new Map<string, string[]>();
+  for (const [id, list] of blockers) {
+    for (const { checkId } of list) dependants.set(checkId, [...(dependants.get(checkId) ?? []), id]);
+  }
+  return checks
+    .filter((check) => URGENCY.includes(check.state) && blockers.get(check.id)?.length === 0)
+    .map((check) => ({ check, holdsBack: countHeldBack(check.id, dependants, states) }))
+    .sort((a, b) => b.holdsBack - a.holdsBack || compareChecks(a.check, b.check))
+    .map(({ check, holdsBack }) => ({
+      checkId: check.id,
+      unitId: check.unitId,
+      serial: check.serial,
+      stage: check.stage,
+      title: check.title,
+      state: check.state,
+      holdsBack,
+      reason: reasonFor(check.state, holdsBack),
+    }));
+}
+
+function compareChecks(a: StandingCheck, b: StandingCheck): number {
+  return (
+    URGENCY.indexOf(a.state) - URGENCY.indexOf(b.state) ||
+    a.serial.localeCompare(b.serial, "en") ||
+    a.position - b.position ||
+    (a.id < b.id ? -1 : 1)
   );
-  return ranked.map(({ check, state, holdsBack }) => ({
-    checkId: check.id,
-    unitId: check.unitId,
-    serial: check.serial,
-    title: check.title,
-    state,
-    holdsBack,
-    reason: reasonFor(state, holdsBack),
-  }));
 }
 
 function reasonFor(state: CheckState, holdsBack: number): string {
@@ -63,33 +66,10 @@ function reasonFor(state: CheckState, holdsBack: number): string {
   return `Holds back ${holdsBack} ${holdsBack === 1 ? "check" : "checks"}.`;
 }
 
-/** For each check that does not hold: who waits for it directly. */
-function dependantsOf(
-  histories: readonly CheckHistory[],
-  derived: ReadonlyMap<string, DerivedCheck>,
-): Map<string, string[]> {
-  const open = (id: string) => !holds(derived.get(id)?.state ?? "untested");
-  const dependants = new Map<string, string[]>();
-  const wait = (needed: string, waiting: string) => {
-    const list = dependants.get(needed);
-    if (list) list.push(waiting);
-    else dependants.set(needed, [waiting]);
-  };
-  for (const unit of groupUnits(histories)) {
-    const holdPoints: string[] = [];
-    for (const check of unit) {
-      for (const hold of holdPoints) wait(hold, check.id);
-      for (const needed of check.needs) if (open(needed)) wait(needed, check.id);
-      if (check.holdPoint && !check.lifted && open(check.id)) holdPoints.push(check.id);
-    }
-  }
-  return dependants;
-}
-
 function countHeldBack(
   id: string,
   dependants: ReadonlyMap<string, string[]>,
-  derived: ReadonlyMap<string, DerivedCheck>,
+  states: ReadonlyMap<string, CheckState>,
 ): number {
   const seen = new Set([id]);
   const open = [id];
@@ -98,9 +78,9 @@ function countHeldBack(
     for (const next of dependants.get(current) ?? []) {
       if (seen.has(next)) continue;
       seen.add(next);
-      const state = derived.get(next)?.state;
+      const state = states.get(next) ?? "untested";
       if (state === "waiting") count += 1;
-      if (state && !holds(state)) open.push(next);
+      if (!holds(state)) open.push(next);
     }
   }
   return count;

@@ -1,14 +1,14 @@
-import type { CheckHistory } from "./check-history";
+type Placed = { id: string; unitId: string; position: number };
 
-const inOrder = (a: CheckHistory, b: CheckHistory) => a.position - b.position || (a.id < b.id ? -1 : 1);
+const inOrder = (a: Placed, b: Placed) => a.position - b.position || (a.id < b.id ? -1 : 1);
 
 /** The checks of each unit in traveler order. */
-export function groupUnits(histories: readonly CheckHistory[]): CheckHistory[][] {
-  const units = new Map<string, CheckHistory[]>();
-  for (const history of histories) {
-    const unit = units.get(history.unitId);
-    if (unit) unit.push(history);
-    else units.set(history.unitId, [history]);
+export function groupUnits<Check extends Placed>(checks: readonly Check[]): Check[][] {
+  const units = new Map<string, Check[]>();
+  for (const check of checks) {
+    const unit = units.get(check.unitId);
+    if (unit) unit.push(check);
+    else units.set(check.unitId, [check]);
   }
   return [...units.values()].map((unit) => unit.sort(inOrder));
 }

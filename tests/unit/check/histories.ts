@@ -8,6 +8,7 @@ export function history(given: Given): CheckHistory {
   return {
     unitId: "psu",
     serial: "PSU-01",
+    stage: "power-on",
     title: given.id,
     position: 1,
     holdPoint: false,
