@@ -54,9 +54,12 @@ export const eventPayloads = {
   "prerequisite.removed": z.object({ check: text, needs: text }),
   "evidence.attached": z.object({ kind: text, fileName: text }),
   "evidence.removed": z.object({ kind: text, fileName: text }),
+  "evidence.restored": z.object({ kind: text, fileName: text }),
+  "evidence.captioned": z.object({ kind: text, fileName: text, caption: text }),
   "log.written": z.object({ title: text }),
   "log.edited": z.object({ title: text }),
   "log.archived": z.object({ title: text }),
+  "log.restored": z.object({ title: text }),
 } as const satisfies Record<string, z.ZodType>;
 
 export type EventKind = keyof typeof eventPayloads;

@@ -1,0 +1,196 @@
+import type { Phrases, SentencePart } from "./phrases";
+import type { EventKind, EventPayload } from "./schema";
+
+type Writer<Kind extends EventKind> = (payload: EventPayload<Kind>, says: Phrases) => (string | SentencePart)[];
+
+const KIND_WORDS: Record<string, string> = {
+  photo: "the photo",
+  "scope-picture": "the scope picture",
+  "scope-data": "the scope data",
+};
+const fileWords = (kind: string, fileName: string) => `${KIND_WORDS[kind] ?? "the file"} ${fileName}`;
+const because = (reason: string) => (reason === "" ? "." : `: ${endSentence(reason)}`);
+const endSentence = (text: string) => (/[.!?…]$/.test(text) ? text : `${text}.`);
+
+const VERDICTS = {
+  conforms: "conforms",
+  "guard-band": "conforms, inside the guard band",
+  "does-not-conform": "does not conform",
+} as const;
+
+/** One sentence a kind of event, in the past tense, with the person first. A new kind does not compile without one. */
+export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
+  "project.created": ({ name }, { who }) => [who, ` set up the project ${name}.`],
+  "project.edited": ({ what }, { who, project }) => [
+    who,
+    " changed ",
+    project("the project"),
+    what === "" ? "." : `: ${endSentence(what)}`,
+  ],
+  "project.archived": ({ name }, { who }) => [who, ` archived the project ${name}.`],
+  "project.restored": ({ name }, { who }) => [who, ` restored the project ${name}.`],
+  "member.joined": ({ role }, { who, people }) => [who, " joined ", people("the project"), ` as ${role}.`],
+  "member.role-changed": ({ name, from, to }, { who, people }) => [
+    who,
+    " made ",
+    people(name),
+    ` ${to}, before ${from}.`,
+  ],
+  "member.removed": ({ name }, { who, people }) =>
+    name === who
+      ? [who, " left ", people("the project"), "."]
+      : [who, ` removed ${name} from `, people("the project"), "."],
+  "invitation.sent": ({ role }, { who, people }) => [who, " invited ", people(`a ${role}`), "."],
+  "invitation.withdrawn": ({ role }, { who, people }) => [
+    who,
+    " withdrew ",
+    people(`the invitation of a ${role}`),
+    ".",
+  ],
+  "board.created": ({ code, name }, { who, board }) => [who, " added the board ", board(code, name), "."],
+  "board.edited": ({ code, name }, { who, board }) => [who, " changed the board ", board(code, name), "."],
+  "board.archived": ({ code, name }, { who, board }) => [who, " archived the board ", board(code, name), "."],
+  "board.restored": ({ code, name }, { who, board }) => [who, " restored the board ", board(code, name), "."],
+  "revision.created": ({ code, letter }, { who, board }) => [who, ` added revision ${letter} of `, board(code), "."],
+  "revision.released": ({ code, letter }, { who, board }) => [
+    who,
+    ` released revision ${letter} of `,
+    board(code),
+    ".",
+  ],
+  "unit.created": ({ serial }, { who, unit }) => [who, " added the unit ", unit(serial), "."],
+  "unit.edited": ({ serial }, { who, unit }) => [who, " changed the unit ", unit(serial), "."],
+  "unit.archived": ({ serial }, { who, unit }) => [who, " archived the unit ", unit(serial), "."],
+  "unit.restored": ({ serial }, { who, unit }) => [who, " restored the unit ", unit(serial), "."],
+  "slot.created": ({ position }, { who, slots }) => [who, " added ", slots(`slot ${position}`), "."],
+  "slot.edited": ({ position }, { who, slots }) => [who, " changed ", slots(`slot ${position}`), "."],
+  "slot.archived": ({ position }, { who, slots }) => [who, " archived ", slots(`slot ${position}`), "."],
+  "unit.placed": ({ serial, position }, { who, unit, slots }) => [
+    who,
+    " put ",
+    unit(serial),
+    " into ",
+    slots(`slot ${position}`),
+    ".",
+  ],
+  "unit.removed": ({ serial, position }, { who, unit, slots }) => [
+    who,
+    " took ",
+    unit(serial),
+    " out of ",
+    slots(`slot ${position}`),
+    ".",
+  ],
+  "procedure.issued": ({ code, number, note }, { who, procedure }) => [
+    who,
+    " issued ",
+    procedure(code, number),
+    because(note),
+  ],
+  "traveler.started": ({ serial, number }, { who, unit }) => [
+    who,
+    " started the traveler of ",
+    unit(serial),
+    ` from procedure version ${number}.`,
+  ],
+  "traveler.moved": ({ serial, from, to, kept, changed }, { who, unit }) => [
+    who,
+    " moved the traveler of ",
+    unit(serial),
+    ` from procedure version ${from} to ${to}: ${count(kept, "check")} kept, ${changed} changed.`,
+  ],
+  "attempt.recorded": ({ serial, title, verdict, reading }, { who, check, unit }) => {
+    const words = VERDICTS[verdict];
+    const result = reading === "" || reading === words ? words : `${reading}, ${words}`;
+    return [who, " recorded ", check(title), " on ", unit(serial), `: ${endSentence(result)}`];
+  },
+  "attempt.voided": ({ serial, title, reason }, { who, check, unit }) => [
+    who,
+    " voided an attempt at ",
+    check(title),
+    " on ",
+    unit(serial),
+    because(reason),
+  ],
+  "check.reopened": ({ serial, title, reason }, { who, check, unit }) => [
+    who,
+    " reopened ",
+    check(title),
+    " on ",
+    unit(serial),
+    because(reason),
+  ],
+  "check.doubted": ({ serial, title, reason }, { check, unit }) => [
+    check(title),
+    " on ",
+    unit(serial),
+    " is in doubt",
+    because(reason),
+  ],
+  "concession.granted": ({ serial, title, reason }, { who, check, unit }) => [
+    who,
+    " granted a concession for ",
+    check(title),
+    " on ",
+    unit(serial),
+    because(reason),
+  ],
+  "concession.withdrawn": ({ serial, title, reason }, { who, check, unit }) => [
+    who,
+    " withdrew the concession for ",
+    check(title),
+    " on ",
+    unit(serial),
+    because(reason),
+  ],
+  "hold.lifted": ({ serial, title, reason }, { who, check, unit }) => [
+    who,
+    " lifted the hold point ",
+    check(title),
+    " for ",
+    unit(serial),
+    because(reason),
+  ],
+  "prerequisite.added": ({ check: title, needs }, { who, check }) => [
+    who,
+    " made ",
+    check(title),
+    ` wait for ${needs}.`,
+  ],
+  "prerequisite.removed": ({ check: title, needs }, { who, check }) => [
+    who,
+    " let ",
+    check(title),
+    ` no longer wait for ${needs}.`,
+  ],
+  "evidence.attached": ({ kind, fileName }, { who, file, place }) => [
+    who,
+    " attached ",
+    file(fileWords(kind, fileName)),
+    ...place(" to "),
+    ".",
+  ],
+  "evidence.removed": ({ kind, fileName }, { who, place }) => [
+    who,
+    ` removed ${fileWords(kind, fileName)}`,
+    ...place(" from "),
+    ".",
+  ],
+  "evidence.restored": ({ kind, fileName }, { who, file, place }) => [
+    who,
+    " restored ",
+    file(fileWords(kind, fileName)),
+    ...place(" of "),
+    ".",
+  ],
+  "evidence.captioned": ({ kind, fileName, caption }, { who, file }) =>
+    caption === ""
+      ? [who, " took the caption off ", file(fileWords(kind, fileName)), "."]
+      : [who, " captioned ", file(fileWords(kind, fileName)), `: ${endSentence(caption)}`],
+  "log.written": ({ title }, { who, entry }) => [who, " wrote ", entry(title), "."],
+  "log.edited": ({ title }, { who, entry }) => [who, " edited ", entry(title), "."],
+  "log.archived": ({ title }, { who, entry }) => [who, " archived ", entry(title), "."],
+  "log.restored": ({ title }, { who, entry }) => [who, " restored ", entry(title), "."],
+};
+
+const count = (n: number, word: string) => `${n} ${word}${n === 1 ? "" : "s"}`;

@@ -1,0 +1,26 @@
+import { phrases, type SentenceContext, type SentencePart } from "./phrases";
+import { eventPayloads, type EventKind, type EventPayload } from "./schema";
+import { WRITERS } from "./sentence-writers";
+
+export type { SentenceContext, SentencePart } from "./phrases";
+
+/** The sentence of one event. A payload that no schema knows (an older form) still gets a true one. */
+export function sentenceOf(kind: string, payload: unknown, context: SentenceContext): SentencePart[] {
+  const parts = isEventKind(kind) ? write(kind, payload, context) : undefined;
+  return (parts ?? [context.actor, " changed something."]).map((part) =>
+    typeof part === "string" ? { text: part } : part,
+  );
+}
+
+function write<Kind extends EventKind>(kind: Kind, payload: unknown, context: SentenceContext) {
+  const parsed = eventPayloads[kind].safeParse(payload);
+  // The schema of this kind has just read it; the compiler cannot follow the correlation of kind and payload.
+  return parsed.success ? WRITERS[kind](parsed.data as EventPayload<Kind>, phrases(context)) : undefined;
+}
+
+export function isEventKind(kind: string): kind is EventKind {
+  return Object.hasOwn(eventPayloads, kind);
+}
+
+/** Without links, for mail text and titles. */
+export const plainSentence = (parts: readonly SentencePart[]): string => parts.map((part) => part.text).join("");
