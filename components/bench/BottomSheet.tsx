@@ -31,11 +31,17 @@ export function BottomSheet({ title, onClose, children, wide = false }: Props) {
       <div className="flex max-h-[88dvh] flex-col">
         <header className="border-rule flex items-center justify-between gap-3 border-b py-2 pr-2 pl-4">
           <h2 className="text-lg">{title}</h2>
-          <button type="button" onClick={onClose} className="hover:bg-copper-ground min-h-12 min-w-12 rounded px-3 font-semibold">
+          <button
+            type="button"
+            onClick={onClose}
+            className="hover:bg-copper-ground min-h-12 min-w-12 rounded px-3 font-semibold"
+          >
             Close
           </button>
         </header>
-        <div className="overflow-y-auto overscroll-contain p-4 pb-[max(1rem,env(safe-area-inset-bottom))]">{children}</div>
+        <div className="overflow-y-auto overscroll-contain p-4 pb-[max(1rem,env(safe-area-inset-bottom))]">
+          {children}
+        </div>
       </div>
     </dialog>
   );

@@ -57,7 +57,8 @@ function actsOnItsOwn(target: Pressed["target"]): boolean {
  * button (space, Enter), or held down (a pedal under a resting foot must not record twice).
  */
 export function benchKey(pressed: Pressed): BenchKey | undefined {
-  if (pressed.ctrlKey || pressed.metaKey || pressed.altKey || pressed.isComposing || isTyping(pressed.target)) return undefined;
+  if (pressed.ctrlKey || pressed.metaKey || pressed.altKey || pressed.isComposing || isTyping(pressed.target))
+    return undefined;
   const key = KEYS[pressed.key.length === 1 ? pressed.key.toLowerCase() : pressed.key];
   if (!key) return undefined;
   if ((pressed.key === " " || pressed.key === "Enter") && actsOnItsOwn(pressed.target)) return undefined;

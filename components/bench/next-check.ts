@@ -15,12 +15,17 @@ export function isToDo(state: CheckState): boolean {
  */
 export function nextFree<Check extends Seen>(checks: readonly Check[], afterId: string | undefined): Check | undefined {
   const start = checks.findIndex((check) => check.id === afterId) + 1;
-  const round = [...checks.slice(start), ...checks.slice(0, start)].filter((check) => check.id !== afterId && isToDo(check.state));
+  const round = [...checks.slice(start), ...checks.slice(0, start)].filter(
+    (check) => check.id !== afterId && isToDo(check.state),
+  );
   return round.find((check) => check.state !== "failed") ?? round[0];
 }
 
 /** The next hold point from the given check on that is not passed yet, itself included. */
 export function nextHold<Check extends Seen>(checks: readonly Check[], fromId: string): Check | undefined {
-  const start = Math.max(0, checks.findIndex((check) => check.id === fromId));
+  const start = Math.max(
+    0,
+    checks.findIndex((check) => check.id === fromId),
+  );
   return checks.slice(start).find((check) => check.holdPoint && check.state !== "passed" && check.state !== "conceded");
 }

@@ -22,7 +22,9 @@ const SPOKEN: readonly [RegExp, string][] = [
 ];
 
 export function spoken(text: string): string {
-  return SPOKEN.reduce((said, [symbol, words]) => said.replace(symbol, words), text).replace(/\s+/g, " ").trim();
+  return SPOKEN.reduce((said, [symbol, words]) => said.replace(symbol, words), text)
+    .replace(/\s+/g, " ")
+    .trim();
 }
 
 export function canReadAloud(): boolean {

@@ -23,18 +23,36 @@ export function defineKind<const Name extends string, Spec, Typed, Entry>(
     onSubmit,
     judged,
     busy,
+    rule,
   }: BenchFormProps<unknown, unknown>) {
     const spec = specShape.parse(stored);
     const draft = entryShape.safeParse(given).data ?? kind.emptyEntry(spec);
-    return <BenchForm spec={spec} draft={draft} onDraft={onDraft} onSubmit={onSubmit} judged={judged} busy={busy} />;
+    return (
+      <BenchForm
+        spec={spec}
+        draft={draft}
+        onDraft={onDraft}
+        onSubmit={onSubmit}
+        judged={judged}
+        busy={busy}
+        rule={rule}
+      />
+    );
   }
 
   function ErasedSpecForm({ value, onChange, errors }: SpecFormProps<unknown>) {
     return <SpecForm value={typedShape.safeParse(value).data ?? kind.emptyTyped} onChange={onChange} errors={errors} />;
   }
 
-  function ErasedRecordView({ spec, record, readings }: RecordViewProps<unknown, unknown>) {
-    return <RecordView spec={specShape.parse(spec)} record={entryShape.safeParse(record).data} readings={readings} />;
+  function ErasedRecordView({ spec, record, readings, rule }: RecordViewProps<unknown, unknown>) {
+    return (
+      <RecordView
+        spec={specShape.parse(spec)}
+        record={entryShape.safeParse(record).data}
+        readings={readings}
+        rule={rule}
+      />
+    );
   }
 
   return {

@@ -2,7 +2,8 @@ import { judge, pickRange } from "@/lib/calc/conformity";
 import { parseQuantity } from "@/lib/calc/units";
 import type { Verdict } from "@/db/schema/travelers";
 import type { JudgeContext, JudgedReading } from "./kind";
-import { limitsOf, type TypedLimits } from "./typed-limits";
+import { limitsOf } from "./limits-of";
+import type { TypedLimits } from "./typed-limits";
 
 const LONGEST = 60;
 
@@ -20,7 +21,7 @@ export function judgeReading({ label, typed, unit, limits }: Asked, context: Jud
   const ranges = context.instrumentRanges.filter((range) => range.unit === unit);
   const judged = judge({
     reading: value,
-    limits: limitsOf(limits),
+    limits: limitsOf(limits, unit),
     accuracy: pickRange(ranges, value),
     rule: context.rule,
   });

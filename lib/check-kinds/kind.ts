@@ -40,6 +40,8 @@ export type BenchFormProps<Spec, Draft> = {
   onDraft: (draft: Draft) => void;
   /** Judged as one types, with the same code as on the server; undefined while there is nothing to judge. */
   judged: Judged | undefined;
+  /** By which the limits are drawn: with guard bands or without. */
+  rule: DecisionRule;
   /** Enter in the last field, or a touch on one of the kind's own buttons. */
   onSubmit: (draft: Draft) => void;
   busy: boolean;
@@ -53,7 +55,12 @@ export type SpecFormProps<Typed> = {
 };
 
 /** How a recorded attempt shows on the traveler, on the printed sheet (empty when nothing is recorded) and in a mail. */
-export type RecordViewProps<Spec, Entry> = { spec: Spec; record: Entry | undefined; readings: JudgedReading[] };
+export type RecordViewProps<Spec, Entry> = {
+  spec: Spec;
+  record: Entry | undefined;
+  readings: JudgedReading[];
+  rule: DecisionRule;
+};
 
 /** Evidence without which an attempt of a check cannot be recorded. */
 export type Requires = { kinds: AttachmentKind[]; minimum: number };

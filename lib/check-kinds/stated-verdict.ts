@@ -1,9 +1,14 @@
-import { z } from "zod";
 import type { Judged, JudgeContext, Requires } from "./kind";
 
 /** What a builder enters where the eye judges. Null until one of the two has been touched. */
-export const statedEntryShape = z.object({ conforms: z.boolean().nullable() });
-export type StatedEntry = z.infer<typeof statedEntryShape>;
+export type StatedEntry = { conforms: boolean | null };
+
+export function isStatedEntry(value: unknown): value is StatedEntry {
+  if (typeof value !== "object" || value === null || !("conforms" in value)) return false;
+  return value.conforms === null || typeof value.conforms === "boolean";
+}
+
+export const state = (conforms: boolean): StatedEntry => ({ conforms });
 
 export const NOTHING_STATED: StatedEntry = { conforms: null };
 

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { parseLimits, type Limits } from "@/lib/calc/units";
+import { parseLimits } from "@/lib/calc/units";
 
 /** Limits as they were typed, and what was understood: in the base unit, null where there is none. */
 export const typedLimitsShape = z.object({
@@ -23,7 +23,3 @@ export function readLimits(typed: string, unit: string, context: z.RefinementCtx
 }
 
 const TOO_LONG = { ok: false as const, message: `At most ${LONGEST} characters fit here.` };
-
-export function limitsOf(stored: TypedLimits): Limits {
-  return { lower: stored.lower ?? undefined, upper: stored.upper ?? undefined };
-}

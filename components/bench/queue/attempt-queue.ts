@@ -14,8 +14,7 @@ export type QueueState = {
 };
 
 export type QueueEvent =
-  | { kind: "sent"; attempt: HeldAttempt; answer: unknown }
-  | { kind: "refused"; attempt: HeldAttempt };
+  { kind: "sent"; attempt: HeldAttempt; answer: unknown } | { kind: "refused"; attempt: HeldAttempt };
 
 /** What the browser gives and a test replaces. */
 export type Surroundings = {

@@ -1,6 +1,7 @@
 import { createQueue, type AttemptQueue } from "./attempt-queue";
 import { deviceStore } from "./device-store";
 import { sendWithFiles } from "./send-with-files";
+import { uploadHeldFile } from "./upload-held-file";
 
 const LOCK = "boardwake-bench-queue";
 const queues = new Map<string, AttemptQueue>();
@@ -23,7 +24,8 @@ export function browserQueue(userId: string): AttemptQueue {
   const channel = new BroadcastChannel(LOCK);
   const queue = createQueue(userId, {
     store: deviceStore,
-    send: sendWithFiles,
+    send: (attempt) =>
+      sendWithFiles({ attempt, upload: (held, file) => uploadHeldFile(held.project, file), keep: deviceStore.put }),
     now: Date.now,
     exclusively,
     later,

@@ -1,3 +1,4 @@
+import type { AttachmentKind } from "@/db/schema/evidence";
 import type { Verdict } from "@/db/schema/travelers";
 
 /** What POST …/attempts is sent. Plain JSON, so that a queue survives a new build of the application. */
@@ -13,8 +14,22 @@ export type AttemptBody = {
   attachmentIds: string[];
 };
 
-/** A file taken for the attempt that has not been uploaded yet. */
-export type HeldFile = { uploadId: string; file: Blob; fileName: string };
+/** A file taken at the bench. Once the server keeps it, `attachmentId` names it there and the bytes are let go. */
+export type HeldFile = {
+  /** Client-made UUID: sending the file again makes no second row. */
+  uploadId: string;
+  checkId: string;
+  userId: string;
+  fileName: string;
+  /** What it counts as until the server has looked at its content. */
+  kind: AttachmentKind;
+  /** What is wanted of it, as the server is told. */
+  kinds: AttachmentKind[];
+  file: Blob | null;
+  attachmentId: string | null;
+  /** Why the server will not have it; empty while it may still go. */
+  refusal: string;
+};
 
 /** Why an attempt is still on the device, in the words the person reads. */
 export type Trouble = {

@@ -42,23 +42,26 @@ export async function sendNext({ store, userId, now, send, random }: Given): Pro
   if (!attempt) return { kind: "done" };
   if (attempt.notBefore > now) return { kind: "later", at: attempt.notBefore };
   const outcome = await send(attempt);
+  if (outcome.kind === "accepted") {
+    await store.remove(attempt.body.id);
+    return { kind: "sent", attempt, answer: outcome.answer };
+  }
+  // Sending may have written down files that have arrived: go on from what is there now.
+  const kept = (await store.all()).find((one) => one.order === attempt.order) ?? attempt;
   switch (outcome.kind) {
-    case "accepted":
-      await store.remove(attempt.body.id);
-      return { kind: "sent", attempt, answer: outcome.answer };
     case "refused": {
       const { sentence, fields } = outcome;
-      const kept: HeldAttempt = { ...attempt, trouble: { kind: "refused", sentence, ...(fields ? { fields } : {}) } };
-      await store.put(kept);
-      return { kind: "refused", attempt: kept };
+      const refused: HeldAttempt = { ...kept, trouble: { kind: "refused", sentence, ...(fields ? { fields } : {}) } };
+      await store.put(refused);
+      return { kind: "refused", attempt: refused };
     }
     case "signed-out":
-      await store.put({ ...attempt, trouble: { kind: "signed-out", sentence: outcome.sentence } });
+      await store.put({ ...kept, trouble: { kind: "signed-out", sentence: outcome.sentence } });
       return { kind: "signed-out" };
     case "later": {
       const tries = attempt.tries + 1;
       const at = now + Math.max(outcome.afterMs ?? 0, backOff(tries, random));
-      await store.put({ ...attempt, tries, notBefore: at, trouble: { kind: "waiting", sentence: outcome.sentence } });
+      await store.put({ ...kept, tries, notBefore: at, trouble: { kind: "waiting", sentence: outcome.sentence } });
       return { kind: "later", at };
     }
   }

@@ -1,19 +1,9 @@
-"use client";
-
-import { Button } from "@/components/ui/Button";
+import { StatedForm } from "@/components/bench/StatedForm";
 import type { BenchFormProps } from "../kind";
 import type { StatedEntry } from "../stated-verdict";
 import type { Spec } from "./schema";
 
-export function BenchForm({ onSubmit, busy }: BenchFormProps<Spec, StatedEntry>) {
-  return (
-    <div className="grid gap-3">
-      <Button isDisabled={busy} onPress={() => onSubmit({ conforms: true })}>
-        Conforms
-      </Button>
-      <Button isDisabled={busy} onPress={() => onSubmit({ conforms: false })}>
-        Does not conform
-      </Button>
-    </div>
-  );
+/** The two buttons are the frame's. Here stands only what was stated and cannot be recorded yet. */
+export function BenchForm({ draft, judged }: BenchFormProps<Spec, StatedEntry>) {
+  return <StatedForm conforms={draft.conforms} judged={judged} />;
 }

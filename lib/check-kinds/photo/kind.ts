@@ -1,5 +1,6 @@
 import { defineKind } from "../define-kind";
-import { NOTHING_STATED, statedEntryShape, summariseStated } from "../stated-verdict";
+import { statedEntryShape } from "../stated-entry-shape";
+import { NOTHING_STATED, summariseStated } from "../stated-verdict";
 import { BenchForm } from "./BenchForm";
 import { judge, requires } from "./judge";
 import { RecordView } from "./RecordView";

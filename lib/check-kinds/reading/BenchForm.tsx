@@ -1,24 +1,46 @@
 "use client";
 
-import { Button } from "@/components/ui/Button";
-import { QuantityField } from "@/components/ui/QuantityField";
+import { useEffect, useRef } from "react";
+import { NumericPad } from "@/components/bench/NumericPad";
+import { PadSlot } from "@/components/bench/PadSlot";
+import { ReadingField } from "@/components/bench/ReadingField";
+import { startsReading } from "@/components/bench/starts-reading";
+import { LimitBar } from "@/components/ui/glyphs/LimitBar";
 import type { BenchFormProps } from "../kind";
+import { drawnLimits } from "../reading-limits";
 import type { Entry, Spec } from "./schema";
 
-export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy }: BenchFormProps<Spec, Entry>) {
+/** The figure as one reads it off the meter, its place between the limits, and the pad. */
+export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy, rule }: BenchFormProps<Spec, Entry>) {
+  const field = useRef<HTMLInputElement>(null);
+  const reading = judged?.ok ? judged.readings[0] : undefined;
+  const drawn = drawnLimits(
+    { ...spec.limits, expandedUncertainty: reading?.expandedUncertainty ?? null },
+    spec.unit,
+    rule,
+  );
+  const shown = reading && Number.isFinite(reading.value) ? reading.value : undefined;
+
+  useEffect(() => startsReading(() => field.current?.focus()), []);
+
   return (
-    <div className="grid gap-3">
-      <QuantityField
-        isBench
+    <div className="grid gap-2">
+      <ReadingField
+        ref={field}
         label="Reading"
-        suffix={spec.unit}
-        value={draft.typed}
-        onChange={(typed) => onDraft({ typed })}
+        unit={spec.unit}
+        typed={draft.typed}
+        judged={judged}
+        verdict={reading?.verdict}
+        disabled={busy}
+        onTyped={(typed) => onDraft({ typed })}
+        onEnter={() => onSubmit(draft)}
       />
-      <p>{judged?.ok ? judged.sentences.join(" ") : judged?.message}</p>
-      <Button isDisabled={busy || !judged?.ok} onPress={() => onSubmit(draft)}>
-        Record
-      </Button>
+      <LimitBar {...drawn} value={shown} size="bench" className="px-6" />
+      {judged?.ok && <p className="text-ink-soft text-sm">{judged.sentences.join(" ")}</p>}
+      <PadSlot>
+        <NumericPad unit={spec.unit} typed={draft.typed} onTyped={(typed) => onDraft({ typed })} disabled={busy} />
+      </PadSlot>
     </div>
   );
 }

@@ -1,11 +1,12 @@
-import { formatLimits, formatQuantity } from "@/lib/calc/units";
+import { formatLimits } from "@/lib/calc/units";
 import { defineKind } from "../define-kind";
-import { limitsOf } from "../typed-limits";
+import { limitsOf } from "../limits-of";
 import { BenchForm } from "./BenchForm";
 import { judge } from "./judge";
 import { RecordView } from "./RecordView";
 import { entryShape, specFromTyped, specShape, typedShape } from "./schema";
 import { SpecForm } from "./SpecForm";
+import { summary } from "./summary";
 
 export const reading = defineKind({
   name: "reading",
@@ -19,9 +20,8 @@ export const reading = defineKind({
   entryShape,
   emptyEntry: () => ({ typed: "" }),
   judge,
-  expectation: (spec) => formatLimits(limitsOf(spec.limits), spec.unit),
-  summary: (spec, entry, readings) =>
-    readings[0] ? formatQuantity(readings[0].value, readings[0].unit) : `${entry.typed} ${spec.unit}`,
+  expectation: (spec) => formatLimits(limitsOf(spec.limits, spec.unit)),
+  summary,
   measured: true,
   requires: () => undefined,
   BenchForm,

@@ -1,32 +1,66 @@
 "use client";
 
-import { Button } from "@/components/ui/Button";
-import { QuantityField } from "@/components/ui/QuantityField";
+import { useEffect, useRef, useState } from "react";
+import { NumericPad } from "@/components/bench/NumericPad";
+import { PadSlot } from "@/components/bench/PadSlot";
+import { ReadingField } from "@/components/bench/ReadingField";
+import { startsReading } from "@/components/bench/starts-reading";
+import { LimitBar } from "@/components/ui/glyphs/LimitBar";
 import type { BenchFormProps } from "../kind";
+import { drawnLimits } from "../reading-limits";
+import { CellGrid } from "./CellGrid";
+import { cellAfter, cellsOf, firstOpenCell } from "./cells";
+import { withCell } from "./entry";
 import type { Entry, Spec } from "./schema";
 
-export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy }: BenchFormProps<Spec, Entry>) {
-  const change = (row: number, column: number, typed: string) =>
-    onDraft({
-      cells: draft.cells.map((cells, r) => (r === row ? cells.map((cell, c) => (c === column ? typed : cell)) : cells)),
-    });
+/** One cell at a time, big; above it the whole grid, in which a touch chooses the cell. */
+export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy, rule }: BenchFormProps<Spec, Entry>) {
+  const field = useRef<HTMLInputElement>(null);
+  const [chosen, setChosen] = useState<{ row: number; column: number }>();
+  const at = chosen ?? firstOpenCell(spec, draft) ?? { row: 0, column: 0 };
+  const cells = cellsOf(spec, draft, rule);
+  const cell = cells.find((one) => one.row === at.row && one.column === at.column);
+
+  useEffect(() => startsReading(() => field.current?.focus()), []);
+  if (!cell) return null;
+
+  const write = (typed: string) => onDraft(withCell(draft, spec.rows.length, spec.columns.length, at, typed));
+  const goOn = () => {
+    const next = cellAfter(spec, draft, at);
+    if (next) setChosen(next);
+    else onSubmit(draft);
+  };
+  const drawn = drawnLimits({ ...cell.limits, expandedUncertainty: null }, cell.unit, rule);
   return (
-    <div className="grid gap-3">
-      {spec.rows.map((row, r) =>
-        spec.columns.map((column, c) => (
-          <QuantityField
-            key={`${r} ${c}`}
-            label={`${row.label}, ${column}`}
-            suffix={row.unit}
-            value={draft.cells[r]?.[c] ?? ""}
-            onChange={(typed) => change(r, c, typed)}
-          />
-        )),
-      )}
-      <p>{judged?.ok ? judged.sentences.join(" ") : judged?.message}</p>
-      <Button isDisabled={busy || !judged?.ok} onPress={() => onSubmit(draft)}>
-        Record
-      </Button>
+    <div className="grid gap-2">
+      <CellGrid spec={spec} cells={cells} at={at} onChoose={setChosen} />
+      <div className="flex items-end gap-2">
+        <ReadingField
+          key={`${at.row} ${at.column}`}
+          ref={field}
+          label={`${cell.label}`}
+          unit={cell.unit}
+          typed={cell.typed}
+          judged={cell.judged}
+          verdict={cell.judged?.ok ? cell.judged.verdict : undefined}
+          disabled={busy}
+          onTyped={write}
+          onEnter={goOn}
+        />
+        <button
+          type="button"
+          onPointerDown={(event) => event.preventDefault()}
+          onClick={goOn}
+          className="border-edge bg-raised min-h-16 shrink-0 rounded-md border px-4 font-semibold"
+        >
+          {cellAfter(spec, draft, at) ? "Next cell" : "Record"}
+        </button>
+      </div>
+      <LimitBar {...drawn} value={cell.value} size="bench" className="px-6" />
+      {judged?.ok && <p className="text-ink-soft text-sm">{judged.sentences.join(" ")}</p>}
+      <PadSlot>
+        <NumericPad unit={cell.unit} typed={cell.typed} onTyped={write} disabled={busy} />
+      </PadSlot>
     </div>
   );
 }

@@ -1,11 +1,12 @@
 import { formatLimits } from "@/lib/calc/units";
 import { defineKind } from "../define-kind";
-import { limitsOf } from "../typed-limits";
+import { limitsOf } from "../limits-of";
 import { BenchForm } from "./BenchForm";
 import { judge } from "./judge";
 import { RecordView } from "./RecordView";
 import { entryShape, specFromTyped, specShape, typedShape, type Spec } from "./schema";
 import { SpecForm } from "./SpecForm";
+import { summary } from "./summary";
 
 export const table = defineKind({
   name: "table",
@@ -28,10 +29,7 @@ export const table = defineKind({
   emptyEntry: ({ columns, rows }) => ({ cells: rows.map(() => columns.map(() => "")) }),
   judge,
   expectation,
-  summary: (_spec, _entry, readings) => {
-    const wrong = readings.filter((reading) => reading.verdict === "does-not-conform").length;
-    return wrong === 0 ? `all ${readings.length} conform` : `${wrong} of ${readings.length} do not conform`;
-  },
+  summary: (_spec, _entry, readings) => summary(readings),
   measured: true,
   requires: () => undefined,
   BenchForm,
@@ -42,6 +40,6 @@ export const table = defineKind({
 /** One row shows its limits; more show how many readings there are. */
 function expectation({ columns, rows }: Spec): string {
   const [only, ...rest] = rows;
-  if (only && rest.length === 0) return `${only.label} ${formatLimits(limitsOf(only.limits), only.unit)}`;
+  if (only && rest.length === 0) return `${only.label} ${formatLimits(limitsOf(only.limits, only.unit))}`;
   return `${rows.length} × ${columns.length} readings`;
 }

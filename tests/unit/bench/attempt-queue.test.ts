@@ -97,7 +97,9 @@ describe("the queue of the bench", () => {
 
   it("keeps what the server refused, with its sentence, and goes on with the other checks", async () => {
     const shed = device((attempt) =>
-      attempt.body.id === "a" ? { kind: "refused", sentence: "Hold point 3 is not passed.", fields: { record: "Look again." } } : accepted,
+      attempt.body.id === "a"
+        ? { kind: "refused", sentence: "Hold point 3 is not passed.", fields: { record: "Look again." } }
+        : accepted,
     );
     const tab = shed.tab();
     await shed.store.add(attemptOf("a", "one"));
@@ -108,7 +110,10 @@ describe("the queue of the bench", () => {
     expect(shed.sent).toEqual(["a", "b"]);
     expect(refused).toEqual(["a"]);
     expect(tab.state().held).toMatchObject([
-      { body: { id: "a" }, trouble: { kind: "refused", sentence: "Hold point 3 is not passed.", fields: { record: "Look again." } } },
+      {
+        body: { id: "a" },
+        trouble: { kind: "refused", sentence: "Hold point 3 is not passed.", fields: { record: "Look again." } },
+      },
     ]);
   });
 

@@ -11,15 +11,23 @@ const blockedBy = (checkId: string, state: CheckState = "untested"): BlockerView
   title: checkId,
   why: "hold point",
 });
-const check = (id: string, state: CheckState, blockers: BlockerView[] = [], holdPoint = false) => ({ id, state, blockers, holdPoint });
+const check = (id: string, state: CheckState, blockers: BlockerView[] = [], holdPoint = false) => ({
+  id,
+  state,
+  blockers,
+  holdPoint,
+});
 const states = (checks: { state: CheckState }[]) => checks.map(({ state }) => state);
 
 describe("what the bench foresees while attempts are on their way", () => {
   it("shows a conforming attempt as passed and another as failed", () => {
-    const seen = foresee([check("a", "untested"), check("b", "doubtful")], [
-      { checkId: "a", verdict: "guard-band" },
-      { checkId: "b", verdict: "does-not-conform" },
-    ]);
+    const seen = foresee(
+      [check("a", "untested"), check("b", "doubtful")],
+      [
+        { checkId: "a", verdict: "guard-band" },
+        { checkId: "b", verdict: "does-not-conform" },
+      ],
+    );
     expect(states(seen)).toEqual(["passed", "failed"]);
   });
 
@@ -37,10 +45,13 @@ describe("what the bench foresees while attempts are on their way", () => {
   });
 
   it("lets the later of two attempts count", () => {
-    const seen = foresee([check("a", "untested")], [
-      { checkId: "a", verdict: "does-not-conform" },
-      { checkId: "a", verdict: "conforms" },
-    ]);
+    const seen = foresee(
+      [check("a", "untested")],
+      [
+        { checkId: "a", verdict: "does-not-conform" },
+        { checkId: "a", verdict: "conforms" },
+      ],
+    );
     expect(states(seen)).toEqual(["passed"]);
   });
 });

@@ -33,7 +33,8 @@ describe("keys at the bench", () => {
       { tagName: "SELECT" },
       { tagName: "DIV", isContentEditable: true },
     ];
-    for (const field of fields) for (const key of [" ", "x", "n", "p", "Enter", "ArrowLeft", "?"]) expect(press(key, field)).toBeUndefined();
+    for (const field of fields)
+      for (const key of [" ", "x", "n", "p", "Enter", "ArrowLeft", "?"]) expect(press(key, field)).toBeUndefined();
   });
 
   it("leave space and Enter to a focused button, and the rest not", () => {

@@ -41,7 +41,15 @@ export function attemptOf(id: string, checkId: string, userId = "mo"): NewAttemp
     checkTitle: "5 V rail",
     foreseen: "conforms",
     summary: "4.983 V",
-    body: { id, checkId, performedAt: "2026-02-03T19:40:00.000Z", record: { typed: "4.983" }, note: "", instrumentId: null, attachmentIds: [] },
+    body: {
+      id,
+      checkId,
+      performedAt: "2026-02-03T19:40:00.000Z",
+      record: { typed: "4.983" },
+      note: "",
+      instrumentId: null,
+      attachmentIds: [],
+    },
     files: [],
   };
 }

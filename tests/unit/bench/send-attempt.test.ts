@@ -16,7 +16,9 @@ describe("an answer of the server", () => {
 
   it("means again later when the database is away, the server stumbles or asks for patience", () => {
     for (const status of [408, 425, 429, 500, 502, 503, 504]) {
-      expect(outcomeOf(status, { detail: "The database does not answer just now." }, null)).toMatchObject({ kind: "later" });
+      expect(outcomeOf(status, { detail: "The database does not answer just now." }, null)).toMatchObject({
+        kind: "later",
+      });
     }
     expect(outcomeOf(429, undefined, "7")).toMatchObject({ kind: "later", afterMs: 7000 });
   });
@@ -32,7 +34,9 @@ describe("an answer of the server", () => {
 
 describe("the wait before the next try", () => {
   it("doubles from one second up to a minute", () => {
-    expect([1, 2, 3, 4, 5, 6, 7, 50].map((tries) => backOff(tries, 0))).toEqual([1000, 2000, 4000, 8000, 16000, 32000, 60000, 60000]);
+    expect([1, 2, 3, 4, 5, 6, 7, 50].map((tries) => backOff(tries, 0))).toEqual([
+      1000, 2000, 4000, 8000, 16000, 32000, 60000, 60000,
+    ]);
   });
 
   it("is spread so that several devices do not come back at the same instant", () => {

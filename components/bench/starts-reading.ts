@@ -1,0 +1,19 @@
+import { isTyping } from "./key-map";
+
+/** Characters with which a reading can begin. Letters are not among them: n and p are keys of the bench. */
+const BEGINS = /^[0-9.,+\-−]$/;
+
+/**
+ * Typing a figure anywhere begins the reading: focusing the field on keydown lets the character land in it.
+ * Returns how to stop listening.
+ */
+export function startsReading(focus: () => void): () => void {
+  const onKeyDown = (event: KeyboardEvent) => {
+    if (event.ctrlKey || event.metaKey || event.altKey || !BEGINS.test(event.key)) return;
+    if (event.target instanceof HTMLElement && (isTyping(event.target) || event.target.closest("dialog"))) return;
+    if (document.querySelector("dialog[open]")) return;
+    focus();
+  };
+  addEventListener("keydown", onKeyDown);
+  return () => removeEventListener("keydown", onKeyDown);
+}

@@ -1,0 +1,29 @@
+import { formatQuantity, isUnit } from "@/lib/calc/units";
+import type { DecisionRule } from "@/db/schema/projects";
+import type { JudgedReading } from "./kind";
+
+type Drawn = {
+  lower: number | undefined;
+  upper: number | undefined;
+  guard: number | undefined;
+  format: (value: number) => string;
+};
+
+/** A figure with its unit; one of a unit that is no longer known is still written. */
+export function figure(value: number, unit: string): string {
+  return isUnit(unit) ? formatQuantity({ value, unit }) : `${value} ${unit}`;
+}
+
+/** What the drawing of the limits takes. Guard bands are drawn only where the project's rule uses them. */
+export function drawnLimits(
+  { lower, upper, expandedUncertainty }: Pick<JudgedReading, "lower" | "upper" | "expandedUncertainty">,
+  unit: string,
+  rule: DecisionRule,
+): Drawn {
+  return {
+    lower: lower ?? undefined,
+    upper: upper ?? undefined,
+    guard: rule === "guarded" ? (expandedUncertainty ?? undefined) : undefined,
+    format: (value) => figure(value, unit),
+  };
+}
