@@ -13,6 +13,7 @@ export const metadata: Metadata = {
   title: { default: "Boardwake", template: "%s · Boardwake" },
   description,
   applicationName: "Boardwake",
+  ...(process.env.APP_URL ? { metadataBase: new URL(process.env.APP_URL) } : {}),
   openGraph: { siteName: "Boardwake", title: "Boardwake", description, type: "website" },
   twitter: { card: "summary_large_image" },
   formatDetection: { telephone: false, date: false, address: false, email: false },

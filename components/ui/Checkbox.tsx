@@ -32,7 +32,7 @@ export function Checkbox(props: CheckboxProps) {
       isInvalid={Boolean(error)}
       validationBehavior="aria"
       inputRef={inputRef ?? null}
-      className={clsx("flex flex-col gap-1", className)}
+      className={clsx("flex flex-col", className)}
     >
       <CheckboxButton className="group flex min-h-8 cursor-pointer items-start gap-2.5 py-1 text-[0.9375rem] outline-none data-disabled:text-ink-faint">
         {({ isSelected, isIndeterminate, isFocusVisible }) => (
@@ -52,7 +52,7 @@ export function Checkbox(props: CheckboxProps) {
         )}
       </CheckboxButton>
       {description && (
-        <Text slot="description" className="pl-[1.875rem] text-sm text-ink-soft">
+        <Text slot="description" className="-mt-0.5 pl-[1.875rem] text-sm text-ink-soft">
           {description}
         </Text>
       )}

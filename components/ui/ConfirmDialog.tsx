@@ -18,8 +18,8 @@ export type ConfirmDialogProps = {
   confirmLabel: string;
   cancelLabel?: string;
   kind?: "danger" | "primary";
-  /** Resolves to a sentence when it did not work; the dialog then stays and says it. */
-  onConfirm: () => void | Promise<string | void>;
+  /** Gives a sentence when it did not work; the dialog then stays and says it. */
+  onConfirm: () => string | void | Promise<string | void>;
   children?: ReactNode;
 };
 

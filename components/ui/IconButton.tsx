@@ -29,7 +29,7 @@ export function IconButton({ icon, label, size = "md", className, tooltip = true
         className,
       )}
     >
-      <Icon name={icon} size={size === "bench" ? 24 : 16} />
+      <Icon name={icon} size={size === "bench" ? 24 : size === "sm" ? 16 : 18} />
     </AriaButton>
   );
   return tooltip ? <Tooltip text={label}>{button}</Tooltip> : button;

@@ -1,21 +1,24 @@
 import clsx from "clsx";
 import type { ReactNode } from "react";
+import { StateGlyph, type GlyphState } from "./glyphs/StateGlyph";
 import { Icon, type IconName } from "./Icon";
 import { TONES, type Tone } from "./tone";
 
-export type NoticeKind =
-  "caution" | "error" | "info" | "passed" | "failed" | "reopened" | "doubtful" | "conceded" | "waiting";
+export type NoticeKind = "caution" | "error" | "info" | GlyphState;
 
-const LOOKS: Record<NoticeKind, { tone: Tone; icon?: IconName; role?: "alert" | "status" }> = {
+type Look = { tone: Tone; icon?: IconName; role?: "alert" | "status" };
+
+const LOOKS: Record<NoticeKind, Look> = {
   caution: { tone: "doubtful", icon: "caution" },
   error: { tone: "failed", icon: "caution", role: "alert" },
-  failed: { tone: "failed", role: "alert" },
   info: { tone: "conceded", icon: "info" },
-  passed: { tone: "passed", icon: "check", role: "status" },
+  passed: { tone: "passed", role: "status" },
+  failed: { tone: "failed", role: "alert" },
   reopened: { tone: "reopened" },
   doubtful: { tone: "doubtful" },
   conceded: { tone: "conceded" },
   waiting: { tone: "waiting" },
+  untested: { tone: "untested" },
 };
 
 export type NoticeProps = {
@@ -29,7 +32,7 @@ export type NoticeProps = {
   className?: string;
 };
 
-/** A strip beside the thing it speaks of: bar, ground, sentence. */
+/** A strip beside the thing it speaks of: bar, glyph, sentence. */
 export function Notice({ kind, title, children, actions, role, className }: NoticeProps) {
   const look = LOOKS[kind];
   const shownRole = role === "none" ? undefined : (role ?? look.role);
@@ -43,7 +46,7 @@ export function Notice({ kind, title, children, actions, role, className }: Noti
         className,
       )}
     >
-      {look.icon && <Icon name={look.icon} className={clsx("mt-[0.2em]", TONES[look.tone].text)} />}
+      <Mark kind={kind} look={look} />
       <div className="flex min-w-0 flex-1 flex-col gap-1">
         {title && <p className="font-semibold">{title}</p>}
         {children && <div className="min-w-0 [&_p+p]:mt-1">{children}</div>}
@@ -51,4 +54,10 @@ export function Notice({ kind, title, children, actions, role, className }: Noti
       </div>
     </div>
   );
+}
+
+function Mark({ kind, look }: { kind: NoticeKind; look: Look }) {
+  if (look.icon) return <Icon name={look.icon} size={18} className={clsx("mt-[0.15em]", TONES[look.tone].text)} />;
+  if (kind === "caution" || kind === "error" || kind === "info") return null;
+  return <StateGlyph state={kind} size={14} className="mt-[0.25em]" />;
 }

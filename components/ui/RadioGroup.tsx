@@ -66,7 +66,7 @@ function RadioLine({ option }: { option: Option }) {
         )}
       </RadioButton>
       {option.description && (
-        <Text slot="description" className="block pb-1 pl-[1.875rem] text-sm text-ink-soft">
+        <Text slot="description" className="-mt-0.5 block pb-1 pl-[1.875rem] text-sm text-ink-soft">
           {option.description}
         </Text>
       )}

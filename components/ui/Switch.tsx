@@ -49,7 +49,7 @@ export function Switch({ label, value, description, className, onBlur, inputRef,
         )}
       </SwitchButton>
       {description && (
-        <Text slot="description" className="pl-12 text-sm text-ink-soft">
+        <Text slot="description" className="-mt-0.5 pl-12 text-sm text-ink-soft">
           {description}
         </Text>
       )}

@@ -5,7 +5,7 @@ export const control = clsx(
   "w-full min-w-0 rounded-md border border-edge bg-raised text-base text-ink shadow-none transition-colors duration-100",
   "hover:border-ink-soft data-invalid:border-failed data-invalid:bg-failed-ground/40",
   "data-disabled:border-rule-strong data-disabled:bg-transparent data-disabled:text-ink-faint",
-  "read-only:not-data-disabled:bg-transparent",
+  "[&[readonly]]:bg-transparent [&[readonly]]:border-rule-strong",
 );
 
 export const inputBox = clsx(control, "min-h-10 px-3 py-1.5");

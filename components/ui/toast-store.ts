@@ -1,9 +1,7 @@
-import type { NoticeKind } from "./Notice";
-
 export type Toast = {
   id: number;
   text: string;
-  kind: Extract<NoticeKind, "passed" | "info" | "error">;
+  kind: "passed" | "info" | "error";
   /** Takes the act back. The toast then stays long enough to be reached by keyboard. */
   undo?: { label?: string; run: () => void | Promise<void> };
   milliseconds: number | null;

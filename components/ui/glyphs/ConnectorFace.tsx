@@ -17,7 +17,7 @@ export type ConnectorFaceProps = {
 
 const PITCH = 10;
 const EDGE = 7;
-const TEXT = 12;
+const TEXT = 13;
 
 /** The mating face to scale: one pitch between positions and between neighbouring row letters. */
 export function ConnectorFace(props: ConnectorFaceProps) {
@@ -44,7 +44,8 @@ export function ConnectorFace(props: ConnectorFaceProps) {
       role="img"
       aria-label={`${label}, seen from the ${side} side. ${names.length > 0 ? `Lit: ${names.join(", ")}` : "No pin is lit"}`}
       viewBox={`${-EDGE - TEXT} ${-EDGE - TEXT} ${width + 2 * TEXT} ${height + 2 * TEXT}`}
-      className={clsx("block", className)}
+      className={clsx("block max-w-full", className)}
+      style={isLying ? { width: `${(width + 2 * TEXT) * 1.5}px` } : undefined}
     >
       <rect
         x={-EDGE}
@@ -61,10 +62,10 @@ export function ConnectorFace(props: ConnectorFaceProps) {
           <g key={row}>
             <text
               {...(isLying
-                ? { x: side === "solder" ? width - EDGE + 6 : -EDGE - 6, y: first.y + 2.5 }
+                ? { x: side === "solder" ? width - EDGE + 6 : -EDGE - 6, y: first.y + 3.5 }
                 : { x: first.x, y: -EDGE - 4 })}
               textAnchor="middle"
-              className="mono fill-ink-soft text-[7px]"
+              className="mono fill-ink-soft text-[9.5px]"
             >
               {row}
             </text>
@@ -81,9 +82,9 @@ export function ConnectorFace(props: ConnectorFaceProps) {
           return (
             <text
               key={position}
-              {...(isLying ? { x, y: height - EDGE + 8.5 } : { x: -EDGE - 3, y: y + 2.5 })}
+              {...(isLying ? { x, y: height - EDGE + 10.5 } : { x: -EDGE - 3, y: y + 3.5 })}
               textAnchor={isLying ? "middle" : "end"}
-              className="mono fill-ink-soft text-[7px]"
+              className="mono fill-ink-soft text-[9.5px]"
             >
               {position}
             </text>

@@ -12,71 +12,88 @@ export type LimitBarProps = Limits & {
   className?: string;
 };
 
-const MARKS: Record<Standing, string> = { inside: "fill-passed", guard: "fill-doubtful", outside: "fill-failed" };
-
 const WORDS: Record<Standing, string> = {
   inside: "inside the limits",
   guard: "inside the limits, in the guard band",
   outside: "outside the limits",
 };
 
-const WIDTH = 200;
+const MARKS: Record<Standing, string> = { inside: "bg-passed", guard: "bg-doubtful", outside: "bg-failed" };
+
+const percent = (share: number) => `${(share * 100).toFixed(3)}%`;
 
 /** The limits as a scale: end stops, ochre guard bands, and the reading's mark. Off the scale the mark is an arrow. */
 export function LimitBar({ lower, upper, guard = 0, value, format, size = "row", className }: LimitBarProps) {
   const limits = { lower, upper };
-  const scale = limitScale(limits);
-  const x = (figure: number) => scale.at(figure) * WIDTH;
+  const { at, isOff } = limitScale(limits);
   const stops = [lower, upper].filter((stop) => stop !== undefined);
   const verdict = value === undefined ? undefined : standing(value, limits, guard);
-  const [from, to] = [lower === undefined ? 0 : x(lower), upper === undefined ? WIDTH : x(upper)];
+  const isLarge = size === "bench";
   return (
     <div className={clsx("min-w-24", className)}>
-      <svg
+      <div
         role="img"
         aria-label={words({ ...limits, value, verdict, format })}
-        viewBox={`-4 0 ${WIDTH + 8} 20`}
-        preserveAspectRatio="none"
-        className={clsx("block w-full overflow-visible", size === "bench" ? "h-7" : "h-4.5")}
+        className={clsx("relative mx-1 print:[print-color-adjust:exact]", isLarge ? "h-8" : "h-4.5")}
       >
-        <path d={`M0 10H${WIDTH}`} className="stroke-rule-strong" strokeWidth="1.5" vectorEffect="non-scaling-stroke" />
-        <path d={`M${from} 10H${to}`} className="stroke-ink-soft" strokeWidth="1.5" vectorEffect="non-scaling-stroke" />
-        {guard > 0 && lower !== undefined && <Guard from={x(lower)} to={x(lower + guard)} />}
-        {guard > 0 && upper !== undefined && <Guard from={x(upper - guard)} to={x(upper)} />}
+        <Run from={0} to={1} className="h-px bg-rule-strong" />
+        <Run
+          from={lower === undefined ? 0 : at(lower)}
+          to={upper === undefined ? 1 : at(upper)}
+          className={clsx("bg-ink-soft", isLarge ? "h-[3px]" : "h-[2px]")}
+        />
+        {guard > 0 && lower !== undefined && <Guard from={at(lower)} to={at(lower + guard)} isLarge={isLarge} />}
+        {guard > 0 && upper !== undefined && <Guard from={at(upper - guard)} to={at(upper)} isLarge={isLarge} />}
         {stops.map((stop) => (
-          <path
+          <span
             key={stop}
-            d={`M${x(stop)} 3.5V16.5`}
-            className="stroke-ink"
-            strokeWidth="1.5"
-            vectorEffect="non-scaling-stroke"
+            className={clsx("absolute top-1/2 w-0.5 -translate-x-1/2 -translate-y-1/2 bg-ink", isLarge ? "h-5" : "h-3")}
+            style={{ left: percent(at(stop)) }}
           />
         ))}
-        {value !== undefined && verdict && <Mark x={x(value)} off={scale.isOff(value)} className={MARKS[verdict]} />}
-      </svg>
-      {format && stops.length > 0 && <Figures stops={stops} at={scale.at} format={format} isLarge={size === "bench"} />}
+        {value !== undefined && verdict && (
+          <Mark at={at(value)} off={isOff(value)} verdict={verdict} isLarge={isLarge} />
+        )}
+      </div>
+      {format && stops.length > 0 && <Figures stops={stops} at={at} format={format} isLarge={isLarge} />}
     </div>
   );
 }
 
-function Guard({ from, to }: { from: number; to: number }) {
-  return <rect x={from} y="7.5" width={Math.max(0, to - from)} height="5" className="fill-doubtful" />;
-}
-
-function Mark({ x, off, className }: { x: number; off: "below" | "above" | null; className: string }) {
-  if (off) {
-    const tip = off === "above" ? 4 : -4;
-    return <path d={`M${x - tip} 2 ${x + tip} 10 ${x - tip} 18z`} className={className} />;
-  }
+function Run({ from, to, className }: { from: number; to: number; className: string }) {
   return (
-    <rect x={x - 1.75} y="0.5" width="3.5" height="19" className={clsx(className, "stroke-sheet")} strokeWidth="1" />
+    <span
+      className={clsx("absolute top-1/2 -translate-y-1/2", className)}
+      style={{ left: percent(from), width: percent(to - from) }}
+    />
   );
 }
 
-type FiguresProps = {
+const Guard = ({ from, to, isLarge }: { from: number; to: number; isLarge: boolean }) => (
+  <Run from={from} to={to} className={clsx("bg-doubtful", isLarge ? "h-2.5" : "h-[5px]")} />
+);
+
+type MarkProps = { at: number; off: "below" | "above" | null; verdict: Standing; isLarge: boolean };
+
+function Mark({ at, off, verdict, isLarge }: MarkProps) {
+  const shape = off
+    ? clsx(
+        "aspect-[3/4]",
+        isLarge ? "h-5" : "h-3",
+        off === "above" ? "[clip-path:polygon(0_0,100%_50%,0_100%)]" : "[clip-path:polygon(100%_0,0_50%,100%_100%)]",
+      )
+    : clsx("ring-2 ring-sheet", isLarge ? "h-full w-[5px]" : "h-full w-[3px]");
+  return (
+    <span
+      className={clsx("absolute top-1/2 -translate-x-1/2 -translate-y-1/2", shape, MARKS[verdict])}
+      style={{ left: percent(at) }}
+    />
+  );
+}
+
+type FiguresProps = Required<Pick<LimitBarProps, "format">> & {
   stops: number[];
   at: (value: number) => number;
-  format: (value: number) => string;
   isLarge: boolean;
 };
 
@@ -84,11 +101,11 @@ function Figures({ stops, at, format, isLarge }: FiguresProps) {
   return (
     <div
       aria-hidden="true"
-      className={clsx("mono relative mx-[2%] text-ink-soft", isLarge ? "h-5 text-sm" : "h-4 text-2xs")}
+      className={clsx("mono relative mx-1 text-ink-soft", isLarge ? "h-5 text-sm" : "h-4 text-2xs")}
     >
       {stops.map((stop) => (
-        <span key={stop} className="absolute -translate-x-1/2 whitespace-nowrap" style={{ left: `${at(stop) * 100}%` }}>
-          {format(stop)}
+        <span key={stop} className="absolute -translate-x-1/2 whitespace-nowrap" style={{ left: percent(at(stop)) }}>
+          {format?.(stop)}
         </span>
       ))}
     </div>

@@ -1,3 +1,4 @@
+import clsx from "clsx";
 import type { ReactNode } from "react";
 import { STATE_TEXT, type GlyphState } from "./StateGlyph";
 
@@ -17,7 +18,7 @@ const DRAWINGS: Record<GlyphState, ReactNode> = {
   ),
   conceded: <path d="M1 12V6.5C1 1 6 1 6 6.5V12" strokeWidth="2" />,
   untested: <path d="M0.5 8.5h6v3h-6z" />,
-  waiting: <path d="M0 12 4 7M3.5 12 7 7.5" />,
+  waiting: <path strokeWidth="1.25" d="M0.5 11.5 3 6M4 11.5 6.5 6" />,
 };
 
 export function MiniGlyph({ state, isMarked = false }: { state: GlyphState; isMarked?: boolean }) {
@@ -29,7 +30,7 @@ export function MiniGlyph({ state, isMarked = false }: { state: GlyphState; isMa
       height="12"
       fill="none"
       stroke="currentColor"
-      className={`${STATE_TEXT[state]} overflow-visible`}
+      className={clsx("overflow-visible", STATE_TEXT[state], isMarked && "mx-1")}
     >
       <g>{DRAWINGS[state]}</g>
       {isMarked && <path d="M-2.5 -2.5h12v17h-12z" stroke="var(--copper)" strokeWidth="1.5" />}

@@ -6,6 +6,8 @@ export type StripGroup = { name: string; states: readonly GlyphState[] };
 
 export type StageStripProps = {
   groups: readonly StripGroup[];
+  /** Room for so many checks in each group, the same for every strip that stands in one column with others. */
+  room?: readonly number[];
   /** The one check that is next: index of the group and of the check in it. */
   marked?: { group: number; check: number };
   /** "fill" shares the width as a table does; "flow" wraps, for phones and narrow panels. */
@@ -38,12 +40,18 @@ export function stripWords(group: StripGroup): string {
   return [`${group.name}: ${held} of ${group.states.length} hold`, ...counts].join(", ");
 }
 
-export function StageStrip({ groups, marked, layout = "fill", className }: StageStripProps) {
+export function StageStrip({ groups, room, marked, layout = "fill", className }: StageStripProps) {
   return (
     <ul
-      className={clsx(layout === "fill" ? "grid" : "flex flex-wrap gap-y-2.5", "gap-x-3", className)}
+      className={clsx(layout === "fill" ? "flex flex-wrap sm:grid" : "flex flex-wrap", "gap-x-3 gap-y-2.5", className)}
       style={
-        layout === "fill" ? { gridTemplateColumns: groups.map((group) => columnWidth(group)).join(" ") } : undefined
+        layout === "fill"
+          ? {
+              gridTemplateColumns: groups
+                .map((group, index) => columnWidth(room?.[index] ?? group.states.length))
+                .join(" "),
+            }
+          : undefined
       }
     >
       {groups.map((group, index) => (
@@ -54,7 +62,7 @@ export function StageStrip({ groups, marked, layout = "fill", className }: Stage
 }
 
 /** Room in proportion to the checks, never narrower than the name. */
-const columnWidth = ({ states }: StripGroup) => `minmax(4.25rem, ${Math.max(states.length, 4)}fr)`;
+const columnWidth = (checks: number) => `minmax(4.25rem, ${Math.max(checks, 4)}fr)`;
 
 function StripColumn({ group, marked }: { group: StripGroup; marked: number | undefined }) {
   const held = group.states.filter(holds).length;
@@ -62,7 +70,7 @@ function StripColumn({ group, marked }: { group: StripGroup; marked: number | un
   const mood = trouble ?? (held === group.states.length && held > 0 ? "passed" : "untested");
   const emphasis = trouble ? clsx(STATE_TEXT[trouble], "font-semibold") : "text-ink-soft";
   return (
-    <li className={clsx("flex min-w-0 flex-col gap-1 border-l-2 pl-2 leading-none", RULES[mood])}>
+    <li className={clsx("flex min-w-0 flex-col gap-1.5 border-l-2 pl-2 leading-none", RULES[mood])}>
       <span className="sr-only">{stripWords(group)}</span>
       <span aria-hidden="true" className={clsx("text-2xs leading-none", emphasis)}>
         {group.name}

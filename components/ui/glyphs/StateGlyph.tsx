@@ -43,8 +43,8 @@ const DRAWINGS: Record<GlyphState, ReactNode> = {
   passed: (
     <>
       {PADS}
-      <path d="M1.5 13 5 7.5V13zM22.5 13 19 7.5V13z" fill="currentColor" stroke="none" />
-      <path d="M5 4h3v9H5zM9.5 4h5v9h-5zM16 4h3v9h-3z" fill="currentColor" stroke="none" />
+      <path d="M1.5 13 5 9V13zM22.5 13 19 9V13z" fill="currentColor" stroke="none" />
+      <path d="M5 4.5h2.75v8.5H5zM9 4.5h6v8.5H9zM16.25 4.5H19v8.5h-2.75z" fill="currentColor" stroke="none" />
     </>
   ),
   failed: (
