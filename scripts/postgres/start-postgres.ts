@@ -39,6 +39,7 @@ function settings(cluster: Cluster, port: number, fsync: boolean): string[] {
     unix_socket_directories: socketFolder,
     max_connections: 200,
     log_min_messages: "warning",
+    log_checkpoints: "off",
     log_line_prefix: "",
     ...(fsync ? {} : { fsync: "off", synchronous_commit: "off", full_page_writes: "off" }),
   };
