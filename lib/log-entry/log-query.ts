@@ -1,0 +1,27 @@
+import { z } from "zod";
+import { EVENT_GROUPS } from "@/lib/event/event-group";
+import type { LogQuery } from "./load-log";
+
+const searchSchema = z.object({
+  show: z.enum(EVENT_GROUPS).optional().catch(undefined),
+  unit: z.string().min(1).max(60).optional().catch(undefined),
+  by: z.uuid().optional().catch(undefined),
+  before: z.coerce.number().int().positive().max(Number.MAX_SAFE_INTEGER).optional().catch(undefined),
+});
+
+/** The filters of the log from the address; what makes no sense there is left out. */
+export function logQuery(search: Record<string, string | string[] | undefined>): LogQuery {
+  const { show, unit, by, before } = searchSchema.parse(search);
+  return { show, unit, by, before };
+}
+
+/** The address with some filters changed; the page begins anew unless `before` is given. */
+export function logAddress(project: string, query: Partial<LogQuery>): string {
+  const search = new URLSearchParams();
+  for (const name of ["show", "unit", "by", "before"] as const) {
+    const value = query[name];
+    if (value !== undefined) search.set(name, String(value));
+  }
+  const text = search.toString();
+  return `/projects/${encodeURIComponent(project)}/log${text === "" ? "" : `?${text}`}`;
+}
