@@ -1,7 +1,7 @@
 /** Own drawings of the places, each the thing one looks at there. On a 20 grid. */
 const MARKS = {
   rack: "M3.5 2v16M6 4.5h11v3H6zM6 12.5h8v3H6z",
-  bench: "M2 12.5h16M4.5 12.5v5M15.5 12.5v5M6 9.5h5v3M13.5 2.5 10 9.5",
+  bench: "M2 12.5h16M4.5 12.5v5M15.5 12.5v5M4 9.5h6.5v3M4 9.5v3M17 2.5l-3.75 6.75",
   wiring:
     "M3 4.5h3.5M3 10h3.5M3 15.5h3.5M13.5 4.5H17M13.5 10H17M13.5 15.5H17M6.5 4.5 13.5 10M6.5 10l7 5.5M6.5 15.5l7-11",
   parts: "M5 4h10v12H5zM2 6.5h3M2 10h3M2 13.5h3M15 6.5h3M15 10h3M15 13.5h3M8.5 4v1.5h3V4",

@@ -1,0 +1,69 @@
+import { ButtonLink } from "@/components/ui/ButtonLink";
+import { EmptyState } from "@/components/ui/EmptyState";
+import type { RackView } from "@/lib/rack/rack-view";
+import { EmptyRackDrawing } from "./EmptyRackDrawing";
+import { boardAddress, boardsAddress } from "./rack-addresses";
+
+/** What is still missing before the drawing says anything: boards, then slots, then procedures. */
+export function RackBeginnings({ rack, project, canEdit }: { rack: RackView; project: string; canEdit: boolean }) {
+  if (rack.boards.length === 0) {
+    return (
+      <EmptyState
+        title="No boards yet"
+        drawing={<EmptyRackDrawing />}
+        action={
+          canEdit && (
+            <ButtonLink kind="primary" href={boardsAddress(project)}>
+              Add the first board
+            </ButtonLink>
+          )
+        }
+      >
+        <p>
+          The machine is drawn here: the backplane, its slots, and a card in each. Begin with the boards it is made of,
+          the backplane among them.{canEdit ? "" : " A maintainer of the project adds them."}
+        </p>
+      </EmptyState>
+    );
+  }
+  const without = rack.boards.filter((board) => board.procedureNumber === null);
+  return (
+    <>
+      {rack.slots.length === 0 && (
+        <EmptyState
+          title="No slots yet"
+          drawing={<EmptyRackDrawing />}
+          action={
+            canEdit && (
+              <ButtonLink kind="primary" href={`${boardsAddress(project)}#slots`}>
+                Add slots
+              </ButtonLink>
+            )
+          }
+        >
+          <p>
+            A slot is a place on the backplane that takes one card. Say how many there are, how wide, and which board
+            each is wired for; then put units in.
+          </p>
+        </EmptyState>
+      )}
+      {without.length > 0 && (
+        <EmptyState title={without.length === rack.boards.length ? "No procedure yet" : "Boards without a procedure"}>
+          <p>
+            A procedure is the list of checks that every unit of a board goes through. Take a starter for its kind of
+            board and change it, then issue it: each unit gets it as its traveler.
+          </p>
+          <ul className="mt-2 flex flex-wrap gap-x-4 gap-y-1">
+            {without.map((board) => (
+              <li key={board.id}>
+                <a href={`${boardAddress(project, board.code)}/procedure`} className="link">
+                  {board.name}
+                </a>
+              </li>
+            ))}
+          </ul>
+        </EmptyState>
+      )}
+    </>
+  );
+}

@@ -1,0 +1,36 @@
+"use client";
+
+import { usePathname } from "next/navigation";
+import { PlaceNav, type Place } from "@/components/shell/PlaceNav";
+import type { PlaceMarkName } from "@/components/shell/PlaceMark";
+
+type Props = { project: string; failing: number; doubtful: number; canEdit: boolean };
+
+/** A unit's pages belong to the bench: that is where one is with it. */
+const PLACES: readonly { path: string; label: string; mark: PlaceMarkName; also?: string }[] = [
+  { path: "rack", label: "Rack", mark: "rack" },
+  { path: "bench", label: "Bench", mark: "bench", also: "units" },
+  { path: "captures", label: "Captures", mark: "captures" },
+  { path: "log", label: "Log", mark: "log" },
+  { path: "boards", label: "Boards", mark: "boards" },
+  { path: "people", label: "People", mark: "people" },
+  { path: "settings", label: "Settings", mark: "settings" },
+];
+
+export function ProjectPlaces({ project, failing, doubtful, canEdit }: Props) {
+  const pathname = usePathname();
+  const base = `/projects/${project}/`;
+  const current = pathname.startsWith(base) ? pathname.slice(base.length).split("/")[0] : "";
+  const places = PLACES.filter(({ path }) => canEdit || path !== "settings").map(
+    ({ path, label, mark, also }): Place => ({
+      href: base + path,
+      label,
+      mark,
+      isCurrent: current === path || (also !== undefined && current === also),
+      ...(path === "bench"
+        ? { count: failing + doubtful, countLabel: `(${failing} failing, ${doubtful} in doubt)` }
+        : {}),
+    }),
+  );
+  return <PlaceNav places={places} />;
+}
