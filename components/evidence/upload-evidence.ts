@@ -60,8 +60,7 @@ export async function uploadEvidence(upload: EvidenceUpload): Promise<UploadResu
       ? { ok: true, evidence: answer.attachment }
       : { ok: false, message: answer.message, retry: answer.retry };
   } catch (error) {
-    if (upload.signal?.aborted)
-      return { ok: false, message: "Cancelled. Nothing was kept on the server.", retry: true };
+    if (upload.signal?.aborted) return { ok: false, message: "Cancelled.", retry: true };
     return explain(error);
   } finally {
     clearTimeout(timer);
