@@ -4,7 +4,7 @@ const config = {
   distDir: process.env.NEXT_DIST_DIR ?? ".next",
   poweredByHeader: false,
   // Native code and worker threads that a bundler would break.
-  serverExternalPackages: ["sharp", "@node-rs/argon2", "graphile-worker", "pino"],
+  serverExternalPackages: ["sharp", "@node-rs/argon2", "graphile-worker", "pino", "rate-limiter-flexible"],
 };
 
 export default config;

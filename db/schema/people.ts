@@ -44,11 +44,14 @@ export const accounts = pgTable(
 export const sessions = pgTable(
   "sessions",
   {
+    /** SHA-256 of the token in the cookie: who reads the table cannot use a session. */
     sessionToken: text("session_token").primaryKey(),
     userId: uuid("user_id")
       .notNull()
       .references(() => users.id, { onDelete: "cascade" }),
     expires: instant("expires").notNull(),
+    /** The browser's own name, so that people recognise their sessions. */
+    userAgent: text("user_agent").notNull().default(""),
     createdAt: createdAt(),
   },
   (table) => [index("sessions_user").on(table.userId)],
@@ -83,7 +86,7 @@ export const accountTokens = pgTable(
   (table) => [index("account_tokens_user").on(table.userId, table.purpose)],
 );
 
-/** Counters of rate-limiter-flexible. */
+/** Counters of rate-limiter-flexible (its Drizzle store): one row a limit and key, keys hashed. */
 export const rateLimits = pgTable("rate_limits", {
   key: text("key").primaryKey(),
   points: integer("points").notNull(),

@@ -1,11 +1,5 @@
 import NextAuth from "next-auth";
-import type { Viewer } from "@/lib/access/scope";
 import { authConfig } from "./config";
 
-declare module "next-auth" {
-  interface Session {
-    viewer: Viewer;
-  }
-}
-
-export const { handlers, auth, signIn, signOut } = NextAuth(() => authConfig());
+/** Who is signed in is asked of currentViewer(), never of the library: see there. */
+export const { handlers, signIn, signOut } = NextAuth(() => authConfig());

@@ -1,18 +1,28 @@
-import { DrizzleAdapter } from "@auth/drizzle-adapter";
-import type { NextAuthConfig } from "next-auth";
+import { CredentialsSignin, type NextAuthConfig } from "next-auth";
 import { encode } from "next-auth/jwt";
 import Credentials from "next-auth/providers/credentials";
-import { z } from "zod";
 import { database } from "@/db/client";
-import { findUser, findUserByEmail } from "@/db/queries/users";
-import { accounts, sessions, users, verificationTokens } from "@/db/schema/people";
-import { passwordFits } from "@/lib/account/password";
+import { findUserByEmail } from "@/db/queries/users";
+import { checkPassword } from "@/lib/account/check-password";
+import { signInInput } from "@/lib/account/schema";
+import { sendSignInLink } from "@/lib/account/send-sign-in-link";
+import type { Refusal } from "@/lib/actions/answer";
 import { env } from "@/lib/env";
-import { openSession, SESSION_SECONDS } from "./session";
-import { linkProvider } from "./sign-in-link";
-import { viewerOf } from "./viewer";
+import { callFrom } from "@/lib/http/call";
+import { log } from "@/lib/http/log";
+import { sessionAdapter } from "./adapter";
+import { openSession } from "./session";
+import { SESSION_SECONDS } from "./session-cookie";
 
-const credentials = z.object({ email: z.string(), password: z.string() });
+/** Minutes that a sign-in link works. */
+const LINK_MINUTES = 20;
+
+/** A sign-in that was refused for a reason that people are told. */
+export class SignInRefused extends CredentialsSignin {
+  constructor(readonly refusal: Refusal) {
+    super(refusal.message);
+  }
+}
 
 /**
  * Sessions are rows of the database: deleting the row signs out at once. The library makes such a row by itself for
@@ -20,31 +30,37 @@ const credentials = z.object({ email: z.string(), password: z.string() });
  * signed token. Made on first use, so that a build without environment succeeds.
  */
 export function authConfig(): NextAuthConfig {
-  const adapter = DrizzleAdapter(database(), {
-    usersTable: users,
-    accountsTable: accounts,
-    sessionsTable: sessions,
-    verificationTokensTable: verificationTokens,
-  });
   return {
-    adapter,
+    adapter: sessionAdapter(),
     secret: env().AUTH_SECRET,
     trustHost: true,
     useSecureCookies: env().APP_URL.startsWith("https:"),
     session: { strategy: "database", maxAge: SESSION_SECONDS },
     pages: { signIn: "/sign-in", error: "/sign-in", verifyRequest: "/check-email" },
+    logger: { error: logUnlessExpected, warn: () => undefined, debug: () => undefined },
     providers: [
       Credentials({ id: "password", credentials: { email: {}, password: {} }, authorize: personWithPassword }),
-      linkProvider(async () => undefined),
+      {
+        id: "link",
+        type: "email",
+        name: "Link by e-mail",
+        maxAge: LINK_MINUTES * 60,
+        options: {},
+        sendVerificationRequest: ({ identifier, url, token }) => sendSignInLink({ email: identifier, token, url }),
+      },
     ],
     callbacks: {
-      signIn: async ({ account, user }) =>
-        account?.type !== "email" || Boolean(user.email && (await findUserByEmail(database(), user.email))),
+      signIn: async ({ account, user, email }) => {
+        if (account?.type !== "email") return true;
+        const known = user.email ? await findUserByEmail(database(), user.email) : undefined;
+        // Whoever is not known yet, or has not confirmed the address with the password, is told to look for mail too.
+        return known?.emailVerified ? true : email?.verificationRequest ? "/check-email" : false;
+      },
       jwt: ({ token, account, user }) =>
         account?.type === "credentials" ? { sub: user.id, opensSession: true } : token,
-      session: async ({ session, user }) => {
-        const row = await findUser(database(), user.id);
-        return { ...session, user: undefined, viewer: row ? viewerOf(row) : undefined };
+      redirect: ({ url }) => {
+        const target = new URL(url, env().APP_URL);
+        return target.origin === new URL(env().APP_URL).origin ? target.toString() : env().APP_URL;
       },
     },
     jwt: {
@@ -54,10 +70,14 @@ export function authConfig(): NextAuthConfig {
   };
 }
 
-async function personWithPassword(raw: unknown) {
-  const given = credentials.safeParse(raw);
+async function personWithPassword(raw: unknown, request: Request) {
+  const given = signInInput.safeParse(raw);
   if (!given.success) return null;
-  const row = await findUserByEmail(database(), given.data.email.trim().toLowerCase());
-  const fits = await passwordFits(row?.passwordHash, given.data.password);
-  return row && fits ? { id: row.id, email: row.email, name: row.name } : null;
+  const answer = await checkPassword(given.data, callFrom(request.headers));
+  if (!answer.ok) throw new SignInRefused(answer.error);
+  return { id: answer.value.userId };
+}
+
+function logUnlessExpected(error: Error): void {
+  if (!(error instanceof SignInRefused)) log().warn({ err: error }, "the session library reports an error");
 }

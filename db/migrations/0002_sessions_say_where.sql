@@ -1,0 +1,1 @@
+ALTER TABLE "sessions" ADD COLUMN "user_agent" text DEFAULT '' NOT NULL;
