@@ -1,41 +1,42 @@
-import { judge, pickRange } from "@/lib/calc/conformity";
-import { parseQuantity } from "@/lib/calc/units";
+import { judge, pickRange, type AccuracyRange } from "@/lib/calc/conformity";
+import { isUnit, parseQuantity, type Unit } from "@/lib/calc/units";
+import type { InstrumentRange } from "@/db/schema/people";
 import type { Verdict } from "@/db/schema/travelers";
 import type { JudgeContext, JudgedReading } from "./kind";
-import { limitsOf } from "./limits-of";
 import type { TypedLimits } from "./typed-limits";
 
-const LONGEST = 60;
-
-type Asked = { label: string; typed: string; unit: string; limits: TypedLimits };
+type Asked = { label: string; typed: string; unit: Unit; limits: TypedLimits };
 export type OneReading = { ok: true; reading: JudgedReading; sentences: string[] } | { ok: false; message: string };
 
 /** Reads one figure and judges it by its limits, the instrument's accuracy and the project's decision rule. */
 export function judgeReading({ label, typed, unit, limits }: Asked, context: JudgeContext): OneReading {
   const text = typed.trim();
   if (text === "") return { ok: false, message: "Enter the reading." };
-  if (text.length > LONGEST) return { ok: false, message: `A reading has at most ${LONGEST} characters.` };
   const parsed = parseQuantity(text, unit);
-  if (!parsed.ok) return parsed;
-  const value = parsed.value.value;
-  const ranges = context.instrumentRanges.filter((range) => range.unit === unit);
+  if (!parsed.ok) return { ok: false, message: parsed.message };
+  const accuracy = pickRange(accuracyRanges(context.instrumentRanges), parsed.value);
   const judged = judge({
-    reading: value,
-    limits: limitsOf(limits, unit),
-    accuracy: pickRange(ranges, value),
+    reading: parsed.value,
+    limits: limits.value,
     rule: context.rule,
+    ...(accuracy ? { accuracy } : {}),
   });
   const reading = {
     label,
     typed: text,
-    value,
+    value: parsed.value.value,
     unit,
-    lower: limits.lower,
-    upper: limits.upper,
+    lower: limits.value.lower ?? null,
+    upper: limits.value.upper ?? null,
     expandedUncertainty: judged.expandedUncertainty ?? null,
     verdict: judged.verdict,
   };
   return { ok: true, reading, sentences: judged.sentences };
+}
+
+/** Ranges of units that the calculations do not know judge nothing. */
+function accuracyRanges(ranges: readonly InstrumentRange[]): AccuracyRange[] {
+  return ranges.flatMap(({ unit, ...range }) => (isUnit(unit) ? [{ ...range, unit }] : []));
 }
 
 const ORDER: readonly Verdict[] = ["conforms", "guard-band", "does-not-conform"];

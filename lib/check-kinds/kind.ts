@@ -16,7 +16,7 @@ export type JudgeContext = {
   note: string;
 };
 
-/** One reading, judged. Values in base units. */
+/** One reading, judged. Values in base units; an overload is ±Infinity, which JSON turns into null. */
 export type JudgedReading = {
   label: string;
   typed: string;

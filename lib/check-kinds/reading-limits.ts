@@ -16,13 +16,14 @@ export function figure(value: number, unit: string): string {
 
 /** What the drawing of the limits takes. Guard bands are drawn only where the project's rule uses them. */
 export function drawnLimits(
-  { lower, upper, expandedUncertainty }: Pick<JudgedReading, "lower" | "upper" | "expandedUncertainty">,
+  limits: Pick<JudgedReading, "lower" | "upper">,
   unit: string,
+  expandedUncertainty: number | null,
   rule: DecisionRule,
 ): Drawn {
   return {
-    lower: lower ?? undefined,
-    upper: upper ?? undefined,
+    lower: limits.lower ?? undefined,
+    upper: limits.upper ?? undefined,
     guard: rule === "guarded" ? (expandedUncertainty ?? undefined) : undefined,
     format: (value) => figure(value, unit),
   };

@@ -1,10 +1,10 @@
 import { z } from "zod";
-import { isUnit, parseQuantity } from "@/lib/calc/units";
-import { readLimits, typedLimitsShape } from "../typed-limits";
+import { isUnit, parseQuantity, type Unit } from "@/lib/calc/units";
+import { readLimits, typedLimitsShape, unitShape } from "../typed-limits";
 
 export const specShape = z.object({
   /** Base unit of the reading: V, A, Ω … */
-  unit: z.string(),
+  unit: unitShape,
   limits: typedLimitsShape,
   /** What a healthy board shows, for the builder's eye; the limits decide. */
   expected: z.object({ typed: z.string(), value: z.number() }).nullable(),
@@ -31,7 +31,7 @@ export const specFromTyped = typedShape.transform((typed, context): Spec => {
   };
 });
 
-function readExpected(typed: string, unit: string, context: z.RefinementCtx): Spec["expected"] {
+function readExpected(typed: string, unit: Unit, context: z.RefinementCtx): Spec["expected"] {
   const text = typed.trim();
   if (text === "") return null;
   const parsed = parseQuantity(text, unit);

@@ -1,8 +1,8 @@
-import type { JudgedReading } from "../kind";
-import { figure } from "../reading-limits";
+import { formatQuantity, parseQuantity } from "@/lib/calc/units";
 import type { Entry, Spec } from "./schema";
 
-export function summary(spec: Spec, entry: Entry, readings: readonly JudgedReading[]): string {
-  const [reading] = readings;
-  return reading ? figure(reading.value, reading.unit) : `${entry.typed} ${spec.unit}`;
+/** With the digits that were read: 5.00 V, not 5 V. */
+export function summary(spec: Spec, entry: Entry): string {
+  const parsed = parseQuantity(entry.typed, spec.unit);
+  return parsed.ok ? formatQuantity(parsed.value, { resolution: parsed.digits.resolution }) : entry.typed;
 }

@@ -25,9 +25,7 @@ export function RecordView({ spec, record, readings }: RecordViewProps<Spec, Ent
             <tr key={row.label}>
               <th scope="row" className="border-rule-strong border px-2 py-1 text-left font-semibold">
                 {row.label}
-                <span className="text-ink-soft mono block text-xs font-normal">
-                  {formatLimits(limitsOf(row.limits, row.unit))}
-                </span>
+                <span className="text-ink-soft mono block text-xs font-normal">{formatLimits(limitsOf(row.limits, row.unit))}</span>
               </th>
               {spec.columns.map((column, c) => {
                 const reading = readings.find((one) => one.label === `${row.label}, ${column}`);
@@ -39,9 +37,7 @@ export function RecordView({ spec, record, readings }: RecordViewProps<Spec, Ent
                     ) : (
                       <span className="mono">{record?.cells[r]?.[c] ?? ""}</span>
                     )}
-                    {own && (
-                      <span className="text-ink-soft mono block text-xs">{formatLimits(limitsOf(own, row.unit))}</span>
-                    )}
+                    {own && <span className="text-ink-soft mono block text-xs">{formatLimits(limitsOf(own, row.unit))}</span>}
                   </td>
                 );
               })}

@@ -6,6 +6,9 @@ const cellName = (row: string, column: string) => `${row}, ${column}`;
 
 /** Every cell is a reading with its own verdict; the table's verdict is that of its worst cell. */
 export function judge(spec: Spec, entry: Entry, context: JudgeContext): Judged {
+  if (entry.cells.length > spec.rows.length || entry.cells.some((row) => row.length > spec.columns.length)) {
+    return { ok: false, message: "There are more cells than the table has. Reload the page." };
+  }
   const readings: JudgedReading[] = [];
   const sentences: string[] = [];
   const fields: Record<string, string> = {};

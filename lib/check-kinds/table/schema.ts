@@ -1,14 +1,14 @@
 import { z } from "zod";
 import { isUnit } from "@/lib/calc/units";
 import { line } from "@/lib/form/text";
-import { readLimits, typedLimitsShape } from "../typed-limits";
+import { readLimits, typedLimitsShape, unitShape } from "../typed-limits";
 
 export const MOST_ROWS = 24;
 export const MOST_COLUMNS = 12;
 
 const rowShape = z.object({
   label: z.string(),
-  unit: z.string(),
+  unit: unitShape,
   limits: typedLimitsShape,
   /** Limits of single cells, in column order; null: those of the row. */
   cells: z.array(typedLimitsShape.nullable()),
@@ -61,7 +61,7 @@ function readRow(
   const unit = row.unit.trim();
   if (!isUnit(unit)) {
     context.addIssue({ code: "custom", path: [...path, "unit"], message: "Choose the unit of the row." });
-    return { label, unit, limits: { typed: row.limits, lower: null, upper: null }, cells: [] };
+    return { label, unit: "", limits: { typed: row.limits, value: { unit: "" } }, cells: [] };
   }
   const limits = readLimits(row.limits, unit, context, [...path, "limits"]);
   const cells = Array.from({ length: columns }, (_, c) => {
