@@ -1,0 +1,95 @@
+import { ESD, FIRST_POWER, LENS, type CheckLine } from "./check-line";
+
+/** What every soldered card is looked at for. */
+export function inspection(parts: string, polarised: string): CheckLine[] {
+  return [
+    {
+      id: "joints",
+      stage: "inspection",
+      title: `All joints of ${parts} under the lens`,
+      instruction: "Go row by row at ×10. Every joint wets pad and lead, no bridge, no ball, no lifted pad.",
+      caution: ESD,
+      reference: LENS,
+      expect: { kind: "statement" },
+    },
+    {
+      id: "polarity",
+      stage: "inspection",
+      title: "Every polarised part the right way round",
+      instruction: `Compare ${polarised} with the assembly drawing, one after the other.`,
+      reference: LENS,
+      expect: { kind: "photo", subject: "component side, whole board" },
+    },
+    {
+      id: "values",
+      stage: "inspection",
+      title: "Part numbers and values as in the parts list",
+      instruction: "Read every marking aloud and tick it in the parts list. Note each substitute.",
+      expect: { kind: "statement" },
+    },
+    {
+      id: "solder-side",
+      stage: "inspection",
+      title: "Solder side clean, no lead longer than 1.5 mm",
+      instruction: "Wash off flux, cut long leads, look again against the light.",
+      reference: LENS,
+      expect: { kind: "photo", subject: "solder side, whole board" },
+    },
+  ];
+}
+
+/** Unpowered: ground everywhere, no rail shorted, before anything gets power. */
+export function unpowered(rails: { name: string; pins: string[]; forward: string; reverse: string }[]): CheckLine[] {
+  return [
+    {
+      id: "ground",
+      stage: "continuity",
+      title: "Ground, all ground pins of J1 to TP1",
+      instruction: "Black probe on TP1. Touch a1, a32, b1 and b32 of J1 in turn and take the highest reading.",
+      caution: "Board out of the rack and unpowered. Discharge C1 first.",
+      pins: ["J1 a1", "J1 a32", "J1 b1", "J1 b32"],
+      signals: ["GND"],
+      rails: ["GND"],
+      hold: true,
+      expect: { kind: "reading", quantity: "Resistance", limits: "< 0.5 Ω", expected: "0.1 Ω" },
+    },
+    ...rails.flatMap((rail): CheckLine[] => [
+      {
+        id: `${rail.name}-forward`,
+        stage: "continuity",
+        title: `${rail.name} to ground, red on the rail, hold point`,
+        instruction: `Black probe on TP1, red probe on ${rail.pins[0] ?? "the rail"}. Wait until the reading stands.`,
+        caution: "Board unpowered and out of the rack.",
+        pins: rail.pins,
+        signals: [rail.name],
+        rails: [rail.name],
+        hold: true,
+        expect: { kind: "reading", quantity: "Resistance", limits: rail.forward },
+      },
+      {
+        id: `${rail.name}-reverse`,
+        stage: "continuity",
+        title: `${rail.name} to ground, probes swapped`,
+        instruction: `Red probe on TP1, black probe on ${rail.pins[0] ?? "the rail"}. A large difference between the directions is a reversed part.`,
+        pins: rail.pins,
+        signals: [rail.name],
+        rails: [rail.name],
+        expect: { kind: "reading", quantity: "Resistance", limits: rail.reverse },
+      },
+    ]),
+  ];
+}
+
+/** First power on the bench supply, alone, behind a current limit. */
+export function firstPower(limitText: string, window: string, expected: string): CheckLine {
+  return {
+    id: "first-power",
+    stage: "power-on",
+    title: `Current at first power, limit ${limitText}`,
+    instruction: `Bench supply at 5.0 V, current limit ${limitText}, card on the extender, nothing else in the rack. Read the supply's ammeter after ten seconds.`,
+    caution: FIRST_POWER,
+    rails: ["+5 V"],
+    hold: true,
+    expect: { kind: "reading", quantity: "Current", limits: window, expected },
+  };
+}

@@ -1,0 +1,42 @@
+import { Resend } from "resend";
+import { env } from "@/lib/env";
+import type { Message, SendOptions, Sent } from "./message";
+
+/** A key that was used with another payload was sent then: what changed since (a newer open failure) is not worth a second mail. */
+const SENT_BEFORE = "invalid_idempotent_request";
+const RETRY_NAMES = new Set([
+  "concurrent_idempotent_requests",
+  "rate_limit_exceeded",
+  "daily_quota_exceeded",
+  "application_error",
+  "internal_server_error",
+]);
+
+let client: Resend | undefined;
+
+export async function sendByResend(message: Message, options: SendOptions): Promise<Sent> {
+  client ??= new Resend(env().RESEND_API_KEY, env().RESEND_BASE_URL ? { baseUrl: env().RESEND_BASE_URL } : undefined);
+  const request = client.emails.send(
+    {
+      from: env().MAIL_FROM,
+      to: message.to,
+      subject: message.subject,
+      html: message.html,
+      text: message.text,
+      headers: message.headers,
+      attachments: message.inline?.map((picture) => ({
+        content: picture.content,
+        filename: picture.fileName,
+        contentType: picture.mediaType,
+        contentId: picture.contentId,
+      })),
+    },
+    { idempotencyKey: options.idempotencyKey, signal: AbortSignal.timeout(options.timeoutMs) },
+  );
+  const { data, error } = await request;
+  if (data) return { ok: true, id: data.id };
+  if (error.name === SENT_BEFORE) return { ok: true, id: options.idempotencyKey };
+  const status = error.statusCode ?? 500;
+  const retry = RETRY_NAMES.has(error.name) || status >= 500 || status === 429 || status === 408;
+  return { ok: false, retry, bounced: status === 422, message: error.message };
+}
