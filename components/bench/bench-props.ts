@@ -8,13 +8,13 @@ export type BenchInstrument = { id: string; name: string; ranges: InstrumentRang
 export type VoidAttempt = (input: {
   project: string;
   writeId: string;
-  attempt: string;
+  attemptId: string;
   reason: string;
 }) => Promise<{ ok: true } | { ok: false; error: { message: string } }>;
 
 export type BenchProps = {
   project: { slug: string; name: string; rule: DecisionRule };
-  viewer: { id: string; name: string };
+  viewer: { id: string; name: string; timeZone: string };
   /** Asked of can() by the page. */
   may: { record: boolean; attach: boolean };
   traveler: TravelerView;

@@ -43,7 +43,7 @@ export function useSlip({ project, voidAttempt }: BenchProps, bench: Bench) {
       const answer = await voidAttempt({
         project: project.slug,
         writeId: crypto.randomUUID(),
-        attempt: body.id,
+        attemptId: body.id,
         reason: "slip of the finger",
       });
       return answer.ok ? undefined : answer.error.message;

@@ -16,7 +16,7 @@ export function figure(value: number, unit: string): string {
 
 /** What the drawing of the limits takes. Guard bands are drawn only where the project's rule uses them. */
 export function drawnLimits(
-  limits: Pick<JudgedReading, "lower" | "upper">,
+  limits: { lower?: number | null | undefined; upper?: number | null | undefined },
   unit: string,
   expandedUncertainty: number | null,
   rule: DecisionRule,

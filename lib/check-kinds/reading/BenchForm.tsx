@@ -14,7 +14,7 @@ import type { Entry, Spec } from "./schema";
 export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy, rule }: BenchFormProps<Spec, Entry>) {
   const field = useRef<HTMLInputElement>(null);
   const reading = judged?.ok ? judged.readings[0] : undefined;
-  const drawn = drawnLimits(spec.limits, spec.unit, reading?.expandedUncertainty ?? null, rule);
+  const drawn = drawnLimits(spec.limits.value, spec.unit, reading?.expandedUncertainty ?? null, rule);
   const shown = reading && Number.isFinite(reading.value) ? reading.value : undefined;
 
   useEffect(() => startsReading(() => field.current?.focus()), []);

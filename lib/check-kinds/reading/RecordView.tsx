@@ -7,7 +7,7 @@ import type { Entry, Spec } from "./schema";
 /** The figure in its verdict's hue beside its limits; without a record, the limits alone. */
 export function RecordView({ spec, record, readings, rule }: RecordViewProps<Spec, Entry>) {
   const [reading] = readings;
-  const drawn = drawnLimits(reading ?? spec.limits, spec.unit, reading?.expandedUncertainty ?? null, rule);
+  const drawn = drawnLimits(reading ?? spec.limits.value, spec.unit, reading?.expandedUncertainty ?? null, rule);
   const value = reading && Number.isFinite(reading.value) ? reading.value : undefined;
   return (
     <div className="flex flex-wrap items-center gap-x-4 gap-y-1">

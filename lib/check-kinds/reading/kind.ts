@@ -1,6 +1,5 @@
 import { formatLimits } from "@/lib/calc/units";
 import { defineKind } from "../define-kind";
-import { limitsOf } from "../limits-of";
 import { BenchForm } from "./BenchForm";
 import { judge } from "./judge";
 import { RecordView } from "./RecordView";
@@ -20,7 +19,7 @@ export const reading = defineKind({
   entryShape,
   emptyEntry: () => ({ typed: "" }),
   judge,
-  expectation: (spec) => formatLimits(limitsOf(spec.limits, spec.unit)),
+  expectation: (spec) => formatLimits(spec.limits.value),
   summary,
   measured: true,
   requires: () => undefined,

@@ -30,7 +30,7 @@ export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy, rule }
     if (next) setChosen(next);
     else onSubmit(draft);
   };
-  const drawn = drawnLimits(cell.limits, cell.unit, null, rule);
+  const drawn = drawnLimits(cell.limits.value, cell.unit, null, rule);
   return (
     <div className="grid gap-2">
       <CellGrid spec={spec} cells={cells} at={at} onChoose={setChosen} />

@@ -1,7 +1,6 @@
 import { VerdictFigure } from "@/components/traveler/VerdictFigure";
 import { formatLimits } from "@/lib/calc/units";
 import type { RecordViewProps } from "../kind";
-import { limitsOf } from "../limits-of";
 import { figure } from "../reading-limits";
 import type { Entry, Spec } from "./schema";
 
@@ -25,7 +24,7 @@ export function RecordView({ spec, record, readings }: RecordViewProps<Spec, Ent
             <tr key={row.label}>
               <th scope="row" className="border-rule-strong border px-2 py-1 text-left font-semibold">
                 {row.label}
-                <span className="text-ink-soft mono block text-xs font-normal">{formatLimits(limitsOf(row.limits, row.unit))}</span>
+                <span className="text-ink-soft mono block text-xs font-normal">{formatLimits(row.limits.value)}</span>
               </th>
               {spec.columns.map((column, c) => {
                 const reading = readings.find((one) => one.label === `${row.label}, ${column}`);
@@ -37,7 +36,7 @@ export function RecordView({ spec, record, readings }: RecordViewProps<Spec, Ent
                     ) : (
                       <span className="mono">{record?.cells[r]?.[c] ?? ""}</span>
                     )}
-                    {own && <span className="text-ink-soft mono block text-xs">{formatLimits(limitsOf(own, row.unit))}</span>}
+                    {own && <span className="text-ink-soft mono block text-xs">{formatLimits(own.value)}</span>}
                   </td>
                 );
               })}

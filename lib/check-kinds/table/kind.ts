@@ -1,6 +1,5 @@
 import { formatLimits } from "@/lib/calc/units";
 import { defineKind } from "../define-kind";
-import { limitsOf } from "../limits-of";
 import { BenchForm } from "./BenchForm";
 import { judge } from "./judge";
 import { RecordView } from "./RecordView";
@@ -40,6 +39,6 @@ export const table = defineKind({
 /** One row shows its limits; more show how many readings there are. */
 function expectation({ columns, rows }: Spec): string {
   const [only, ...rest] = rows;
-  if (only && rest.length === 0) return `${only.label} ${formatLimits(limitsOf(only.limits, only.unit))}`;
+  if (only && rest.length === 0) return `${only.label} ${formatLimits(only.limits.value)}`;
   return `${rows.length} × ${columns.length} readings`;
 }

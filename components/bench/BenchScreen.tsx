@@ -1,0 +1,195 @@
+"use client";
+
+import { useMemo, useRef, useState } from "react";
+import type { BenchProps } from "./bench-props";
+import { BenchSheets, type OpenSheet } from "./BenchSheets";
+import { BenchTop } from "./BenchTop";
+import { CheckBody } from "./CheckBody";
+import { CheckTools } from "./CheckTools";
+import { EntryPanel } from "./EntryPanel";
+import { EvidenceStrip } from "./EvidenceStrip";
+import { FileInputs } from "./FileInputs";
+import { InstrumentPicker } from "./InstrumentPicker";
+import { LastAttempts } from "./LastAttempts";
+import { PadOpen } from "./PadSlot";
+import { clearFiles } from "./queue/file-shelf";
+import { RefusedNotice } from "./RefusedNotice";
+import { acceptFor, kindsWanted, takeFiles } from "./take-files";
+import { UndoBar } from "./UndoBar";
+import { useBench } from "./use-bench";
+import { useBenchKeys } from "./use-bench-keys";
+import { useReadAloud } from "./use-read-aloud";
+import { useRecord } from "./use-record";
+
+/** One check a screen: what to do above, what one touches below. Works without network once it has been opened. */
+export function BenchScreen(props: BenchProps) {
+  const { project, viewer, may } = props;
+  const bench = useBench(props);
+  const recording = useRecord(props, bench);
+  const [sheet, setSheet] = useState<OpenSheet>();
+  const [pad, setPad] = useState<"auto" | "open" | "shut">("auto");
+  const camera = useRef<HTMLInputElement>(null);
+  const chooser = useRef<HTMLInputElement>(null);
+  const { current, kind, traveler } = bench;
+  const read = useReadAloud(
+    current
+      ? [current.title, current.caution, current.instruction, current.expectation].filter(Boolean).join(". ")
+      : "",
+  );
+  const kinds = useMemo(
+    () => kindsWanted(current && kind ? kind.requires(current.spec)?.kinds : undefined),
+    [current, kind],
+  );
+
+  const record = async (entry?: unknown) => {
+    if (!may.record || !current || current.blockers.length > 0) return;
+    const missing = await recording.record(entry);
+    setSheet(missing === "note" ? "verdict-note" : undefined);
+    if (!missing) document.getElementById("check-title")?.focus({ preventScroll: true });
+  };
+
+  useBenchKeys((key) => {
+    const stated = kind?.stated;
+    if (key === "conforms" && stated) void record(stated(true));
+    else if (key === "does-not-conform" && stated) void record(stated(false));
+    else if (key === "record" && kind?.measured) void record();
+    else if (key === "note" && may.record) setSheet("note");
+    else if (key === "photo" && may.attach) (kinds[0] === "photo" ? camera : chooser).current?.click();
+    else if (key === "previous") bench.step(-1);
+    else if (key === "next") bench.step(1);
+    else if (key === "keys") setSheet((before) => (before === "keys" ? undefined : "keys"));
+  });
+
+  const unitHref = `/projects/${project.slug}/units/${encodeURIComponent(traveler.unit.serial)}`;
+  const takes = (files: File[]) => {
+    if (current)
+      void takeFiles({ project: project.slug, userId: viewer.id, checkId: current.id, kinds, files }).catch(() =>
+        setSheet("no-room"),
+      );
+  };
+
+  return (
+    <div className="bg-sheet flex h-dvh flex-col">
+      <BenchTop
+        unitHref={current ? `${unitHref}?check=${current.id}` : unitHref}
+        serial={traveler.unit.serial}
+        checks={bench.checks}
+        index={bench.index}
+        queue={bench.queueState}
+        onOverview={() => setSheet("overview")}
+        onHeld={() => setSheet("held")}
+      />
+      {!current || !kind ? (
+        <NothingHere known={Boolean(current)} unitHref={unitHref} />
+      ) : (
+        <div className="mx-auto flex min-h-0 w-full max-w-5xl flex-1 flex-col lg:grid lg:grid-cols-[1fr_26rem]">
+          <main className="min-h-0 flex-1 overflow-y-auto overscroll-contain px-4 pt-4 pb-6">
+            <CheckBody
+              check={current}
+              board={traveler.board}
+              expected={kind.expected(current.spec)}
+              measured={kind.measured}
+            >
+              {bench.refused.map((attempt) => (
+                <RefusedNotice
+                  key={attempt.body.id}
+                  attempt={attempt}
+                  onRetry={() => void bench.queue().retry(attempt)}
+                  onDiscard={() => void bench.queue().withdraw(attempt.body.id)}
+                />
+              ))}
+              {kind.measured && (
+                <InstrumentPicker
+                  fitting={recording.instrument.fitting}
+                  chosen={recording.instrument.instrument}
+                  onChoose={recording.instrument.choose}
+                  settingsHref="/settings/instruments"
+                />
+              )}
+              {recording.note && (
+                <button
+                  type="button"
+                  onClick={() => setSheet("note")}
+                  className="border-rule bg-raised rounded-md border px-4 py-3 text-left"
+                >
+                  <span className="text-ink-soft block text-sm">Note with this attempt</span>
+                  <span className="whitespace-pre-line">{recording.note}</span>
+                </button>
+              )}
+              <LastAttempts
+                attempts={current.attempts}
+                coming={bench.coming}
+                historyHref={`${unitHref}?check=${current.id}`}
+                zone={viewer.timeZone}
+              />
+              <CheckTools
+                hasPrevious={bench.index > 0}
+                hasNext={bench.index < bench.checks.length - 1}
+                onStep={bench.step}
+                reading={read}
+                onKeys={() => setSheet("keys")}
+                onFile={may.attach ? () => chooser.current?.click() : undefined}
+              />
+            </CheckBody>
+          </main>
+          <section
+            aria-label="Record"
+            className="border-rule bg-sheet shrink-0 border-t px-4 pt-3 pb-[max(0.75rem,env(safe-area-inset-bottom))] lg:self-start lg:border-t-0 lg:pt-6"
+          >
+            <EvidenceStrip
+              files={recording.files}
+              smallHref={(id) => `/api/projects/${project.slug}/files/${id}?size=small`}
+              onRemove={(file) => void clearFiles(file.checkId, [file.uploadId])}
+            />
+            <PadOpen.Provider value={pad}>
+              <EntryPanel
+                kind={kind}
+                spec={current.spec}
+                recording={recording}
+                rule={project.rule}
+                blocked={current.blockers.length > 0}
+                may={may}
+                padShown={pad === "open"}
+                onPad={() => setPad(pad === "open" ? "shut" : "open")}
+                onRecord={(entry) => void record(entry)}
+                onPhoto={() => camera.current?.click()}
+                onFile={() => chooser.current?.click()}
+                onNote={() => setSheet("note")}
+              />
+            </PadOpen.Provider>
+          </section>
+        </div>
+      )}
+      {recording.slip.slip && (
+        <UndoBar
+          slip={recording.slip.slip}
+          onUndo={() => void recording.slip.undo()}
+          onDismiss={recording.slip.dismiss}
+        />
+      )}
+      <FileInputs camera={camera} chooser={chooser} accept={acceptFor(kinds)} onFiles={takes} />
+      <BenchSheets
+        sheet={sheet}
+        onSheet={setSheet}
+        bench={bench}
+        recording={recording}
+        onRecord={(entry) => void record(entry)}
+      />
+    </div>
+  );
+}
+
+function NothingHere({ known, unitHref }: { known: boolean; unitHref: string }) {
+  return (
+    <main className="mx-auto grid max-w-prose gap-3 p-6 text-lg">
+      <p>
+        {known
+          ? "This page is older than the check: it does not know this kind. Reload it when there is a network."
+          : "This unit has no traveler yet. A maintainer issues a procedure for its board, and its checks appear here."}
+      </p>
+      <a className="link" href={unitHref}>
+        To the unit
+      </a>
+    </main>
+  );
+}

@@ -1,0 +1,122 @@
+import { Icon } from "@/components/ui/Icon";
+import type { BenchKind } from "@/lib/check-kinds/bench-kind";
+import { BenchButton } from "./BenchButton";
+import type { Recording } from "./use-record";
+
+type Props = {
+  kind: BenchKind;
+  spec: unknown;
+  recording: Recording;
+  rule: "simple" | "guarded";
+  blocked: boolean;
+  may: { record: boolean; attach: boolean };
+  padShown: boolean;
+  onPad: () => void;
+  onRecord: (entry?: unknown) => void;
+  onPhoto: () => void;
+  onFile: () => void;
+  onNote: () => void;
+};
+
+/** Everything one touches, at the lower edge where the thumb is. */
+export function EntryPanel({
+  kind,
+  spec,
+  recording,
+  rule,
+  blocked,
+  may,
+  padShown,
+  onPad,
+  onRecord,
+  onPhoto,
+  onFile,
+  onNote,
+}: Props) {
+  const { BenchForm, stated } = kind;
+  const disabled = blocked || !may.record;
+  const required = kind.requires(spec);
+  const there = required
+    ? recording.files.filter((file) => file.refusal === "" && required.kinds.includes(file.kind)).length
+    : 0;
+  return (
+    <div className="grid gap-2.5">
+      {!may.record && (
+        <p className="text-ink-soft text-sm">You can look at this traveler. Builders and maintainers record.</p>
+      )}
+      <BenchForm
+        spec={spec}
+        draft={recording.entry}
+        onDraft={recording.setEntry}
+        judged={recording.judged}
+        onSubmit={(entry) => onRecord(entry)}
+        busy={disabled}
+        rule={rule}
+      />
+      {recording.trouble && recording.trouble.field !== "note" && !recording.judged && (
+        <p role="alert" className="text-failed font-semibold">
+          {recording.trouble.sentence}
+        </p>
+      )}
+      {required && (
+        <p
+          className={
+            there < required.minimum ? "text-doubtful text-sm font-semibold" : "text-passed text-sm font-semibold"
+          }
+        >
+          {there} of {required.minimum}{" "}
+          {required.kinds.includes("photo") ? (required.minimum === 1 ? "photo" : "photos") : "captures"} taken
+        </p>
+      )}
+      <div className="grid grid-cols-[1fr_1fr_auto_auto] gap-2">
+        {stated ? (
+          <>
+            <BenchButton
+              kind="passed"
+              disabled={disabled}
+              onClick={() => onRecord(stated(true))}
+              aria-keyshortcuts="Space"
+            >
+              Conforms
+            </BenchButton>
+            <BenchButton
+              kind="failed"
+              disabled={disabled}
+              onClick={() => onRecord(stated(false))}
+              aria-keyshortcuts="x"
+            >
+              Does not conform
+            </BenchButton>
+          </>
+        ) : (
+          <>
+            <BenchButton
+              kind="primary"
+              disabled={disabled || !recording.judged?.ok}
+              onClick={() => onRecord()}
+              aria-keyshortcuts="Enter"
+              className="col-span-1"
+            >
+              Record
+            </BenchButton>
+            <BenchButton onClick={onPad} aria-expanded={padShown} className="lg:invisible">
+              {padShown ? "Hide pad" : "Pad"}
+            </BenchButton>
+          </>
+        )}
+        <BenchButton
+          disabled={!may.attach}
+          onClick={required && !required.kinds.includes("photo") ? onFile : onPhoto}
+          aria-keyshortcuts="p"
+          aria-label={required && !required.kinds.includes("photo") ? "Add a capture" : "Take a photo"}
+          className="w-16"
+        >
+          <Icon name={required && !required.kinds.includes("photo") ? "file" : "camera"} size={24} />
+        </BenchButton>
+        <BenchButton onClick={onNote} aria-keyshortcuts="n" className="w-16 text-base">
+          Note
+        </BenchButton>
+      </div>
+    </div>
+  );
+}
