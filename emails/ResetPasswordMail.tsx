@@ -1,0 +1,24 @@
+import { Sheet } from "./parts/Sheet";
+import { Act, Line, PlainAddress, Title } from "./parts/Words";
+
+export type ResetPasswordProps = { name: string; link: string; minutesValid: number };
+
+export const resetPasswordSubject = "Set a new password for Boardwake";
+
+export function ResetPasswordMail({ name, link, minutesValid }: ResetPasswordProps) {
+  return (
+    <Sheet
+      preheader={`Works for ${minutesValid} minutes, once.`}
+      footer="You get this because somebody asked to reset the password of this address. If it was not you, do nothing: the old password stays."
+    >
+      <Title>Set a new password</Title>
+      <Line>
+        Hello {name}, choose a new password on the page behind this link. Every device that is signed in now is signed
+        out then.
+      </Line>
+      <Act href={link}>Choose a new password</Act>
+      <Line soft>The link works for {minutesValid} minutes, once.</Line>
+      <PlainAddress href={link} />
+    </Sheet>
+  );
+}
