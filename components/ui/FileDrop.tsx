@@ -47,7 +47,7 @@ export function FileDrop(props: FileDropProps) {
       }}
       className={clsx(
         "flex flex-col gap-3 rounded-lg border border-dashed border-edge px-4 py-4 transition-colors",
-        "data-drop-target:border-copper data-drop-target:bg-copper-ground data-focus-visible:border-copper",
+        "data-drop-target:border-copper data-drop-target:bg-copper-ground data-focus-visible:outline-2 data-focus-visible:outline-offset-2 data-focus-visible:outline-focus",
         props.className,
       )}
     >

@@ -65,7 +65,7 @@ export function Menu({ label, trigger, entries, selected, onSelect, placement = 
                 isDisabled={entry.isDisabled ?? false}
                 {...(entry.href ? { href: entry.href } : {})}
                 onAction={() => entry.onAction?.()}
-                className={clsx(dropItem, entry.isDanger && "text-failed")}
+                className={clsx(dropItem, entry.isDanger && "text-failed!")}
               >
                 {({ isSelected }) => (
                   <>

@@ -1,14 +1,13 @@
-import { ProgressBar } from "react-aria-components";
-
 /** A current running along the lower edge of a pending control. */
 export function Pulse() {
   return (
-    <ProgressBar
-      isIndeterminate
-      aria-label="Working"
-      className="absolute inset-x-2 bottom-1 h-0.5 overflow-hidden rounded-full"
-    >
-      <span className="motion-travel block h-full w-2/5 rounded-full bg-current" />
-    </ProgressBar>
+    <>
+      <span aria-hidden="true" className="absolute inset-x-2 bottom-1 h-0.5 overflow-hidden rounded-full">
+        <span className="motion-travel block h-full w-2/5 rounded-full bg-current" />
+      </span>
+      <span role="status" className="sr-only">
+        , working
+      </span>
+    </>
   );
 }

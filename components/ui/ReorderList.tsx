@@ -38,12 +38,7 @@ export function ReorderList<Item extends { id: string }>(props: ReorderListProps
         ),
       );
     },
-    renderDropIndicator: (target) => (
-      <DropIndicator
-        target={target}
-        className="h-0 outline-none data-drop-target:outline-2 data-drop-target:outline-copper"
-      />
-    ),
+    renderDropIndicator: (target) => <DropIndicator target={target} className={line} />,
   });
   return (
     <GridList
@@ -51,7 +46,7 @@ export function ReorderList<Item extends { id: string }>(props: ReorderListProps
       items={items}
       dependencies={[children]}
       dragAndDropHooks={dragAndDropHooks}
-      className={clsx("flex flex-col gap-1.5", className)}
+      className={clsx("flex flex-col [&>[role=row]:not(:last-child)]:mb-1.5", className)}
     >
       {(item) => (
         <GridListItem
@@ -74,6 +69,10 @@ export function ReorderList<Item extends { id: string }>(props: ReorderListProps
     </GridList>
   );
 }
+
+/** Takes no room, so nothing jumps while one looks for the place. */
+const line =
+  "relative h-0 outline-none after:absolute after:inset-x-0 after:-top-[5px] after:h-1 after:rounded-full data-drop-target:after:bg-copper";
 
 /** The order after the taken ids were laid down beside the target. */
 export function moved(

@@ -68,7 +68,10 @@ export function Table<Row extends RowData>(props: TableProps<Row>) {
         </ul>
       )}
       {rows.length > 0 && (
-        <div className={clsx("min-w-0 overflow-x-auto sm:overflow-visible", phone && "max-sm:hidden")}>
+        <div
+          className={clsx("min-w-0 overflow-x-auto sm:overflow-visible", phone && "max-sm:hidden")}
+          {...(phone ? {} : { tabIndex: 0, role: "group", "aria-label": `${label}, scrolls sideways` })}
+        >
           <table aria-label={label} className="w-full border-collapse text-left text-[0.9375rem]">
             <TableHead columns={columns} view={view} onSort={setView} />
             <tbody>

@@ -67,4 +67,4 @@ function ToastSlip({ toast, isHeld }: { toast: Toast; isHeld: boolean }) {
   );
 }
 
-const slipButton = "text-paper! underline-offset-4 hover:bg-paper/15! data-focus-visible:outline-paper";
+const slipButton = "text-paper! underline-offset-4 hover:bg-paper/15! focus-visible:outline-paper";

@@ -17,7 +17,7 @@ export type ConnectorFaceProps = {
 
 const PITCH = 10;
 const EDGE = 7;
-const TEXT = 13;
+const TEXT = 17;
 
 /** The mating face to scale: one pitch between positions and between neighbouring row letters. */
 export function ConnectorFace(props: ConnectorFaceProps) {
@@ -65,7 +65,7 @@ export function ConnectorFace(props: ConnectorFaceProps) {
                 ? { x: side === "solder" ? width - EDGE + 6 : -EDGE - 6, y: first.y + 3.5 }
                 : { x: first.x, y: -EDGE - 4 })}
               textAnchor="middle"
-              className="mono fill-ink-soft text-[9.5px]"
+              className="mono fill-ink-soft text-[9px]"
             >
               {row}
             </text>
@@ -84,7 +84,7 @@ export function ConnectorFace(props: ConnectorFaceProps) {
               key={position}
               {...(isLying ? { x, y: height - EDGE + 10.5 } : { x: -EDGE - 3, y: y + 3.5 })}
               textAnchor={isLying ? "middle" : "end"}
-              className="mono fill-ink-soft text-[9.5px]"
+              className="mono fill-ink-soft text-[9px]"
             >
               {position}
             </text>
