@@ -12,8 +12,6 @@ export type StageStripProps = {
   marked?: { group: number; check: number };
   /** "fill" shares the width as a table does; "flow" wraps, for phones and narrow panels. */
   layout?: "fill" | "flow";
-  /** How many checks each column must have room for, so that the columns of several strips stand in line. */
-  room?: readonly number[];
   className?: string;
 };
 
@@ -42,7 +40,7 @@ export function stripWords(group: StripGroup): string {
   return [`${group.name}: ${held} of ${group.states.length} hold`, ...counts].join(", ");
 }
 
-export function StageStrip({ groups, room, marked, layout = "fill", room, className }: StageStripProps) {
+export function StageStrip({ groups, room, marked, layout = "fill", className }: StageStripProps) {
   return (
     <ul
       className={clsx(layout === "fill" ? "flex flex-wrap sm:grid" : "flex flex-wrap", "gap-x-3 gap-y-2.5", className)}
