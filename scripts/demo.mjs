@@ -1,0 +1,3 @@
+import { runTypeScript } from "./bootstrap.mjs";
+
+runTypeScript("scripts/demo.ts");
