@@ -22,6 +22,8 @@ export type EvidenceView = {
 
 export type AttemptView = {
   id: string;
+  /** Order of arrival at the server. */
+  arrival: number;
   by: PersonView;
   performedAt: string;
   recordedAt: string;
@@ -49,7 +51,13 @@ export type ConcessionView = {
 export type HoldLiftView = { id: string; by: PersonView; at: string; reason: string };
 
 /** Another check that this one waits for. */
-export type BlockerView = { checkId: string; serial: string; title: string; state: CheckState; why: "hold point" | "prerequisite" };
+export type BlockerView = {
+  checkId: string;
+  serial: string;
+  title: string;
+  state: CheckState;
+  why: "hold point" | "prerequisite";
+};
 
 export type CheckView = {
   id: string;
@@ -94,3 +102,11 @@ export type TravelerView = {
   /** Checks of earlier procedure versions that were changed or dropped, with their history. */
   retired: CheckView[];
 };
+
+/** A unit that has no traveler yet: newestNumber is the issued procedure it could start with, if there is one. */
+export type UnitWithoutTraveler = Pick<TravelerView, "unit" | "board" | "revision" | "slot"> & {
+  newestNumber: number | null;
+};
+
+export type LoadedTraveler =
+  { kind: "traveler"; traveler: TravelerView } | { kind: "none"; unit: UnitWithoutTraveler } | { kind: "missing" };
