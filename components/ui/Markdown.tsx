@@ -36,7 +36,7 @@ const isOwn = (href: string | undefined) =>
   Boolean(href?.startsWith("/") && !href.startsWith("//")) || Boolean(href?.startsWith("#"));
 
 const LOOK = clsx(
-  "max-w-prose text-pretty break-words [&>*+*]:mt-3 [&_h3]:mt-5 [&_h3]:text-lg [&_h4]:mt-4 [&_h4]:text-base",
+  "max-w-prose text-pretty break-words [&>*+*]:mt-3 [&>:first-child]:mt-0! [&_h3]:mt-5 [&_h3]:text-lg [&_h4]:mt-4 [&_h4]:text-base",
   "[&_ul]:list-['–__'] [&_ul]:pl-5 [&_ol]:list-decimal [&_ol]:pl-6 [&_li+li]:mt-1 [&_li::marker]:text-ink-faint",
   "[&_code]:mono [&_code]:rounded-sm [&_code]:bg-ink/7 [&_code]:px-1 [&_code]:py-px [&_code]:text-[0.875em]",
   "[&_pre]:overflow-x-auto [&_pre]:rounded [&_pre]:border [&_pre]:border-rule [&_pre]:bg-raised [&_pre]:p-3 [&_pre_code]:bg-transparent [&_pre_code]:p-0",
