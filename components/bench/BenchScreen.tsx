@@ -11,7 +11,7 @@ import { EvidenceStrip } from "./EvidenceStrip";
 import { FileInputs } from "./FileInputs";
 import { InstrumentPicker } from "./InstrumentPicker";
 import { LastAttempts } from "./LastAttempts";
-import { PadOpen } from "./PadSlot";
+import { Pad } from "./PadSlot";
 import { clearFiles } from "./queue/file-shelf";
 import { RefusedNotice } from "./RefusedNotice";
 import { acceptFor, kindsWanted, takeFiles } from "./take-files";
@@ -27,10 +27,13 @@ export function BenchScreen(props: BenchProps) {
   const bench = useBench(props);
   const recording = useRecord(props, bench);
   const [sheet, setSheet] = useState<OpenSheet>();
-  const [pad, setPad] = useState<"auto" | "open" | "shut">("auto");
+  const [padFor, setPadFor] = useState<string>();
   const camera = useRef<HTMLInputElement>(null);
   const chooser = useRef<HTMLInputElement>(null);
   const { current, kind, traveler } = bench;
+  const currentId = current?.id;
+  // Shut again on the next check: first one reads what to do there.
+  const pad = useMemo(() => ({ isOpen: padFor === currentId, open: () => setPadFor(currentId) }), [padFor, currentId]);
   const read = useReadAloud(
     current
       ? [current.title, current.caution, current.instruction, current.expectation].filter(Boolean).join(". ")
@@ -134,29 +137,30 @@ export function BenchScreen(props: BenchProps) {
           </main>
           <section
             aria-label="Record"
-            className="border-rule bg-sheet shrink-0 border-t px-4 pt-3 pb-[max(0.75rem,env(safe-area-inset-bottom))] lg:self-start lg:border-t-0 lg:pt-6"
+            className="border-rule bg-sheet flex max-h-[calc(100dvh-6.5rem)] shrink-0 flex-col gap-2 border-t px-4 pt-3 pb-[max(0.75rem,env(safe-area-inset-bottom))] lg:self-start lg:border-t-0 lg:pt-6"
           >
             <EvidenceStrip
               files={recording.files}
               smallHref={(id) => `/api/projects/${project.slug}/files/${id}?size=small`}
               onRemove={(file) => void clearFiles(file.checkId, [file.uploadId])}
             />
-            <PadOpen.Provider value={pad}>
+            <Pad value={pad}>
               <EntryPanel
                 kind={kind}
                 spec={current.spec}
+                checkId={current.id}
                 recording={recording}
                 rule={project.rule}
                 blocked={current.blockers.length > 0}
                 may={may}
-                padShown={pad === "open"}
-                onPad={() => setPad(pad === "open" ? "shut" : "open")}
+                padShown={pad.isOpen}
+                onPad={() => (pad.isOpen ? setPadFor(undefined) : pad.open())}
                 onRecord={(entry) => void record(entry)}
                 onPhoto={() => camera.current?.click()}
                 onFile={() => chooser.current?.click()}
                 onNote={() => setSheet("note")}
               />
-            </PadOpen.Provider>
+            </Pad>
           </section>
         </div>
       )}

@@ -31,12 +31,13 @@ export function BenchTop({ unitHref, serial, checks, index, queue, onOverview, o
         >
           <Icon name="chevron-left" size={20} />
         </Link>
-        <h1 className="font-head min-w-0 flex-1 truncate text-xl">
+        <h1 className="font-head min-w-0 flex-1 truncate text-lg min-[360px]:text-xl">
           {serial}
           {current && <span className="font-normal"> · {stageName(current.stage)}</span>}
         </h1>
         <p className="text-ink-soft shrink-0 text-sm">
-          check <span className="text-ink font-semibold">{index + 1}</span> of {checks.length}
+          <span className="max-[359px]:sr-only">check </span>
+          <span className="text-ink font-semibold">{index + 1}</span> of {checks.length}
         </p>
       </div>
       <div className="mx-auto max-w-5xl">

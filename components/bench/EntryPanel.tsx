@@ -6,6 +6,7 @@ import type { Recording } from "./use-record";
 type Props = {
   kind: BenchKind;
   spec: unknown;
+  checkId: string;
   recording: Recording;
   rule: "simple" | "guarded";
   blocked: boolean;
@@ -22,6 +23,7 @@ type Props = {
 export function EntryPanel({
   kind,
   spec,
+  checkId,
   recording,
   rule,
   blocked,
@@ -40,35 +42,40 @@ export function EntryPanel({
     ? recording.files.filter((file) => file.refusal === "" && required.kinds.includes(file.kind)).length
     : 0;
   return (
-    <div className="grid gap-2.5">
-      {!may.record && (
-        <p className="text-ink-soft text-sm">You can look at this traveler. Builders and maintainers record.</p>
-      )}
-      <BenchForm
-        spec={spec}
-        draft={recording.entry}
-        onDraft={recording.setEntry}
-        judged={recording.judged}
-        onSubmit={(entry) => onRecord(entry)}
-        busy={disabled}
-        rule={rule}
-      />
-      {recording.trouble && recording.trouble.field !== "note" && !recording.judged && (
-        <p role="alert" className="text-failed font-semibold">
-          {recording.trouble.sentence}
-        </p>
-      )}
-      {required && (
-        <p
-          className={
-            there < required.minimum ? "text-doubtful text-sm font-semibold" : "text-passed text-sm font-semibold"
-          }
-        >
-          {there} of {required.minimum}{" "}
-          {required.kinds.includes("photo") ? (required.minimum === 1 ? "photo" : "photos") : "captures"} taken
-        </p>
-      )}
-      <div className="grid grid-cols-[1fr_1fr_auto_auto] gap-2">
+    <div className="flex min-h-0 flex-col gap-2.5">
+      <div className="grid min-h-0 gap-2.5 overflow-y-auto p-0.5 -m-0.5">
+        {!may.record && (
+          <p className="text-ink-soft text-sm">You can look at this traveler. Builders and maintainers record.</p>
+        )}
+        {!blocked && (
+          <BenchForm
+            key={checkId}
+            spec={spec}
+            draft={recording.entry}
+            onDraft={recording.setEntry}
+            judged={recording.judged}
+            onSubmit={(entry) => onRecord(entry)}
+            busy={disabled}
+            rule={rule}
+          />
+        )}
+        {recording.trouble && recording.trouble.field !== "note" && !recording.judged && (
+          <p role="alert" className="text-failed font-semibold">
+            {recording.trouble.sentence}
+          </p>
+        )}
+        {required && (
+          <p
+            className={
+              there < required.minimum ? "text-doubtful text-sm font-semibold" : "text-passed text-sm font-semibold"
+            }
+          >
+            {there} of {required.minimum}{" "}
+            {required.kinds.includes("photo") ? (required.minimum === 1 ? "photo" : "photos") : "captures"} taken
+          </p>
+        )}
+      </div>
+      <div className="grid shrink-0 grid-cols-[minmax(0,1.3fr)_minmax(0,1fr)_auto_auto] lg:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_auto_auto] gap-2">
         {stated ? (
           <>
             <BenchButton
@@ -95,11 +102,11 @@ export function EntryPanel({
               disabled={disabled || !recording.judged?.ok}
               onClick={() => onRecord()}
               aria-keyshortcuts="Enter"
-              className="col-span-1"
+              className="lg:col-span-2"
             >
               Record
             </BenchButton>
-            <BenchButton onClick={onPad} aria-expanded={padShown} className="lg:invisible">
+            <BenchButton onClick={onPad} aria-expanded={padShown} className="lg:hidden">
               {padShown ? "Hide pad" : "Pad"}
             </BenchButton>
           </>

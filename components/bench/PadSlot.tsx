@@ -2,11 +2,9 @@
 
 import { createContext, useContext, type ReactNode } from "react";
 
-/** Whether the pad stands open; the frame of the bench decides, so that it stays as it is from check to check. */
-export const PadOpen = createContext<"auto" | "open" | "shut">("auto");
-
-const SHOWN = { auto: "max-lg:[@media(max-height:760px)]:hidden", open: "", shut: "hidden" };
+/** On a phone the pad stands open for the check one is entering; beside the sheet of a wide screen it always does. */
+export const Pad = createContext<{ isOpen: boolean; open: () => void }>({ isOpen: true, open: () => undefined });
 
 export function PadSlot({ children }: { children: ReactNode }) {
-  return <div className={SHOWN[useContext(PadOpen)]}>{children}</div>;
+  return <div className={useContext(Pad).isOpen ? "" : "max-lg:hidden"}>{children}</div>;
 }

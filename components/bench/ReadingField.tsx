@@ -1,11 +1,12 @@
 "use client";
 
 import clsx from "clsx";
-import { useId, type Ref } from "react";
+import { useContext, useId, type Ref } from "react";
 import { StateGlyph } from "@/components/ui/glyphs/StateGlyph";
 import type { Verdict } from "@/db/schema/travelers";
 import type { Judged } from "@/lib/check-kinds/kind";
 import { VERDICTS } from "@/lib/check-kinds/verdict-word";
+import { Pad } from "./PadSlot";
 
 type Props = {
   ref: Ref<HTMLInputElement>;
@@ -33,6 +34,7 @@ const WORDS: Record<Verdict, string> = {
 /** The reading as large as a meter shows it. The phone's own keyboard stays away; the pad is there. */
 export function ReadingField({ ref, label, unit, typed, judged, verdict, disabled, onTyped, onEnter }: Props) {
   const id = useId();
+  const pad = useContext(Pad);
   const wrong = judged && !judged.ok && typed.trim() !== "";
   return (
     <form
@@ -59,6 +61,8 @@ export function ReadingField({ ref, label, unit, typed, judged, verdict, disable
             disabled={disabled}
             onChange={(event) => onTyped(event.currentTarget.value)}
             onKeyDown={(event) => event.key === "Escape" && event.currentTarget.blur()}
+            onFocus={pad.open}
+            placeholder="–.––"
             inputMode="none"
             autoComplete="off"
             autoCorrect="off"
@@ -67,8 +71,8 @@ export function ReadingField({ ref, label, unit, typed, judged, verdict, disable
             maxLength={60}
             aria-invalid={wrong ? true : undefined}
             aria-describedby={`${id}-verdict`}
-            size={Math.max(4, typed.length)}
-            className="field-sizing-content max-w-full min-w-16 bg-transparent outline-none"
+            size={Math.max(5, typed.length)}
+            className="field-sizing-content placeholder:text-rule-strong max-w-full min-w-[2ch] bg-transparent outline-none"
           />
           <span className="text-2xl font-normal">{unit}</span>
         </span>

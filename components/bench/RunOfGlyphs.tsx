@@ -8,6 +8,7 @@ type Props = { checks: readonly CheckView[]; index: number; onOverview: () => vo
 export function RunOfGlyphs({ checks, index, onOverview }: Props) {
   const held = checks.filter(({ state }) => state === "passed" || state === "conceded").length;
   const open = checks[index]?.id;
+  const isShort = checks.length <= 26;
   return (
     <button
       type="button"
@@ -19,7 +20,14 @@ export function RunOfGlyphs({ checks, index, onOverview }: Props) {
         const own = checks.filter((check) => check.stage === stage);
         if (own.length === 0) return null;
         return (
-          <span key={stage} className="flex flex-wrap gap-x-[3px] gap-y-1.5">
+          <span
+            key={stage}
+            className={
+              isShort
+                ? "flex flex-wrap gap-x-1 gap-y-1.5 [&_svg]:h-4 [&_svg]:w-[9.3px]"
+                : "flex flex-wrap gap-x-[3px] gap-y-1.5"
+            }
+          >
             {own.map((check) => (
               <MiniGlyph key={check.id} state={check.state} isMarked={check.id === open} />
             ))}

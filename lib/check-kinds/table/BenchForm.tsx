@@ -9,15 +9,14 @@ import { LimitBar } from "@/components/ui/glyphs/LimitBar";
 import type { BenchFormProps } from "../kind";
 import { drawnLimits } from "../reading-limits";
 import { CellGrid } from "./CellGrid";
-import { cellAfter, cellsOf, firstOpenCell } from "./cells";
+import { cellAfter, cellsOf, firstOpenCell, type CellPlace } from "./cells";
 import { withCell } from "./entry";
 import type { Entry, Spec } from "./schema";
 
 /** One cell at a time, big; above it the whole grid, in which a touch chooses the cell. */
 export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy, rule }: BenchFormProps<Spec, Entry>) {
   const field = useRef<HTMLInputElement>(null);
-  const [chosen, setChosen] = useState<{ row: number; column: number }>();
-  const at = chosen ?? firstOpenCell(spec, draft) ?? { row: 0, column: 0 };
+  const [at, setAt] = useState<CellPlace>(() => firstOpenCell(spec, draft) ?? { row: 0, column: 0 });
   const cells = cellsOf(spec, draft, rule);
   const cell = cells.find((one) => one.row === at.row && one.column === at.column);
 
@@ -27,13 +26,13 @@ export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy, rule }
   const write = (typed: string) => onDraft(withCell(draft, spec.rows.length, spec.columns.length, at, typed));
   const goOn = () => {
     const next = cellAfter(spec, draft, at);
-    if (next) setChosen(next);
+    if (next) setAt(next);
     else onSubmit(draft);
   };
   const drawn = drawnLimits(cell.limits.value, cell.unit, null, rule);
   return (
     <div className="grid gap-2">
-      <CellGrid spec={spec} cells={cells} at={at} onChoose={setChosen} />
+      <CellGrid spec={spec} cells={cells} at={at} onChoose={setAt} />
       <div className="flex items-end gap-2">
         <ReadingField
           key={`${at.row} ${at.column}`}

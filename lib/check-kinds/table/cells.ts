@@ -1,5 +1,6 @@
 import type { DecisionRule } from "@/db/schema/projects";
 import { judge as judgeOne } from "../reading/judge";
+import type { Unit } from "@/lib/calc/units";
 import type { Judged } from "../kind";
 import type { TypedLimits } from "../typed-limits";
 import type { Entry, Spec } from "./schema";
@@ -9,7 +10,7 @@ export type CellPlace = { row: number; column: number };
 export type Cell = CellPlace & {
   /** "+5 V, no load" */
   label: string;
-  unit: string;
+  unit: Unit;
   limits: TypedLimits;
   typed: string;
   judged: Judged | undefined;
