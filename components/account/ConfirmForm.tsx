@@ -36,8 +36,11 @@ export function ConfirmForm({ token, email, confirm }: Props) {
         autoComplete="current-password"
         description={
           <>
-            The one you chose when you signed up. Not there any more? <Link href="/forgot">Set a new one</Link>; that
-            confirms the address as well.
+            The one you chose when you signed up. Not there any more?{" "}
+            <Link className="link" href="/forgot">
+              Set a new one
+            </Link>
+            ; that confirms the address as well.
           </>
         }
       />

@@ -43,7 +43,11 @@ function PasswordForm({ next, signIn }: Props) {
         name="password"
         label="Password"
         autoComplete="current-password"
-        description={<Link href="/forgot">Set a new password</Link>}
+        description={
+          <Link className="link" href="/forgot">
+            Set a new password
+          </Link>
+        }
       />
     </Form>
   );

@@ -3,7 +3,7 @@ const BROWSERS: readonly [RegExp, string][] = [
   [/\b(OPR|Opera)\//, "Opera"],
   [/\b(Firefox|FxiOS)\//, "Firefox"],
   [/\bSamsungBrowser\//, "Samsung Internet"],
-  [/\b(Chrome|CriOS|Chromium)\//, "Chrome"],
+  [/(Chrome|CriOS|Chromium)\//, "Chrome"],
   [/\bSafari\//, "Safari"],
 ];
 

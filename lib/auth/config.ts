@@ -4,6 +4,7 @@ import Credentials from "next-auth/providers/credentials";
 import { database } from "@/db/client";
 import { findUserByEmail } from "@/db/queries/users";
 import { checkPassword } from "@/lib/account/check-password";
+import { LINK_MINUTES } from "@/lib/account/link-minutes";
 import { signInInput } from "@/lib/account/schema";
 import { sendSignInLink } from "@/lib/account/send-sign-in-link";
 import type { Refusal } from "@/lib/actions/answer";
@@ -13,9 +14,6 @@ import { log } from "@/lib/http/log";
 import { sessionAdapter } from "./adapter";
 import { openSession } from "./session";
 import { SESSION_SECONDS } from "./session-cookie";
-
-/** Minutes that a sign-in link works. */
-const LINK_MINUTES = 20;
 
 /** A sign-in that was refused for a reason that people are told. */
 export class SignInRefused extends CredentialsSignin {

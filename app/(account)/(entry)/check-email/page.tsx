@@ -42,7 +42,9 @@ export default definePage({
           meant it.
         </p>
         <p className="mt-3 text-[0.9375rem]">
-          <Link href={text.href}>{text.again}</Link>
+          <Link className="link" href={text.href}>
+            {text.again}
+          </Link>
         </p>
       </AccountSheet>
     );

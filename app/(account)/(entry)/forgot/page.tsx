@@ -16,7 +16,9 @@ export default definePage({
       lede="We mail you a link. It works once, within two hours; the old password holds until then."
       foot={
         <p>
-          <Link href="/sign-in">Back to sign in</Link>
+          <Link className="link" href="/sign-in">
+            Back to sign in
+          </Link>
         </p>
       }
     >

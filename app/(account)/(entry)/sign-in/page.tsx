@@ -37,7 +37,10 @@ export default definePage({
 function SignUpHint() {
   return isSignUpOpen() ? (
     <p>
-      No account yet? <Link href="/sign-up">Sign up</Link>
+      No account yet?{" "}
+      <Link className="link" href="/sign-up">
+        Sign up
+      </Link>
     </p>
   ) : (
     <p>New people come in by invitation: open the link in the mail that invited you.</p>

@@ -18,7 +18,10 @@ export default definePage({
     if (viewer) redirect(HOME);
     const foot = (
       <p>
-        You have an account? <Link href="/sign-in">Sign in</Link>
+        You have an account?{" "}
+        <Link className="link" href="/sign-in">
+          Sign in
+        </Link>
       </p>
     );
     if (!isSignUpOpen()) {

@@ -22,7 +22,10 @@ export default definePage({
           <Notice kind="error">
             <p>
               This link is not complete. Open it from the mail once more, or{" "}
-              <Link href="/sign-in">ask for a new one</Link>.
+              <Link className="link" href="/sign-in">
+                ask for a new one
+              </Link>
+              .
             </p>
           </Notice>
         </AccountSheet>
