@@ -1,4 +1,5 @@
 import type { BoardKind } from "@/db/schema/boards";
+import type { ConnectorId } from "@/lib/calc/connector";
 import type { CheckLine } from "./check-line";
 import { CONSTITUENT, SINE, SUMMING } from "./cards-arithmetic";
 import { BACKPLANE, OUTPUT, PANEL } from "./cards-output";
@@ -9,7 +10,7 @@ export type DemoBoard = {
   name: string;
   summary: string;
   kind: BoardKind;
-  connectorType: string | null;
+  connectorType: ConnectorId | null;
   revisions: { letter: string; notes: string; daysAgo: number }[];
   lines: CheckLine[];
 };

@@ -1,0 +1,100 @@
+import { eq } from "drizzle-orm";
+import { closeDatabase, database, type Database } from "@/db/client";
+import { digestSubscriptions, memberships, projects } from "@/db/schema/projects";
+import { grant } from "@/lib/access/grant";
+import type { Viewer } from "@/lib/access/scope";
+import { nextDue } from "@/lib/digest/next-due";
+import { createProject } from "@/lib/project/create-project";
+import { recomputeAll } from "@/lib/check/recompute-all";
+import { eveningAt, happening } from "./tide/calendar";
+import { granted } from "./tide/granted";
+import { PROJECT } from "./tide/machine";
+import { tellStory, type Cast } from "./tide/tell-story";
+import { uploadPicture, uploadRipple } from "./tide/upload-picture";
+import { fillRack, writeMachine } from "./tide/write-machine";
+import { writeLog } from "./tide/write-log";
+import { writeInstruments, writePeople } from "./tide/write-people";
+
+/** Seeds the tide computer. Does nothing when it is there already. */
+async function seed(db: Database, now: Date): Promise<void> {
+  const [there] = await db.select({ id: projects.id }).from(projects).where(eq(projects.slug, PROJECT.slug));
+  if (there) {
+    console.log("The tide computer is there already.");
+    return;
+  }
+  const people = await writePeople(db);
+  const maud = person(people, "maintainer");
+  const bram = person(people, "builder");
+  const ines = person(people, "collaborator");
+
+  await happening(db, eveningAt(now, PROJECT.startedDaysAgo, 0, PROJECT.timeZone), async () => {
+    granted(
+      await createProject(
+        { viewer: maud },
+        {
+          writeId: crypto.randomUUID(),
+          name: PROJECT.name,
+          summary: PROJECT.summary,
+          timeZone: PROJECT.timeZone,
+          decisionRule: "guarded",
+          layout: "tower",
+        },
+      ),
+    );
+    await join(db, bram, "builder");
+    await join(db, ines, "collaborator");
+  });
+  await subscribe(db, [maud, bram, ines], now);
+
+  const scope = granted(await grant(db, maud, PROJECT.slug, "board.edit"));
+  const { units } = await writeMachine(db, scope, now);
+  const cast = await castFor(db, { maud, bram });
+  await tellStory(db, cast, now, (who, target, name) =>
+    name === "scope-ripple" ? uploadRipple(who, target, name) : uploadPicture(who, target, name),
+  );
+  await fillRack(db, scope, now, units);
+  await writeLog(db, cast, now);
+
+  const differences = await recomputeAll(db, scope.projectId);
+  if (differences.length > 0) throw new Error(`states differ from history: ${JSON.stringify(differences.slice(0, 3))}`);
+  console.log("The tide computer is seeded.");
+}
+
+function person(people: Map<string, Viewer>, role: string): Viewer {
+  const found = people.get(role);
+  if (!found) throw new Error(`the demo has no ${role}`);
+  return found;
+}
+
+async function projectId(db: Database): Promise<string> {
+  const [row] = await db.select({ id: projects.id }).from(projects).where(eq(projects.slug, PROJECT.slug));
+  if (!row) throw new Error("the demo project is missing");
+  return row.id;
+}
+
+async function join(db: Database, viewer: Viewer, role: "builder" | "collaborator"): Promise<void> {
+  await db.insert(memberships).values({ projectId: await projectId(db), userId: viewer.userId, role });
+}
+
+async function subscribe(db: Database, viewers: Viewer[], now: Date): Promise<void> {
+  const due = { weekday: 7, hour: 18, zone: PROJECT.timeZone };
+  const id = await projectId(db);
+  await db
+    .insert(digestSubscriptions)
+    .values(viewers.map(({ userId }) => ({ projectId: id, userId, ...due, nextDueAt: nextDue(due, now) })));
+}
+
+async function castFor(db: Database, people: { maud: Viewer; bram: Viewer }): Promise<Cast> {
+  const member = async (viewer: Viewer) => {
+    const { meter, scope } = await writeInstruments(db, viewer.userId);
+    return { scope: granted(await grant(db, viewer, PROJECT.slug, "attempt.record")), meter, scope100: scope };
+  };
+  return { maud: await member(people.maud), bram: await member(people.bram) };
+}
+
+seed(database(), new Date())
+  .catch((error: unknown) => {
+    console.error(error);
+    process.exitCode = 1;
+  })
+  .finally(() => closeDatabase());
