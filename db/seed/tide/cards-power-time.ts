@@ -187,7 +187,7 @@ export const TIMEBASE: CheckLine[] = [
     stage: "integration",
     title: "Runs from the rack's own supply for an hour",
     instruction: "With only SUP and TIM in the rack. Frequency at the end against the start.",
-    expect: { kind: "reading", quantity: "Frequency", limits: "3.6864 MHz ± 100 ppm" },
+    expect: { kind: "reading", quantity: "Frequency", limits: "3.6864 MHz ± 100 ppm", expected: "3.6864 MHz" },
   },
   {
     id: "clock-far",

@@ -57,7 +57,7 @@ export function unpowered(rails: { name: string; pins: string[]; forward: string
       {
         id: `${rail.name}-forward`,
         stage: "continuity",
-        title: `${rail.name} to ground, red on the rail, hold point`,
+        title: `${rail.name} to ground, red on the rail`,
         instruction: `Black probe on TP1, red probe on ${rail.pins[0] ?? "the rail"}. Wait until the reading stands.`,
         caution: "Board unpowered and out of the rack.",
         pins: rail.pins,

@@ -40,7 +40,7 @@ const meterRange = (unit: string, fullScale: number, resolution: number, percent
   percentOfRange: 0,
 });
 
-/** A 6,000-count hand meter and a 100 MHz scope; figures of the ordinary sort, of no maker in particular. */
+/** A 6,000-count meter with a four-wire ohm range, and a 100 MHz scope; figures of the ordinary sort, of no maker in particular. */
 export async function writeInstruments(db: Database, userId: string): Promise<{ meter: string; scope: string }> {
   const [meter] = await db
     .insert(instruments)
@@ -56,11 +56,13 @@ export async function writeInstruments(db: Database, userId: string): Promise<{ 
         meterRange("A", 0.06, 0.00001, 1, 3),
         meterRange("A", 0.6, 0.0001, 1, 3),
         meterRange("A", 6, 0.001, 1.5, 5),
+        meterRange("Ω", 1, 0.0001, 0.5, 5),
         meterRange("Ω", 600, 0.1, 0.8, 3),
         meterRange("Ω", 6000, 1, 0.8, 2),
         meterRange("Ω", 60_000, 10, 0.8, 2),
         meterRange("Ω", 6_000_000, 1000, 1.5, 3),
         meterRange("Ω", 60_000_000, 10_000, 3, 5),
+        meterRange("Hz", 10_000, 0.001, 0.001, 1),
         meterRange("Hz", 10_000_000, 1, 0.001, 1),
       ],
     })
