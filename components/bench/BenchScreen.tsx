@@ -1,7 +1,9 @@
 "use client";
 
 import { useMemo, useRef, useState } from "react";
+import { Notice } from "@/components/ui/Notice";
 import type { BenchProps } from "./bench-props";
+import { BenchButton } from "./BenchButton";
 import { BenchSheets, type OpenSheet } from "./BenchSheets";
 import { BenchTop } from "./BenchTop";
 import { CheckBody } from "./CheckBody";
@@ -93,6 +95,19 @@ export function BenchScreen(props: BenchProps) {
               expected={kind.expected(current.spec)}
               measured={kind.measured}
             >
+              {bench.told && (
+                <Notice
+                  kind="info"
+                  actions={
+                    <BenchButton size="md" onClick={bench.dismissTold}>
+                      Seen
+                    </BenchButton>
+                  }
+                  role="status"
+                >
+                  {bench.told}
+                </Notice>
+              )}
               {bench.refused.map((attempt) => (
                 <RefusedNotice
                   key={attempt.body.id}

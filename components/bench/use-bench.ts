@@ -8,6 +8,7 @@ import { draftOf, keepDraft } from "./draft-store";
 import { foresee } from "./foresee";
 import { nextFree } from "./next-check";
 import { onTheWay } from "./on-the-way";
+import { overtakenBy } from "./overtaken-by";
 import { putBack } from "./queue/file-shelf";
 import type { HeldAttempt, NewAttempt } from "./queue/held-attempt";
 import { useQueue } from "./queue/use-queue";
@@ -24,6 +25,7 @@ export function useBench({ project, viewer, traveler: initial, openCheck }: Benc
   const { traveler, refresh } = useTraveler(project.slug, initial);
   const { queue, state } = useQueue(viewer.id);
   const [arrived, setArrived] = useState<HeldAttempt[]>([]);
+  const [told, setTold] = useState<{ checkId: string; sentence: string }>();
   const first =
     initial.checks.find((check) => check.id === openCheck) ?? nextFree(initial.checks, undefined) ?? initial.checks[0];
   const [currentId, setCurrentId] = useState(first?.id);
@@ -31,7 +33,12 @@ export function useBench({ project, viewer, traveler: initial, openCheck }: Benc
   useEffect(
     () =>
       queue().listen((event) => {
-        if (event.kind === "sent") setArrived((before) => [...before.slice(-19), event.attempt]);
+        if (event.kind === "sent") {
+          setArrived((before) => [...before.slice(-19), event.attempt]);
+          const sentence = overtakenBy(event.answer);
+          if (sentence)
+            setTold({ checkId: event.attempt.body.checkId, sentence: `${event.attempt.checkTitle}: ${sentence}` });
+        }
         // Rolled back: what was typed stands in the check again, unless something newer does.
         else if (!draftOf(viewer.id, event.attempt.body.checkId)) void restore(event.attempt).catch(() => undefined);
         refresh();
@@ -78,6 +85,8 @@ export function useBench({ project, viewer, traveler: initial, openCheck }: Benc
     refused: state.held.filter(
       (attempt) => attempt.body.checkId === current?.id && attempt.trouble?.kind === "refused",
     ),
+    told: told?.sentence,
+    dismissTold: () => setTold(undefined),
     open,
     step,
   };

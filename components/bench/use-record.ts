@@ -75,6 +75,7 @@ export function useRecord(props: BenchProps, bench: Bench) {
         note,
         instrumentId: instrument.instrument?.id ?? null,
         attachmentIds: usable.flatMap((file) => file.attachmentId ?? []),
+        seenArrival: Math.max(0, ...current.attempts.map((one) => one.arrival)),
       },
     };
     try {

@@ -12,6 +12,8 @@ export type AttemptBody = {
   note: string;
   instrumentId: string | null;
   attachmentIds: string[];
+  /** Arrival of the newest attempt of the check that the person had seen, to be told of one that came in between. */
+  seenArrival: number;
 };
 
 /** A file taken at the bench. Once the server keeps it, `attachmentId` names it there and the bytes are let go. */

@@ -49,6 +49,7 @@ export function attemptOf(id: string, checkId: string, userId = "mo"): NewAttemp
       note: "",
       instrumentId: null,
       attachmentIds: [],
+      seenArrival: 0,
     },
     files: [],
   };

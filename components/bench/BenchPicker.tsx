@@ -1,0 +1,121 @@
+import Link from "next/link";
+import { Page } from "@/components/shell/Page";
+import { EmptyState } from "@/components/ui/EmptyState";
+import { StageStrip } from "@/components/ui/glyphs/StageStrip";
+import { StateGlyph } from "@/components/ui/glyphs/StateGlyph";
+import { Panel } from "@/components/ui/Panel";
+import type { NextCheck } from "@/lib/check/next-checks";
+import type { BenchUnit, BenchView } from "@/lib/traveler/load-bench";
+import { STAGES, stageName } from "./stage-name";
+
+type Props = { project: string; bench: BenchView };
+
+/** Which unit to lay on the bench: what is next over the whole machine first, then every unit with what waits on it. */
+export function BenchPicker({ project, bench }: Props) {
+  const free = bench.units.filter((unit) => unit.next).length;
+  return (
+    <Page title="Bench" lede={ledeOf(bench, free)}>
+      {bench.units.length === 0 ? (
+        <EmptyState
+          title="No unit to lay on the bench"
+          action={
+            <Link className="link" href={`/projects/${project}/boards`}>
+              To the boards
+            </Link>
+          }
+        >
+          Make a unit of a board first. It gets its traveler when the board has an issued procedure.
+        </EmptyState>
+      ) : (
+        <div className="grid gap-5">
+          {bench.next.length > 0 && (
+            <Panel title="Next on the bench" padding="none">
+              <ol>
+                {bench.next.map((check, index) => (
+                  <NextLine key={check.checkId} project={project} check={check} isFirst={index === 0} />
+                ))}
+              </ol>
+            </Panel>
+          )}
+          <Panel title="Units" note={`${bench.units.length}`} padding="none">
+            <ul>
+              {bench.units.map((unit) => (
+                <UnitLine key={unit.serial} project={project} unit={unit} />
+              ))}
+            </ul>
+          </Panel>
+        </div>
+      )}
+    </Page>
+  );
+}
+
+function ledeOf({ units, next }: BenchView, free: number): string {
+  if (units.length === 0) return "Here one walks a unit's traveler, one check a screen.";
+  if (next.length === 0) return "Everything that can be done now holds. What is left waits for something else.";
+  return `${free} of ${units.length} units have something to do now.`;
+}
+
+const benchHref = (project: string, serial: string, checkId?: string) =>
+  `/projects/${project}/bench/${encodeURIComponent(serial)}${checkId ? `?check=${checkId}` : ""}`;
+
+function NextLine({ project, check, isFirst }: { project: string; check: NextCheck; isFirst: boolean }) {
+  return (
+    <li className="border-rule border-t">
+      <Link
+        href={benchHref(project, check.serial, check.checkId)}
+        prefetch={false}
+        className={`hover:bg-copper-ground flex items-center gap-4 px-4 sm:px-5 ${isFirst ? "min-h-20 py-3" : "min-h-14 py-2"}`}
+      >
+        <StateGlyph state={check.state} label={check.state} size={isFirst ? 20 : 14} />
+        <span className="min-w-0 flex-1">
+          <span className={isFirst ? "font-head block text-xl leading-tight font-semibold" : "block"}>
+            {check.title}
+          </span>
+          <span className="text-ink-soft text-sm">
+            <span className="mono text-ink">{check.serial}</span> · {stageName(check.stage)} · {check.reason}
+          </span>
+        </span>
+        {isFirst && (
+          <span className="bg-copper text-on-copper hidden rounded-md px-4 py-3 font-semibold sm:block">Start</span>
+        )}
+      </Link>
+    </li>
+  );
+}
+
+function UnitLine({ project, unit }: { project: string; unit: BenchUnit }) {
+  const groups = STAGES.flatMap((stage) => {
+    const states = unit.checks.filter((check) => check.stage === stage).map((check) => check.state);
+    return states.length > 0 ? [{ name: stageName(stage), states }] : [];
+  });
+  return (
+    <li className="border-rule border-t">
+      <Link
+        href={benchHref(project, unit.serial)}
+        prefetch={false}
+        className="hover:bg-copper-ground block px-4 py-3 sm:px-5"
+      >
+        <span className="flex flex-wrap items-baseline gap-x-3">
+          <span className="mono text-lg font-semibold">{unit.serial}</span>
+          <span>
+            {unit.board}, rev {unit.letter}
+            {unit.slot !== null && `, slot ${unit.slot}`}
+          </span>
+        </span>
+        <span className="text-ink-soft block text-sm">
+          {unit.next
+            ? `Next: ${unit.next.title}`
+            : groups.length === 0
+              ? "No traveler yet: its board has no issued procedure."
+              : "Nothing to do now: everything holds or waits."}
+        </span>
+        {groups.length > 0 && (
+          <div className="mt-2">
+            <StageStrip groups={groups} layout="flow" />
+          </div>
+        )}
+      </Link>
+    </li>
+  );
+}
