@@ -1,18 +1,23 @@
+import clsx from "clsx";
 import Link from "next/link";
 import type { RackView } from "@/lib/rack/rack-view";
 import { CardStages } from "./CardStages";
 import { boardAddress, unitAddress } from "./rack-addresses";
 
+type Props = { backplane: RackView["backplane"]; project: string; room?: readonly number[]; isStanding?: boolean };
+
 /** The spine's own name and its own checks: the backplane is a board too. */
-export function BackplaneFoot({ backplane, project }: { backplane: RackView["backplane"]; project: string }) {
+export function BackplaneFoot({ backplane, project, room, isStanding = false }: Props) {
   if (!backplane) return null;
   const { board, unit } = backplane;
   return (
-    <div className="relative mt-2 flex min-w-0 pl-7 sm:pl-9">
-      <span
-        aria-hidden="true"
-        className="absolute -top-3 bottom-0 left-7 w-3.5 rounded-b-sm bg-mask sm:left-9 sm:w-5"
-      />
+    <div className={clsx("relative mt-2 flex min-w-0", !isStanding && "pl-7 sm:pl-9")}>
+      {!isStanding && (
+        <span
+          aria-hidden="true"
+          className="absolute -top-3 bottom-0 left-7 w-3.5 rounded-b-sm bg-mask sm:left-9 sm:w-5"
+        />
+      )}
       <Link
         href={unit ? unitAddress(project, unit.serial) : boardAddress(project, board.code)}
         className="relative grid min-w-0 flex-1 items-center gap-x-4 gap-y-2 rounded-r-md border-y-4 border-r-4 border-mask bg-raised py-2 pl-8 pr-2 no-underline hover:bg-sheet @3xl:grid-cols-[minmax(9rem,1.15fr)_5.5rem_minmax(25rem,2.9fr)] @3xl:pl-11"
@@ -26,7 +31,7 @@ export function BackplaneFoot({ backplane, project }: { backplane: RackView["bac
         {unit && (
           <>
             <span className="hidden @3xl:block">
-              <CardStages unit={unit} />
+              <CardStages unit={unit} {...(room ? { room } : {})} />
             </span>
             <span className="@3xl:hidden">
               <CardStages unit={unit} layout="flow" />

@@ -2,16 +2,21 @@ import { StageStrip } from "@/components/ui/glyphs/StageStrip";
 import { STAGES } from "@/lib/procedure/stages";
 import type { RackUnit } from "@/lib/rack/rack-view";
 
+/** Room that lets the strips of all units stand in columns. */
+export function stageRoom(units: readonly (RackUnit | null | undefined)[]): number[] {
+  return STAGES.map((_, index) => Math.max(0, ...units.map((unit) => unit?.stages[index]?.states.length ?? 0)));
+}
+
 /** The five strips of a unit, or one sentence on why there are none. */
-export function CardStages({
-  unit,
-  layout = "fill",
-  className,
-}: {
+type Props = {
   unit: RackUnit;
   layout?: "fill" | "flow";
+  /** Longest strip of each stage in the machine. */
+  room?: readonly number[];
   className?: string;
-}) {
+};
+
+export function CardStages({ unit, layout = "fill", room, className }: Props) {
   if (unit.total === 0) {
     return (
       <p className="text-sm text-ink-soft">
@@ -25,6 +30,7 @@ export function CardStages({
       groups={groups}
       layout={layout}
       {...(unit.marked ? { marked: unit.marked } : {})}
+      {...(room ? { room } : {})}
       {...(className ? { className } : {})}
     />
   );

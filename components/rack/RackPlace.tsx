@@ -11,7 +11,7 @@ import { rackSentence } from "@/lib/rack/rack-sentence";
 import type { RackView } from "@/lib/rack/rack-view";
 import { LooseUnits } from "./LooseUnits";
 import { NextOnTheBench } from "./NextOnTheBench";
-import { RackBeginnings } from "./RackBeginnings";
+import { MissingProcedures, RackBeginnings } from "./RackBeginnings";
 import { RackTable } from "./RackTable";
 import { SinceThen } from "./SinceThen";
 import { StandingDrawing } from "./StandingDrawing";
@@ -43,6 +43,12 @@ export function RackPlace({ rack, project, zone, canEditBoards, canPlace, canRec
   }, [isTable, setAs]);
 
   const drawing = { rack, project, nextSerial };
+  const beside = [
+    <NextOnTheBench key="next" steps={rack.next} total={rack.total} project={project} />,
+    <SinceThen key="since" since={rack.since} zone={zone} />,
+  ];
+  // A standing rack and the table want the whole width.
+  const isBeside = !isTable && (rack.layout === "tower" || rack.slots.length === 0);
   return (
     <Page
       title={rack.name}
@@ -59,27 +65,26 @@ export function RackPlace({ rack, project, zone, canEditBoards, canPlace, canRec
           )}
         </>
       }
-      aside={
-        <>
-          <NextOnTheBench steps={rack.next} total={rack.total} project={project} />
-          <SinceThen since={rack.since} zone={zone} />
-        </>
-      }
+      {...(isBeside ? { aside: <>{beside}</> } : {})}
     >
-      <RackBeginnings rack={rack} project={project} canEdit={canEditBoards} />
-      {rack.slots.length > 0 &&
-        (isTable ? (
-          <RackTable rack={rack} project={project} />
-        ) : rack.layout === "tower" ? (
-          <TowerDrawing {...drawing} canPlace={canPlace} />
-        ) : (
-          <>
-            <StandingDrawing {...drawing} className="max-md:hidden" />
-            <TowerDrawing {...drawing} canPlace={canPlace} className="md:hidden" />
-          </>
-        ))}
-      {rack.total > 0 && !isTable && <StateLegend />}
-      {!isTable && <LooseUnits units={rack.loose} project={project} />}
+      <div className="flex min-w-0 flex-col gap-5">
+        {rack.slots.length === 0 && <RackBeginnings rack={rack} project={project} canEdit={canEditBoards} />}
+        {rack.slots.length > 0 &&
+          (isTable ? (
+            <RackTable rack={rack} project={project} />
+          ) : rack.layout === "tower" ? (
+            <TowerDrawing {...drawing} canPlace={canPlace} />
+          ) : (
+            <>
+              <StandingDrawing {...drawing} className="max-md:hidden" />
+              <TowerDrawing {...drawing} canPlace={canPlace} className="md:hidden" />
+            </>
+          ))}
+        {rack.total > 0 && !isTable && <StateLegend />}
+        {!isBeside && <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,2fr)_minmax(0,1fr)]">{beside}</div>}
+        {rack.slots.length > 0 && <MissingProcedures rack={rack} project={project} />}
+        {!isTable && <LooseUnits units={rack.loose} project={project} />}
+      </div>
     </Page>
   );
 }

@@ -65,6 +65,7 @@ function columnsFor(project: string): TableColumn<Row>[] {
       id: "unit",
       header: "Unit",
       mono: true,
+      className: "whitespace-nowrap",
       sortBy: (row) => row.unit?.serial,
       cell: (row) => row.unit?.serial ?? "",
     },

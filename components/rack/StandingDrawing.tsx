@@ -12,7 +12,7 @@ import { useSlotWalk } from "./slot-walk";
 type Props = { rack: RackView; project: string; nextSerial: string | undefined; className?: string };
 
 /** Width of the narrowest slot in px; the drawing scrolls sideways when the machine is wider than the sheet. */
-const NARROWEST = 96;
+const NARROWEST = 88;
 
 /** Cards stand side by side on the spine, seen from above the front; slot 1 on the left. */
 export function StandingDrawing({ rack, project, nextSerial, className }: Props) {
@@ -57,7 +57,7 @@ export function StandingDrawing({ rack, project, nextSerial, className }: Props)
           </div>
         </div>
       </div>
-      <BackplaneFoot backplane={rack.backplane} project={project} />
+      <BackplaneFoot backplane={rack.backplane} project={project} isStanding />
     </div>
   );
 }
@@ -103,7 +103,9 @@ function StandingCard({ slot, project, isNext, stop }: CardProps) {
         </span>
       )}
       <span className="flex min-h-16 flex-col gap-0.5">
-        <span className="font-head text-[0.9375rem] font-semibold leading-tight tracking-tight">{unit.board.name}</span>
+        <span className="hyphens-auto font-head text-[0.9375rem] font-semibold leading-tight tracking-tight">
+          {unit.board.name}
+        </span>
         <span className="mono text-xs font-semibold leading-tight">{unit.serial}</span>
         <span className="mono text-2xs leading-tight text-ink-soft">rev {unit.revision}</span>
       </span>

@@ -4,7 +4,7 @@ import clsx from "clsx";
 import Link from "next/link";
 import type { RackSlot, RackView } from "@/lib/rack/rack-view";
 import { BackplaneFoot } from "./BackplaneFoot";
-import { CardStages } from "./CardStages";
+import { CardStages, stageRoom } from "./CardStages";
 import { EdgeConnector } from "./EdgeConnector";
 import { slotAddress, unitAddress } from "./rack-addresses";
 import { useSlotWalk } from "./slot-walk";
@@ -12,8 +12,7 @@ import { useSlotWalk } from "./slot-walk";
 type Props = { rack: RackView; project: string; nextSerial: string | undefined; canPlace: boolean; className?: string };
 
 /** Height of the narrowest slot in px; wider ones are drawn wider in proportion, so pitch is true from card to card. */
-const NARROWEST = 84;
-const EMPTY = 52;
+const NARROWEST = 78;
 
 /**
  * Cards lie one above the other on the spine. The same elements are the table that a screen reader gets: one row a
@@ -21,6 +20,7 @@ const EMPTY = 52;
  */
 export function TowerDrawing({ rack, project, nextSerial, canPlace, className }: Props) {
   const walk = useSlotWalk(rack.slots.length);
+  const room = stageRoom([...rack.slots.map((slot) => slot.unit), rack.backplane?.unit]);
   const smallest = Math.min(...rack.slots.map((slot) => slot.pitchHp));
   return (
     <div className={clsx("grid-paper @container rounded-lg border border-rule px-2 pb-3 pt-4 sm:px-5", className)}>
@@ -45,13 +45,14 @@ export function TowerDrawing({ rack, project, nextSerial, canPlace, className }:
               project={project}
               isNext={slot.unit !== null && slot.unit.serial === nextSerial}
               canPlace={canPlace}
+              room={room}
               height={(slot.pitchHp / smallest) * NARROWEST}
               stop={walk.stop(index)}
             />
           ))}
         </div>
       </div>
-      <BackplaneFoot backplane={rack.backplane} project={project} />
+      <BackplaneFoot backplane={rack.backplane} project={project} room={room} />
     </div>
   );
 }
@@ -62,16 +63,17 @@ type RowProps = {
   isNext: boolean;
   canPlace: boolean;
   height: number;
+  room: readonly number[];
   stop: ReturnType<ReturnType<typeof useSlotWalk>["stop"]>;
 };
 
-function SlotRow({ slot, project, isNext, canPlace, height, stop }: RowProps) {
+function SlotRow({ slot, project, isNext, canPlace, height, room, stop }: RowProps) {
   const { unit } = slot;
   return (
     <div
       role="row"
       className="relative grid grid-cols-[1.75rem_minmax(0,1fr)] items-stretch py-1 sm:grid-cols-[2.25rem_minmax(0,1fr)]"
-      style={{ minHeight: unit ? height : Math.max(EMPTY, height * 0.6) }}
+      style={{ minHeight: height }}
     >
       <span role="rowheader" className="mono self-center pr-2 text-right text-sm text-ink-soft">
         <span className="sr-only">Slot </span>
@@ -98,7 +100,7 @@ function SlotRow({ slot, project, isNext, canPlace, height, stop }: RowProps) {
                 <span className="text-xs text-ink-soft">rev {unit.revision}</span>
               </span>
               <span className="hidden @3xl:block">
-                <CardStages unit={unit} />
+                <CardStages unit={unit} room={room} />
               </span>
               <span className="@3xl:hidden">
                 <CardStages unit={unit} layout="flow" />

@@ -18,10 +18,12 @@ export function useStaleEdit<Current extends Versioned>(
   const [theirs, setTheirs] = useState<Current>();
   const asked = useRef<Asked>({ writeId: crypto.randomUUID(), version });
 
-  async function send<Value extends Versioned>(save: (asked: Asked) => Promise<Reply<Value>>): Promise<Reply<Value>> {
+  async function send<Value extends object>(save: (asked: Asked) => Promise<Reply<Value>>): Promise<Reply<Value>> {
     const reply = await save(asked.current);
     if (reply.ok) {
-      asked.current = { writeId: crypto.randomUUID(), version: reply.value.version };
+      const { value } = reply;
+      const saved = "version" in value && typeof value.version === "number" ? value.version : asked.current.version;
+      asked.current = { writeId: crypto.randomUUID(), version: saved };
       setTheirs(undefined);
       return reply;
     }

@@ -1,0 +1,37 @@
+import type { Metadata } from "next";
+import { notFound } from "next/navigation";
+import { BoardPlace } from "@/components/board/BoardPlace";
+import { can } from "@/lib/access/permissions";
+import { definePage } from "@/lib/actions/define-page";
+import { loadBoard } from "@/lib/board/load-board";
+import { archiveBoard, createRevision, editBoard, releaseRevision, restoreBoard } from "../actions";
+import { archiveUnit, createUnit, editUnit, restoreUnit } from "../unit-actions";
+
+export async function generateMetadata({ params }: { params: Promise<{ board: string }> }): Promise<Metadata> {
+  return { title: (await params).board };
+}
+
+export default definePage({
+  permission: "project.see",
+  path: (params) => `/projects/${params.project}/boards/${params.board}`,
+  render: async (scope, { params }) => {
+    const board = await loadBoard(scope, params.board ?? "");
+    if (!board) notFound();
+    const open = !scope.archived;
+    return (
+      <BoardPlace
+        project={scope.slug}
+        zone={scope.viewer.timeZone}
+        board={board}
+        can={{
+          editBoard: open && can(scope.role, "board.edit"),
+          editUnits: open && can(scope.role, "unit.edit"),
+          editProcedure: open && can(scope.role, "procedure.edit"),
+        }}
+        boardActs={{ edit: editBoard, archive: archiveBoard, restore: restoreBoard }}
+        revisionActs={{ create: createRevision, release: releaseRevision }}
+        unitActs={{ create: createUnit, edit: editUnit, archive: archiveUnit, restore: restoreUnit }}
+      />
+    );
+  },
+});
