@@ -6,13 +6,13 @@ import type { Viewer } from "@/lib/access/scope";
 import { nextDue } from "@/lib/digest/next-due";
 import { createProject } from "@/lib/project/create-project";
 import { recomputeAll } from "@/lib/check/recompute-all";
-import { eveningAt, happening } from "./tide/calendar";
+import { eveningAt, play } from "./tide/calendar";
 import { granted } from "./tide/granted";
 import { PROJECT } from "./tide/machine";
-import { tellStory, type Cast } from "./tide/tell-story";
-import { uploadPicture, uploadRipple } from "./tide/upload-picture";
-import { fillRack, writeMachine } from "./tide/write-machine";
-import { writeLog } from "./tide/write-log";
+import { storyHappenings, type Cast } from "./tide/tell-story";
+import { uploadPicture, uploadRipple, type Upload } from "./tide/upload-picture";
+import { machineHappenings } from "./tide/write-machine";
+import { logHappenings } from "./tide/write-log";
 import { writeInstruments, writePeople } from "./tide/write-people";
 
 /** Seeds the tide computer. Does nothing when it is there already. */
@@ -27,37 +27,38 @@ async function seed(db: Database, now: Date): Promise<void> {
   const bram = person(people, "builder");
   const ines = person(people, "collaborator");
 
-  await happening(db, eveningAt(now, PROJECT.startedDaysAgo, 0, PROJECT.timeZone), async () => {
-    granted(
-      await createProject(
-        { viewer: maud },
-        {
-          writeId: crypto.randomUUID(),
-          name: PROJECT.name,
-          summary: PROJECT.summary,
-          timeZone: PROJECT.timeZone,
-          decisionRule: "guarded",
-          layout: "tower",
-        },
-      ),
-    );
-    await join(db, bram, "builder");
-    await join(db, ines, "collaborator");
-  });
+  const begun = eveningAt(now, PROJECT.startedDaysAgo, 0, PROJECT.timeZone);
+  await play(db, [{ at: begun, work: () => begin(db, maud, bram, ines) }]);
   await subscribe(db, [maud, bram, ines], now);
 
   const scope = granted(await grant(db, maud, PROJECT.slug, "board.edit"));
-  const { units } = await writeMachine(db, scope, now);
   const cast = await castFor(db, { maud, bram });
-  await tellStory(db, cast, now, (who, target, name) =>
-    name === "scope-ripple" ? uploadRipple(who, target, name) : uploadPicture(who, target, name),
-  );
-  await fillRack(db, scope, now, units);
-  await writeLog(db, cast, now);
+  const upload: Upload = (who, target, name) =>
+    name === "scope-ripple" ? uploadRipple(who, target, name) : uploadPicture(who, target, name);
+  await play(db, [
+    ...machineHappenings(db, scope, now),
+    ...storyHappenings(db, cast, now, upload),
+    ...logHappenings(cast, now),
+  ]);
 
   const differences = await recomputeAll(db, scope.projectId);
   if (differences.length > 0) throw new Error(`states differ from history: ${JSON.stringify(differences.slice(0, 3))}`);
   console.log("The tide computer is seeded.");
+}
+
+async function begin(db: Database, maud: Viewer, bram: Viewer, ines: Viewer): Promise<void> {
+  const { name, summary, timeZone } = PROJECT;
+  const form = {
+    writeId: crypto.randomUUID(),
+    name,
+    summary,
+    timeZone,
+    decisionRule: "guarded",
+    layout: "tower",
+  } as const;
+  granted(await createProject({ viewer: maud }, form));
+  await join(db, bram, "builder");
+  await join(db, ines, "collaborator");
 }
 
 function person(people: Map<string, Viewer>, role: string): Viewer {

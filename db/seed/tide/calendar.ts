@@ -28,11 +28,20 @@ const DATED = [
   ["memberships", "created_at"],
 ] as const;
 
+/** One thing that happens in the story, and when. */
+export type Happening = { at: Date; work: () => Promise<void> };
+
+/** Plays what happened in the order in which it happened, so that events stand in that order too. */
+export async function play(db: Database, happenings: Happening[]): Promise<void> {
+  const inOrder = [...happenings].sort((a, b) => a.at.getTime() - b.at.getTime());
+  for (const { at, work } of inOrder) await happen(db, at, work);
+}
+
 /**
  * Lets `work` happen through the product's own use cases, then dates what it wrote back to `at`. Only the seed may: the
  * triggers that keep history final are told so for this one transaction.
  */
-export async function happening(db: Database, at: Date, work: () => Promise<void>): Promise<void> {
+async function happen(db: Database, at: Date, work: () => Promise<void>): Promise<void> {
   const [started] = await db.execute<{ now: string }>(sql`select clock_timestamp()::text as now`);
   await work();
   await db.transaction(async (tx) => {

@@ -63,7 +63,7 @@ export const BOARDS: DemoBoard[] = [
     summary: "Two memories, quarter wave, 12 bit",
     kind: "card",
     connectorType: FACE,
-    revisions: [{ letter: "A", notes: "", daysAgo: 60 }],
+    revisions: [{ letter: "A", notes: "", daysAgo: 66 }],
     lines: SINE,
   },
   {
@@ -72,7 +72,7 @@ export const BOARDS: DemoBoard[] = [
     summary: "16-bit adder, saturating",
     kind: "card",
     connectorType: FACE,
-    revisions: [{ letter: "A", notes: "", daysAgo: 45 }],
+    revisions: [{ letter: "A", notes: "", daysAgo: 64 }],
     lines: SUMMING,
   },
   {
@@ -81,7 +81,7 @@ export const BOARDS: DemoBoard[] = [
     summary: "12-bit DAC, servo loop",
     kind: "card",
     connectorType: FACE,
-    revisions: [{ letter: "A", notes: "", daysAgo: 20 }],
+    revisions: [{ letter: "A", notes: "", daysAgo: 64 }],
     lines: OUTPUT,
   },
   {
@@ -90,7 +90,7 @@ export const BOARDS: DemoBoard[] = [
     summary: "Switches and lamps, by ribbon to the rack",
     kind: "card",
     connectorType: FACE,
-    revisions: [{ letter: "A", notes: "", daysAgo: 50 }],
+    revisions: [{ letter: "A", notes: "", daysAgo: 63 }],
     lines: PANEL,
   },
   {

@@ -5,7 +5,7 @@ export type Deed =
   | {
       do: "record";
       line: string;
-      typed?: string | string[][];
+      typed?: string;
       fails?: true;
       note?: string;
       voided?: string;

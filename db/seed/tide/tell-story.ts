@@ -10,7 +10,7 @@ import { voidAttempt } from "@/lib/attempt/void-attempt";
 import { checkKind } from "@/lib/check-kinds/list";
 import { reopenCheck } from "@/lib/check/reopen-check";
 import { grantConcession } from "@/lib/concession/grant-concession";
-import { eveningAt, happening } from "./calendar";
+import { eveningAt, type Happening } from "./calendar";
 import type { CheckLine } from "./check-line";
 import { generator } from "./drawings";
 import { granted } from "./granted";
@@ -24,73 +24,76 @@ export type Cast = Record<Person, { scope: ProjectScope; meter: string; scope100
 type Line = { line: CheckLine; checkId: string; spec: unknown };
 
 /** Plays the story through the product's own use cases: every verdict and every state is really computed. */
-export async function tellStory(db: Database, cast: Cast, now: Date, upload: Upload): Promise<void> {
+export function storyHappenings(db: Database, cast: Cast, now: Date, upload: Upload): Happening[] {
   const chance = generator("tide");
   const minutesOf = new Map<string, number>();
-  for (const evening of STORY) {
-    const { scope } = cast[evening.by];
-    const lines = await linesOf(db, scope, evening.serial);
-    for (const deed of evening.deeds) {
+  return STORY.flatMap((evening) =>
+    evening.deeds.map((deed) => {
+      const player = cast[evening.by];
       const clock = `${evening.daysAgo} ${evening.by}`;
-      const minutes = (minutesOf.get(clock) ?? 0) + 4;
+      const minutes = (minutesOf.get(clock) ?? 4) + 4;
       minutesOf.set(clock, minutes);
-      const found = lines.get(deed.line);
-      if (!found) throw new Error(`${evening.serial} has no check ${deed.line}`);
-      await happening(db, eveningAt(now, evening.daysAgo, minutes, scope.timeZone), () =>
-        carryOut(deed, found, evening.serial),
-      );
-    }
+      return {
+        at: eveningAt(now, evening.daysAgo, minutes, player.scope.timeZone),
+        work: async () => {
+          const found = (await linesOf(db, player.scope, evening.serial)).get(deed.line);
+          if (!found) throw new Error(`${evening.serial} has no check ${deed.line}`);
+          await carryOut({ deed, found, serial: evening.serial, player, chance, upload });
+        },
+      };
+    }),
+  );
+}
 
-    async function carryOut(deed: Deed, found: Line, serial: string): Promise<void> {
-      const on = { project: scope.slug, writeId: crypto.randomUUID(), checkId: found.checkId };
-      if (deed.do === "reopen") granted(await reopenCheck(scope, { ...on, reason: deed.reason }));
-      else if (deed.do === "concede") granted(await grantConcession(scope, { ...on, reason: deed.reason }));
-      else await record(deed, found, serial);
-    }
+type Scene = { deed: Deed; found: Line; serial: string; player: Cast[Person]; chance: () => number; upload: Upload };
 
-    async function record(deed: Extract<Deed, { do: "record" }>, found: Line, serial: string): Promise<void> {
-      const { line, checkId, spec } = found;
-      const kind = checkKind(line.expect.kind);
-      const wanted = kind.requires(spec);
-      const picture = wanted ? await upload(scope, { checkId }, pictureOf(line, serial)) : undefined;
-      const id = crypto.randomUUID();
-      granted(
-        await recordAttempt(scope, {
-          project: scope.slug,
-          id,
-          checkId,
-          performedAt: new Date(),
-          record: recordOf(deed, line, spec),
-          note: deed.note ?? "",
-          instrumentId: kind.measured ? instrumentFor(line) : null,
-          attachmentIds: picture ? [picture] : [],
-        }),
-      );
-      if (deed.voided)
-        granted(
-          await voidAttempt(scope, {
-            project: scope.slug,
-            writeId: crypto.randomUUID(),
-            attemptId: id,
-            reason: deed.voided,
-          }),
-        );
-    }
+async function carryOut(scene: Scene): Promise<void> {
+  const { deed, found, player } = scene;
+  const { scope } = player;
+  const on = { project: scope.slug, writeId: crypto.randomUUID(), checkId: found.checkId };
+  if (deed.do === "reopen") granted(await reopenCheck(scope, { ...on, reason: deed.reason }));
+  else if (deed.do === "concede") granted(await grantConcession(scope, { ...on, reason: deed.reason }));
+  else await record(deed, scene);
+}
 
-    function recordOf(deed: Extract<Deed, { do: "record" }>, line: CheckLine, spec: unknown): unknown {
-      if (typeof deed.typed === "string") return { typed: deed.typed };
-      if (deed.typed) return { cells: deed.typed };
-      if (deed.fails) return { conforms: false };
-      return entryFor(line.expect, spec, chance, limitsOf);
-    }
+async function record(deed: Extract<Deed, { do: "record" }>, scene: Scene): Promise<void> {
+  const { found, serial, player, upload } = scene;
+  const { line, checkId, spec } = found;
+  const { scope } = player;
+  const kind = checkKind(line.expect.kind);
+  const picture = kind.requires(spec) ? await upload(scope, { checkId }, pictureOf(line, serial)) : undefined;
+  const id = crypto.randomUUID();
+  granted(
+    await recordAttempt(scope, {
+      project: scope.slug,
+      id,
+      checkId,
+      performedAt: new Date(),
+      record: recordOf(deed, line, spec, scene.chance),
+      note: deed.note ?? "",
+      instrumentId: kind.measured ? instrumentFor(line, player) : null,
+      attachmentIds: picture ? [picture] : [],
+    }),
+  );
+  if (!deed.voided) return;
+  const slip = { project: scope.slug, writeId: crypto.randomUUID(), attemptId: id, reason: deed.voided };
+  granted(await voidAttempt(scope, slip));
+}
 
-    function instrumentFor(line: CheckLine): string {
-      const seen = line.expect.kind === "reading" ? line.expect.quantity : "";
-      return ["Time", "Ripple", "Noise", "Duty factor"].includes(seen)
-        ? cast[evening.by].scope100
-        : cast[evening.by].meter;
-    }
-  }
+function recordOf(
+  deed: Extract<Deed, { do: "record" }>,
+  line: CheckLine,
+  spec: unknown,
+  chance: () => number,
+): unknown {
+  if (deed.typed !== undefined) return { typed: deed.typed };
+  if (deed.fails) return { conforms: false };
+  return entryFor(line.expect, spec, chance, limitsOf);
+}
+
+function instrumentFor(line: CheckLine, player: Cast[Person]): string {
+  const quantity = line.expect.kind === "reading" ? line.expect.quantity : "";
+  return ["Time", "Ripple", "Noise", "Duty factor"].includes(quantity) ? player.scope100 : player.meter;
 }
 
 function pictureOf(line: CheckLine, serial: string): string {

@@ -1,6 +1,5 @@
-import type { Database } from "@/db/client";
 import { writeLogEntry } from "@/lib/log-entry/write-log-entry";
-import { eveningAt, happening } from "./calendar";
+import { eveningAt, type Happening } from "./calendar";
 import { granted } from "./granted";
 import { LOG } from "./story";
 import type { Cast } from "./tell-story";
@@ -17,19 +16,27 @@ const CAPTIONS: Record<string, string> = {
   "board-OUT": "The pen driver, still in its bag",
 };
 
-export async function writeLog(db: Database, cast: Cast, now: Date): Promise<void> {
-  for (const entry of LOG) {
+export function logHappenings(cast: Cast, now: Date): Happening[] {
+  return LOG.map((entry) => {
     const { scope } = cast[entry.by];
-    await happening(db, eveningAt(now, entry.daysAgo, 130, scope.timeZone), async () => {
-      const pictures = [];
-      for (const name of entry.pictures) {
-        pictures.push({ id: await uploadPicture(scope, {}, name), caption: CAPTIONS[name] ?? "" });
-      }
-      const { title, body } = entry;
-      const unit = entry.serial ?? "";
-      granted(
-        await writeLogEntry(scope, { project: scope.slug, writeId: crypto.randomUUID(), title, body, unit, pictures }),
-      );
-    });
-  }
+    return {
+      at: eveningAt(now, entry.daysAgo, 130, scope.timeZone),
+      work: async () => {
+        const pictures = [];
+        for (const name of entry.pictures) {
+          pictures.push({ id: await uploadPicture(scope, {}, name), caption: CAPTIONS[name] ?? "" });
+        }
+        const { title, body } = entry;
+        const form = {
+          project: scope.slug,
+          writeId: crypto.randomUUID(),
+          title,
+          body,
+          unit: entry.serial ?? "",
+          pictures,
+        };
+        granted(await writeLogEntry(scope, form));
+      },
+    };
+  });
 }

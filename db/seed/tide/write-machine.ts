@@ -12,74 +12,76 @@ import { recordEvent } from "@/lib/event/record-event";
 import { createSlot } from "@/lib/slot/create-slot";
 import { placeUnit } from "@/lib/slot/place-unit";
 import { createUnit } from "@/lib/unit/create-unit";
-import { eveningAt, happening } from "./calendar";
+import { eveningAt, type Happening } from "./calendar";
 import type { CheckLine } from "./check-line";
 import { granted } from "./granted";
 import { BOARDS, SLOTS, UNITS, type DemoBoard } from "./machine";
 import { typedSpec } from "./typed-spec";
 
-type Machine = { units: Map<string, string> };
-
 const write = (scope: ProjectScope) => ({ project: scope.slug, writeId: crypto.randomUUID() });
 
 /** Boards with their revisions and procedures, units with their travelers, and which of them sits where. */
-export async function writeMachine(db: Database, scope: ProjectScope, now: Date): Promise<Machine> {
-  const at = (daysAgo: number) => eveningAt(now, daysAgo, 0, scope.timeZone);
-  const boards = new Map<string, string>();
-  for (const board of BOARDS) {
-    await happening(db, at(Math.max(...board.revisions.map((one) => one.daysAgo))), async () => {
-      const { code, name, summary, kind } = board;
-      const face = { connectorType: board.connectorType, connectorReference: "J1" };
-      const made = granted(await createBoard(scope, { ...write(scope), code, name, summary, kind, ...face }));
-      boards.set(code, made.id);
+export function machineHappenings(db: Database, scope: ProjectScope, now: Date): Happening[] {
+  const at = (daysAgo: number, minutes: number) => eveningAt(now, daysAgo, minutes, scope.timeZone);
+  const boardIds = new Map<string, string>();
+  const unitIds = new Map<string, string>();
+
+  const boards = BOARDS.map((board) => ({
+    at: at(Math.max(...board.revisions.map((one) => one.daysAgo)), 0),
+    work: async () => {
+      const { code, name, summary, kind, connectorType } = board;
+      const form = { ...write(scope), code, name, summary, kind, connectorType, connectorReference: "J1" };
+      const made = granted(await createBoard(scope, form));
+      boardIds.set(code, made.id);
       await writeRevisions(db, scope, made.id, board);
       await issueProcedure(db, scope, made.id, board);
-    });
-  }
-  const units = new Map<string, string>();
-  for (const unit of UNITS) {
-    const boardId = boards.get(unit.board);
-    if (!boardId) throw new Error(`the demo has no board ${unit.board}`);
-    await happening(db, at(unit.daysAgo), async () => {
-      const revisionId = await revisionOf(db, boardId, unit.letter);
-      const { serial, note } = unit;
-      units.set(serial, granted(await createUnit(scope, { ...write(scope), boardId, revisionId, serial, note })).id);
-    });
-  }
-  return { units };
+    },
+  }));
+  const units = UNITS.map(({ serial, note, board, letter, daysAgo }) => ({
+    at: at(daysAgo, 1),
+    work: async () => {
+      const boardId = known(boardIds, board);
+      const revisionId = await revisionOf(db, boardId, letter);
+      unitIds.set(serial, granted(await createUnit(scope, { ...write(scope), boardId, revisionId, serial, note })).id);
+    },
+  }));
+  const put = UNITS.filter((unit) => unit.archived).map(({ serial }) => ({
+    at: at(85, 0),
+    work: async () => {
+      granted(await archiveUnit(scope, { ...write(scope), unitId: known(unitIds, serial) }));
+    },
+  }));
+  const slotIds = new Map<number, string>();
+  const slots = SLOTS.map(({ position, label, pitchHp, board }) => ({
+    at: at(SLOTS_DRAWN_DAYS_AGO, position),
+    work: async () => {
+      const form = { ...write(scope), position, label, pitchHp, boardId: known(boardIds, board) };
+      slotIds.set(position, granted(await createSlot(scope, form)).id);
+    },
+  }));
+  const places = SLOTS.flatMap(({ position, unit, daysAgo }) =>
+    unit === undefined || daysAgo === undefined
+      ? []
+      : [
+          {
+            at: at(daysAgo, 55),
+            work: async () => {
+              const ids = { slotId: known(slotIds, position), unitId: known(unitIds, unit) };
+              granted(await placeUnit(scope, { ...write(scope), ...ids }));
+            },
+          },
+        ],
+  );
+  return [...boards, ...units, ...put, ...slots, ...places];
 }
 
-/** Slots last, since a unit goes into the rack when it has come that far; SUP-01 is put away. */
-export async function fillRack(
-  db: Database,
-  scope: ProjectScope,
-  now: Date,
-  units: Map<string, string>,
-): Promise<void> {
-  const boardIds = new Map<string, string>();
-  const { boards } = await import("@/db/schema/boards");
-  for (const row of await db
-    .select({ id: boards.id, code: boards.code })
-    .from(boards)
-    .where(eq(boards.projectId, scope.projectId))) {
-    boardIds.set(row.code, row.id);
-  }
-  for (const slot of SLOTS) {
-    await happening(db, eveningAt(now, slot.daysAgo ?? 60, 55, scope.timeZone), async () => {
-      const { position, label, pitchHp } = slot;
-      const boardId = boardIds.get(slot.board) ?? null;
-      const made = granted(await createSlot(scope, { ...write(scope), position, label, pitchHp, boardId }));
-      const unitId = slot.unit ? units.get(slot.unit) : undefined;
-      if (unitId) granted(await placeUnit(scope, { ...write(scope), slotId: made.id, unitId }));
-    });
-  }
-  for (const unit of UNITS.filter((one) => one.archived)) {
-    const unitId = units.get(unit.serial);
-    if (!unitId) continue;
-    await happening(db, eveningAt(now, 85, 0, scope.timeZone), async () => {
-      granted(await archiveUnit(scope, { ...write(scope), unitId }));
-    });
-  }
+/** All boards are on paper by then; slots name the board they are wired for. */
+const SLOTS_DRAWN_DAYS_AGO = 62;
+
+function known<Key>(ids: Map<Key, string>, key: Key): string {
+  const id = ids.get(key);
+  if (id === undefined) throw new Error(`the demo has no ${String(key)} yet`);
+  return id;
 }
 
 async function writeRevisions(db: Database, scope: ProjectScope, boardId: string, board: DemoBoard): Promise<void> {
