@@ -1,5 +1,6 @@
 import { existsSync, readFileSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
+import { keepingFiles } from "../keeping-files";
 import { runToEnd } from "../processes/run-to-end";
 import { nextCommand, root } from "../run-typescript";
 import { sourceHash } from "./source-hash";

@@ -2,7 +2,7 @@ import { rmSync } from "node:fs";
 import { join } from "node:path";
 import { runToEnd } from "../processes/run-to-end";
 import { nextCommand, root } from "../run-typescript";
-import { keepingFiles } from "./keeping-files";
+import { keepingFiles } from "../keeping-files";
 import { failedOne, passedOne, type Stage } from "./stage";
 
 /** A build folder of the tests' own, so that a running demo keeps its build. */

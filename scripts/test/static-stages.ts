@@ -2,7 +2,7 @@ import { existsSync } from "node:fs";
 import { join } from "node:path";
 import { runToEnd } from "../processes/run-to-end";
 import { nextCommand, root } from "../run-typescript";
-import { keepingFiles } from "./keeping-files";
+import { keepingFiles } from "../keeping-files";
 import { failedOne, passedOne, type Stage } from "./stage";
 
 /** A tool that passes or fails as a whole; its output is shown when it fails. */

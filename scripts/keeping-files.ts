@@ -1,6 +1,6 @@
 import { existsSync, readFileSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
-import { root } from "../run-typescript";
+import { root } from "./run-typescript";
 
 /** Next.js writes its build folder into files of the project: for a throw-away build they are put back. */
 export async function keepingFiles<T>(names: string[], work: () => Promise<T>): Promise<T> {
