@@ -1,0 +1,88 @@
+import { Page } from "@/components/shell/Page";
+import { ButtonLink } from "@/components/ui/ButtonLink";
+import { EmptyState } from "@/components/ui/EmptyState";
+import { Notice } from "@/components/ui/Notice";
+import type { MoveView } from "@/lib/traveler/load-move";
+import type { TravelerView, UnitWithoutTraveler } from "@/lib/traveler/traveler-view";
+import { countsSentence } from "./counts-sentence";
+import { MoveTraveler } from "./MoveTraveler";
+import type { TravelerFrame } from "./traveler-acts";
+import { TravelerPlace } from "./TravelerPlace";
+
+type Props = {
+  unit: Pick<UnitWithoutTraveler, "unit" | "board" | "revision" | "slot">;
+  traveler: TravelerView | undefined;
+  move: MoveView | undefined;
+  openCheck: string | undefined;
+  canEditUnit: boolean;
+  frame: TravelerFrame;
+};
+
+/** One physical board and the document that accompanies it. */
+export function UnitPlace({ unit, traveler, move, openCheck, canEditUnit, frame }: Props) {
+  const { serial, note, archived } = unit.unit;
+  const base = `/projects/${frame.project}`;
+  const self = `${base}/units/${encodeURIComponent(serial)}`;
+  return (
+    <Page
+      title={
+        <>
+          {serial}{" "}
+          <span className="text-ink-soft font-normal">
+            {unit.board.name}, rev {unit.revision.letter}
+            {unit.slot ? `, slot ${unit.slot.position}` : ", in no slot"}
+          </span>
+        </>
+      }
+      lede={
+        traveler &&
+        `Traveler, procedure version ${traveler.procedure.number}. ${countsSentence(traveler.checks.map((check) => check.state))}`
+      }
+      actions={
+        <>
+          {move && frame.may.move && <MoveTraveler project={frame.project} move={move} act={frame.acts.move} />}
+          {canEditUnit && (
+            <ButtonLink href={`${base}/boards/${encodeURIComponent(unit.board.code)}`}>Edit the unit</ButtonLink>
+          )}
+          {traveler && (
+            <ButtonLink href={`${self}/print`} prefetch={false}>
+              Print the sheet
+            </ButtonLink>
+          )}
+          {traveler && frame.may.record && (
+            <ButtonLink kind="primary" href={`${base}/bench/${encodeURIComponent(serial)}`} prefetch={false}>
+              Bench this unit
+            </ButtonLink>
+          )}
+        </>
+      }
+    >
+      <div className="grid gap-4">
+        {archived && (
+          <Notice kind="waiting">
+            This unit is put away. Its traveler can be read; nothing can be recorded on it.
+          </Notice>
+        )}
+        {note && <p className="text-ink-soft max-w-prose whitespace-pre-line">{note}</p>}
+        {move && !frame.may.move && (
+          <Notice kind="info">Version {move.to} of the procedure is out. A maintainer can move this unit over.</Notice>
+        )}
+        {traveler ? (
+          <TravelerPlace traveler={traveler} frame={frame} openCheck={openCheck} />
+        ) : (
+          <EmptyState
+            title="No traveler yet"
+            action={
+              <ButtonLink href={`${base}/boards/${encodeURIComponent(unit.board.code)}/procedure`}>
+                To the procedure
+              </ButtonLink>
+            }
+          >
+            The board {unit.board.name} has no issued procedure. When a maintainer issues one, this unit gets its
+            traveler.
+          </EmptyState>
+        )}
+      </div>
+    </Page>
+  );
+}
