@@ -1,6 +1,6 @@
 "use client";
 
-import { useMemo, useRef, useState } from "react";
+import { useEffect, useMemo, useRef, useState } from "react";
 import { Notice } from "@/components/ui/Notice";
 import type { BenchProps } from "./bench-props";
 import { BenchButton } from "./BenchButton";
@@ -12,6 +12,7 @@ import { EntryPanel } from "./EntryPanel";
 import { EvidenceStrip } from "./EvidenceStrip";
 import { FileInputs } from "./FileInputs";
 import { InstrumentPicker } from "./InstrumentPicker";
+import { keepOffline } from "./keep-offline";
 import { LastAttempts } from "./LastAttempts";
 import { Pad } from "./PadSlot";
 import { clearFiles } from "./queue/file-shelf";
@@ -45,6 +46,11 @@ export function BenchScreen(props: BenchProps) {
     () => kindsWanted(current && kind ? kind.requires(current.spec)?.kinds : undefined),
     [current, kind],
   );
+
+  useEffect(() => {
+    // Where workers are forbidden the bench works with network only.
+    void keepOffline().catch(() => undefined);
+  }, []);
 
   const record = async (entry?: unknown) => {
     if (!may.record || !current || current.blockers.length > 0) return;
