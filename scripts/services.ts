@@ -6,7 +6,7 @@ import { startPostgres } from "./postgres/start-postgres";
 import { createSupervisor, type Supervisor } from "./processes/supervisor";
 
 /** Preferred ports; the next free one is taken when one is in use. Without a preference any free port. */
-export type Ports = FakePorts & { postgres: number };
+type Ports = FakePorts & { postgres: number };
 
 type Options = { dataDir: string; ports?: Partial<Ports>; fsync: boolean; quiet: boolean };
 type Urls = FakeUrls & { database: string };

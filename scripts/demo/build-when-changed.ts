@@ -18,9 +18,8 @@ export async function buildWhenChanged(dataDir: string, env: Record<string, stri
   const last = existsSync(file) ? readFileSync(file, "utf8") : undefined;
   if (last !== undefined && last === stampOf(hash)) return;
   console.log("Building the app: about a minute, and only when sources changed.");
-  const ran = await runToEnd(process.execPath, [nextCommand, "build"], {
-    cwd: root,
-    env: { ...env, NODE_ENV: "production" },
+  const ran = await keepingFiles(["tsconfig.json"], () => {
+    return runToEnd(process.execPath, [nextCommand, "build"], { cwd: root, env: { ...env, NODE_ENV: "production" } });
   });
   if (ran.code !== 0) throw new Error(`The build failed:\n${ran.output}`);
   writeFileSync(file, stampOf(hash) ?? "");

@@ -1,7 +1,7 @@
 import { existsSync } from "node:fs";
 import { runToEnd } from "../processes/run-to-end";
 
-export class CannotInstall extends Error {
+class CannotInstall extends Error {
   override name = "CannotInstall";
 }
 

@@ -11,7 +11,7 @@ const record = z.object({ supervisor: identity, children: z.array(child) });
 export type RecordedChild = z.infer<typeof child>;
 type PidRecord = z.infer<typeof record>;
 
-export class AlreadyRunning extends Error {
+class AlreadyRunning extends Error {
   override name = "AlreadyRunning";
 }
 

@@ -20,7 +20,6 @@ export type Lines = {
   follow(stream: Readable): void;
   /** The newest lines, for a failure's report. */
   tail(): string[];
-  onLine(listener: (line: string) => void): void;
   close(): void;
 };
 
@@ -30,7 +29,6 @@ type Options = { name: string; quiet: boolean; logFile?: string };
 export function prefixLines({ name, quiet, logFile }: Options): Lines {
   const prefix = prefixFor(name);
   const recent: string[] = [];
-  const listeners = new Set<(line: string) => void>();
   const file = logFile ? createWriteStream(logFile, { flags: "w", mode: 0o600 }) : undefined;
   file?.on("error", () => undefined);
 
@@ -39,7 +37,6 @@ export function prefixLines({ name, quiet, logFile }: Options): Lines {
     if (recent.length > 60) recent.shift();
     file?.write(`${line}\n`);
     if (!quiet) process.stdout.write(`${prefix}${line}\n`);
-    for (const listener of listeners) listener(line);
   };
 
   return {
@@ -57,7 +54,6 @@ export function prefixLines({ name, quiet, logFile }: Options): Lines {
       });
     },
     tail: () => [...recent],
-    onLine: (listener) => listeners.add(listener),
     close: () => file?.end(),
   };
 }

@@ -18,7 +18,7 @@ export type ChildOptions = {
   graceMs?: number;
 };
 
-export type Exit = { code: number | null; signal: NodeJS.Signals | null };
+type Exit = { code: number | null; signal: NodeJS.Signals | null };
 
 export type Child = {
   name: string;

@@ -37,10 +37,3 @@ export function waitForHttp(
 ): Promise<void> {
   return waitUntil(child, () => answers(url, accept), timeoutMs);
 }
-
-/** Waits until the child prints a line that matches. */
-export async function waitForLine(child: Child, pattern: RegExp, timeoutMs = 30_000): Promise<void> {
-  let seen = child.lines.tail().some((line) => pattern.test(line));
-  child.lines.onLine((line) => (seen ||= pattern.test(line)));
-  await waitUntil(child, () => Promise.resolve(seen), timeoutMs);
-}

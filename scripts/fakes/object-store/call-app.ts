@@ -63,7 +63,7 @@ export async function tellUploaded(
     apiKey,
   );
   // The app reports its result before it answers the callback: after that there is little to wait for.
-  const late = delay(problem ? 0 : 2000).then((): Result => ({
+  const late = delay(problem ? 0 : 500).then((): Result => ({
     error: problem ?? "The app's callback gave no result.",
   }));
   const result = await Promise.race([answer, late]);
