@@ -2,7 +2,7 @@ import type { IncomingMessage } from "node:http";
 import type { z } from "zod";
 import { Refusal } from "./refusal";
 
-export async function readBody(request: IncomingMessage, limit: number): Promise<Buffer> {
+async function readBody(request: IncomingMessage, limit: number): Promise<Buffer> {
   const parts: Buffer[] = [];
   let size = 0;
   for await (const chunk of request.iterator({ destroyOnReturn: false })) {

@@ -3,7 +3,7 @@ import { Refusal } from "./refusal";
 import { sendJson } from "./send";
 
 export type Call = { request: IncomingMessage; response: ServerResponse; url: URL };
-export type Handler = (call: Call) => Promise<void>;
+type Handler = (call: Call) => Promise<void>;
 
 type Options = { name: string; host: string; port: number; handler: Handler; requestTimeoutMs?: number };
 

@@ -73,5 +73,3 @@ export function createDelivery(requests: AcceptedRequests, smtpUrl: string) {
     },
   };
 }
-
-export type Delivery = ReturnType<typeof createDelivery>;

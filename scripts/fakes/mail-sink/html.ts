@@ -1,6 +1,6 @@
 const entities: Record<string, string> = { "&": "&amp;", "<": "&lt;", ">": "&gt;", '"': "&quot;", "'": "&#39;" };
 
-export const escapeHtml = (text: string) => text.replace(/[&<>"']/g, (letter) => entities[letter] ?? letter);
+const escapeHtml = (text: string) => text.replace(/[&<>"']/g, (letter) => entities[letter] ?? letter);
 
 class Safe {
   constructor(readonly text: string) {}

@@ -5,7 +5,7 @@ import { z } from "zod";
 import { writeAtomically } from "../write-atomically";
 
 /** What the list shows of one message, kept beside its source. */
-export const summarySchema = z.object({
+const summarySchema = z.object({
   id: z.string(),
   from: z.string(),
   /** The envelope: who really got it, blind copies included. */

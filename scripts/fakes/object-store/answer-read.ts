@@ -8,7 +8,7 @@ import type { StoredObject } from "./stored-object";
 type Range = { start: number; end: number };
 
 /** One range of bytes (RFC 9110, 14.1.2); several at once are answered with the whole file. */
-export function readRange(header: string | undefined, size: number): Range | "whole" | "unsatisfiable" {
+function readRange(header: string | undefined, size: number): Range | "whole" | "unsatisfiable" {
   const match = /^bytes=(\d*)-(\d*)$/.exec(header ?? "");
   const [, from = "", to = ""] = match ?? [];
   if (!match || (from === "" && to === "")) return "whole";

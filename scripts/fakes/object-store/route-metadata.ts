@@ -46,5 +46,3 @@ export async function openRouteMetadata(folder: string) {
     forget: (key: string) => rm(fileOf(key), { force: true }),
   };
 }
-
-export type RouteMetadata = Awaited<ReturnType<typeof openRouteMetadata>>;
