@@ -70,10 +70,11 @@ function Session({ session, zone, endSession }: Acts & { session: Line }) {
 }
 
 function EndAll({ endAll }: Pick<Acts, "endAll">) {
+  const router = useRouter();
   async function end(): Promise<string | void> {
     const reply = await reach(() => endAll({}));
     if (!reply.ok) return reply.error.message;
-    window.location.assign("/sign-in");
+    router.replace("/sign-in");
   }
   return (
     <ConfirmDialog

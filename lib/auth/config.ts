@@ -76,6 +76,7 @@ async function personWithPassword(raw: unknown, request: Request) {
   return { id: answer.value.userId };
 }
 
+/** A refused sign-in and a link that was used up are answers, not failures. */
 function logUnlessExpected(error: Error): void {
-  if (!(error instanceof SignInRefused)) log().warn({ err: error }, "the session library reports an error");
+  if (!(error instanceof SignInRefused) && error.name !== "Verification") log().warn({ err: error }, "the session library reports an error");
 }

@@ -16,7 +16,10 @@ export default definePage({
   render: async (_scope, { params: { token = "" } }) => {
     const link = await lookAtLink("reset-password", token);
     return (
-      <AccountSheet title="Set a new password" lede="Every session of the account ends with it, on all devices.">
+      <AccountSheet
+        title="Set a new password"
+        lede={link.state === "open" ? "Every session of the account ends with it, on all devices." : undefined}
+      >
         {link.state === "open" ? (
           <ResetForm token={token} email={link.email} reset={reset} />
         ) : (
