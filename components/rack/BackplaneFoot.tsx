@@ -1,10 +1,15 @@
 import clsx from "clsx";
-import Link from "next/link";
 import type { RackView } from "@/lib/rack/rack-view";
+import { CardLink } from "./CardLink";
 import { CardStages } from "./CardStages";
 import { boardAddress, unitAddress } from "./rack-addresses";
 
-type Props = { backplane: RackView["backplane"]; project: string; room?: readonly number[]; isStanding?: boolean };
+type Props = {
+  backplane: RackView["backplane"];
+  project: string | undefined;
+  room?: readonly number[];
+  isStanding?: boolean;
+};
 
 /** The spine's own name and its own checks: the backplane is a board too. */
 export function BackplaneFoot({ backplane, project, room, isStanding = false }: Props) {
@@ -18,8 +23,8 @@ export function BackplaneFoot({ backplane, project, room, isStanding = false }: 
           className="absolute -top-3 bottom-0 left-7 w-3.5 rounded-b-sm bg-mask sm:left-9 sm:w-5"
         />
       )}
-      <Link
-        href={unit ? unitAddress(project, unit.serial) : boardAddress(project, board.code)}
+      <CardLink
+        href={project && (unit ? unitAddress(project, unit.serial) : boardAddress(project, board.code))}
         className="relative grid min-w-0 flex-1 items-center gap-x-4 gap-y-2 rounded-r-md border-y-4 border-r-4 border-mask bg-raised py-2 pl-8 pr-2 no-underline hover:bg-sheet @3xl:grid-cols-[minmax(9rem,1.15fr)_5.5rem_minmax(25rem,2.9fr)] @3xl:pl-11"
       >
         <span aria-hidden="true" className="absolute inset-y-0 left-0 w-3.5 bg-mask sm:w-5" />
@@ -38,7 +43,7 @@ export function BackplaneFoot({ backplane, project, room, isStanding = false }: 
             </span>
           </>
         )}
-      </Link>
+      </CardLink>
     </div>
   );
 }

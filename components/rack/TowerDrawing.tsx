@@ -1,15 +1,22 @@
 "use client";
 
 import clsx from "clsx";
-import Link from "next/link";
 import type { RackSlot, RackView } from "@/lib/rack/rack-view";
+import { CardLink } from "./CardLink";
 import { BackplaneFoot } from "./BackplaneFoot";
 import { CardStages, stageRoom } from "./CardStages";
 import { EdgeConnector } from "./EdgeConnector";
 import { slotAddress, unitAddress } from "./rack-addresses";
 import { useSlotWalk } from "./slot-walk";
 
-type Props = { rack: RackView; project: string; nextSerial: string | undefined; canPlace: boolean; className?: string };
+type Props = {
+  rack: Pick<RackView, "slots" | "backplane">;
+  /** Undefined: a picture without links, as on the landing page. */
+  project: string | undefined;
+  nextSerial: string | undefined;
+  canPlace: boolean;
+  className?: string;
+};
 
 /** Height of the narrowest slot in px; wider ones are drawn wider in proportion, so pitch is true from card to card. */
 const NARROWEST = 78;
@@ -59,7 +66,7 @@ export function TowerDrawing({ rack, project, nextSerial, canPlace, className }:
 
 type RowProps = {
   slot: RackSlot;
-  project: string;
+  project: string | undefined;
   isNext: boolean;
   canPlace: boolean;
   height: number;
@@ -81,8 +88,8 @@ function SlotRow({ slot, project, isNext, canPlace, height, room, stop }: RowPro
       </span>
       <div role="cell" className="flex min-w-0">
         {unit ? (
-          <Link
-            href={unitAddress(project, unit.serial)}
+          <CardLink
+            href={project && unitAddress(project, unit.serial)}
             {...stop}
             className={clsx(
               "group relative ml-3 flex min-w-0 flex-1 items-center rounded-md border bg-raised no-underline shadow-lift transition-colors sm:ml-4",
@@ -106,7 +113,7 @@ function SlotRow({ slot, project, isNext, canPlace, height, room, stop }: RowPro
                 <CardStages unit={unit} layout="flow" />
               </span>
             </span>
-          </Link>
+          </CardLink>
         ) : (
           <EmptySlot slot={slot} project={project} canPlace={canPlace} stop={stop} />
         )}
@@ -137,8 +144,8 @@ export function NextMark() {
 function EmptySlot({ slot, project, canPlace, stop }: Pick<RowProps, "slot" | "project" | "canPlace" | "stop">) {
   const wanted = slot.board ? `Wired for ${slot.board.name}.` : "Takes any card.";
   return (
-    <Link
-      href={slotAddress(project, slot.position)}
+    <CardLink
+      href={project && slotAddress(project, slot.position)}
       {...stop}
       className="ml-3 flex min-w-0 flex-1 items-center rounded-md border border-dashed border-rule-strong bg-sheet/70 no-underline hover:border-ink-soft sm:ml-4"
     >
@@ -151,6 +158,6 @@ function EmptySlot({ slot, project, canPlace, stop }: Pick<RowProps, "slot" | "p
           {wanted} {canPlace ? "Put a unit in." : "Its pins stay open."}
         </span>
       </span>
-    </Link>
+    </CardLink>
   );
 }

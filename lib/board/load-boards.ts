@@ -1,7 +1,6 @@
 import { and, asc, desc, eq, inArray, isNull, sql } from "drizzle-orm";
 import { database } from "@/db/client";
-import { boards, revisions, slotOccupancies, slots, units, type BoardKind } from "@/db/schema/boards";
-import { procedures } from "@/db/schema/procedures";
+import { boards, slotOccupancies, slots, units, type BoardKind } from "@/db/schema/boards";
 import type { ProjectScope } from "@/lib/access/scope";
 
 export type BoardLine = {
@@ -46,14 +45,15 @@ export async function loadBoards(scope: ProjectScope): Promise<BoardsView> {
       kind: boards.kind,
       connectorType: boards.connectorType,
       archivedAt: boards.archivedAt,
-      revision: sql<string>`coalesce((select ${revisions.letter} from ${revisions} where ${revisions.boardId} = ${boards.id}
-        order by ${revisions.createdAt} desc limit 1), '')`,
-      units: sql<number>`(select count(*) from ${units} where ${units.boardId} = ${boards.id}
-        and ${units.archivedAt} is null)`.mapWith(Number),
-      issued: sql<number | null>`(select max(${procedures.number}) from ${procedures}
-        where ${procedures.boardId} = ${boards.id} and ${procedures.state} = 'issued')`,
-      hasDraft: sql<boolean>`exists (select 1 from ${procedures}
-        where ${procedures.boardId} = ${boards.id} and ${procedures.state} = 'draft')`,
+      // Written out, because a query of one table names its columns without the table.
+      revision: sql<string>`coalesce((select letter from revisions where revisions.board_id = boards.id
+        order by revisions.created_at desc limit 1), '')`,
+      units: sql<number>`(select count(*) from units where units.board_id = boards.id
+        and units.archived_at is null)`.mapWith(Number),
+      issued: sql<number | null>`(select max(number) from procedures
+        where procedures.board_id = boards.id and procedures.state = 'issued')`,
+      hasDraft: sql<boolean>`exists (select 1 from procedures
+        where procedures.board_id = boards.id and procedures.state = 'draft')`,
     })
     .from(boards)
     .where(eq(boards.projectId, scope.projectId))
