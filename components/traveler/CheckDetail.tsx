@@ -50,7 +50,11 @@ export function CheckDetail({ check, board, isRetired, frame }: Props) {
         </Link>
       )}
       {!isRetired && <CheckActs check={check} frame={frame} />}
-      <div className="[&_p]:text-base">{check.instruction && <Instruction text={check.instruction} />}</div>
+      {check.instruction && (
+        <div className="[&_p]:text-base">
+          <Instruction text={check.instruction} />
+        </div>
+      )}
       {check.caution && (
         <Notice kind="caution" role="note">
           {check.caution}

@@ -1,8 +1,9 @@
 import { LimitBar } from "@/components/ui/glyphs/LimitBar";
 import { VerdictFigure } from "@/components/traveler/VerdictFigure";
 import type { RecordViewProps } from "../kind";
-import { drawnLimits, figure } from "../reading-limits";
+import { drawnLimits } from "../reading-limits";
 import type { Entry, Spec } from "./schema";
+import { summary } from "./summary";
 
 /** The figure in its verdict's hue beside its limits; without a record, the limits alone. */
 export function RecordView({ spec, record, readings, rule }: RecordViewProps<Spec, Entry>) {
@@ -12,7 +13,7 @@ export function RecordView({ spec, record, readings, rule }: RecordViewProps<Spe
   return (
     <div className="flex flex-wrap items-center gap-x-4 gap-y-1">
       {reading ? (
-        <VerdictFigure verdict={reading.verdict}>{figure(reading.value, reading.unit)}</VerdictFigure>
+        <VerdictFigure verdict={reading.verdict}>{summary(spec, { typed: reading.typed })}</VerdictFigure>
       ) : (
         record && <span className="mono">{record.typed}</span>
       )}
