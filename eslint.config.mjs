@@ -46,6 +46,14 @@ const plainNames = {
 };
 const noViews = { group: ["@/components/*"], message: "Only a check kind carries its views (lib/check-kinds)." };
 
+/** Components take what use cases and loaders answer (types), never the use cases and loaders themselves. */
+const noUseCases = {
+  regex:
+    "^@/(db/|lib/[^/]+/(add|archive|change|create|delete|discard|edit|find|grant|insert|issue|lift|load|move|open|place|purge|receive|record|release|remove|reopen|reorder|restore|save|send|start|update|void|withdraw|write)-)",
+  allowTypeImports: true,
+  message: "Components take data and actions as props.",
+};
+
 const config = [
   {
     ignores: [
@@ -66,7 +74,6 @@ const config = [
     settings: { "import/resolver": { typescript: { project: "./tsconfig.json" } } },
     rules: {
       "import/no-restricted-paths": ["error", { zones }],
-      "import/no-cycle": ["error", { ignoreExternal: true }],
       "no-restricted-imports": ["error", { patterns: [plainNames] }],
     },
   },
@@ -79,6 +86,11 @@ const config = [
       "@typescript-eslint/consistent-type-imports": ["error", { fixStyle: "inline-type-imports" }],
       eqeqeq: "error",
     },
+  },
+  { files: ["tests/**/*.{ts,tsx}"], rules: { "react-hooks/rules-of-hooks": "off" } },
+  {
+    files: ["components/**/*.{ts,tsx}"],
+    rules: { "@typescript-eslint/no-restricted-imports": ["error", { patterns: [noUseCases] }] },
   },
   {
     files: ["lib/**/*.{ts,tsx}"],

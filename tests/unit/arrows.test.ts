@@ -30,6 +30,13 @@ describe("the arrows of the architecture", () => {
   });
 
   it.each([
+    ["components/rack/Example.tsx", 'import { loadRack } from "@/lib/rack/load-rack"; loadRack();'],
+    ["components/rack/Example.tsx", 'import { units } from "@/db/schema/boards"; console.log(units);'],
+  ])("%s may take types, but not %s", async (file, code) => {
+    expect(await rulesBroken(file, code)).toContain("@typescript-eslint/no-restricted-imports");
+  });
+
+  it.each([
     ["components/rack/Example.tsx", 'import "@/lib/calc/units";'],
     ["db/queries/example.ts", 'import "@/lib/env";'],
     ["lib/check-kinds/reading/Example.tsx", 'import "@/components/ui/Button";'],
