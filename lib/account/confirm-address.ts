@@ -35,7 +35,7 @@ export async function confirmAddress(input: ConfirmInput, call: Call): Promise<A
     if (!spent) return { ok: false, error: LINK_REFUSALS.used };
     await tx
       .update(users)
-      .set({ emailVerified: sql`now()` })
+      .set({ emailVerified: sql`now()`, mailBouncedAt: null })
       .where(eq(users.id, spent.userId));
     await spendAllAccountTokens(tx, "confirm-address", spent.userId);
     return ok({ email: link.email });

@@ -25,7 +25,7 @@ export async function resetPassword(input: ResetInput): Promise<Answer<{ email: 
     if (weakness) reject("invalid", "The password needs another look.", { fields: { password: weakness } });
     await tx
       .update(users)
-      .set({ passwordHash, emailVerified: user.emailVerified ?? sql`now()` })
+      .set({ passwordHash, emailVerified: user.emailVerified ?? sql`now()`, mailBouncedAt: null })
       .where(eq(users.id, user.id));
     await spendAllAccountTokens(tx, "reset-password", user.id);
     await spendAllAccountTokens(tx, "confirm-address", user.id);

@@ -38,5 +38,7 @@ export async function sendByResend(message: Message, options: SendOptions): Prom
   if (error.name === SENT_BEFORE) return { ok: true, id: options.idempotencyKey };
   const status = error.statusCode ?? 500;
   const retry = RETRY_NAMES.has(error.name) || status >= 500 || status === 429 || status === 408;
-  return { ok: false, retry, bounced: status === 422, message: error.message };
+  // A 422 that names another field than the recipient is a mistake of ours and says nothing of the address.
+  const bounced = status === 422 && /`to`/.test(error.message);
+  return { ok: false, retry, bounced, message: error.message };
 }
