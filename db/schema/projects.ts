@@ -103,9 +103,12 @@ export const digestDeliveries = pgTable(
       .notNull()
       .references(() => projects.id, { onDelete: "cascade" }),
     dueAt: instant("due_at").notNull(),
-    /** Deliveries sent in one request share a batch, which is the idempotency key towards the mail service. */
-    batchId: uuid("batch_id"),
+    /** What it tells of: from the end of the person's last digest to when this one was claimed. */
+    since: instant("since").notNull(),
+    until: instant("until").notNull(),
     state: text("state").$type<DeliveryState>().notNull().default("claimed"),
+    /** While claimed: not to be tried before. A worker that sends it moves this ahead, so that no other does meanwhile. */
+    nextTryAt: instant("next_try_at").notNull().defaultNow(),
     tries: smallint("tries").notNull().default(0),
     lastError: text("last_error"),
     sentAt: instant("sent_at"),
@@ -114,5 +117,8 @@ export const digestDeliveries = pgTable(
   (table) => [
     unique("digest_deliveries_once").on(table.subscriptionId, table.dueAt),
     index("digest_deliveries_open").on(table.projectId, table.state),
+    index("digest_deliveries_waiting")
+      .on(table.nextTryAt)
+      .where(sql`state = 'claimed'`),
   ],
 );
