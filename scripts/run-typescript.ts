@@ -8,8 +8,8 @@ export const typescript = (file: string) => ["--import", "tsx", join(root, file)
 
 export const nextCommand = join(root, "node_modules/next/dist/bin/next");
 
-/** Runs a script of the project with the services' environment; throws when it fails. */
+/** Runs a script of the project with the services' environment; throws, with what it printed, when it fails. */
 export async function runScript(file: string, env: Record<string, string>): Promise<void> {
-  const ran = await runToEnd(process.execPath, typescript(file), { cwd: root, env, show: true });
-  if (ran.code !== 0) throw new Error(`${file} failed (see above).`);
+  const ran = await runToEnd(process.execPath, typescript(file), { cwd: root, env });
+  if (ran.code !== 0) throw new Error(`${file} failed:\n${ran.output}`);
 }

@@ -37,7 +37,7 @@ export function vitestStage(name: string, env: () => Record<string, string> = ()
   return {
     name,
     async run(filters) {
-      const folder = mkdtempSync(join(tmpdir(), "boardwake-report-"));
+      const folder = mkdtempSync(join(tmpdir(), "boardwake-test-report-"));
       const report = join(folder, "report.json");
       const reporters = ["--reporter=default", "--reporter=json", `--outputFile.json=${report}`];
       const args = [
