@@ -1,0 +1,74 @@
+import type { Permission } from "@/lib/access/permissions";
+import type { Place } from "./place";
+
+export type PageRow = {
+  permission: Permission | "public" | "own";
+  path: (place: Place) => string;
+  /** Where somebody who is signed in is sent on, when the page has nothing to say to them. */
+  onward?: (place: Place) => string;
+};
+
+const of = (path: string) => (place: Place) => `/projects/${place.slug}${path}`;
+const signedInGoOn = { onward: () => "/projects" };
+
+/** Every page of the program, by its file. */
+export const pages: Record<string, PageRow> = {
+  "app/(public)/page.tsx": { permission: "public", path: () => "/" },
+  "app/(public)/safety/page.tsx": { permission: "public", path: () => "/safety" },
+
+  "app/(account)/(entry)/check-email/page.tsx": { permission: "public", path: () => "/check-email" },
+  "app/(account)/(entry)/confirm/[token]/page.tsx": { permission: "public", path: () => `/confirm/${"c".repeat(43)}` },
+  "app/(account)/(entry)/forgot/page.tsx": { permission: "public", path: () => "/forgot" },
+  "app/(account)/(entry)/invitation/[token]/page.tsx": {
+    permission: "public",
+    path: ({ invitation }) => `/invitation/${invitation}`,
+  },
+  "app/(account)/(entry)/reset/[token]/page.tsx": { permission: "public", path: () => `/reset/${"r".repeat(43)}` },
+  "app/(account)/(entry)/sign-in/link/page.tsx": { permission: "public", path: () => "/sign-in/link" },
+  "app/(account)/(entry)/sign-in/page.tsx": { permission: "public", path: () => "/sign-in", ...signedInGoOn },
+  "app/(account)/(entry)/sign-up/page.tsx": { permission: "public", path: () => "/sign-up", ...signedInGoOn },
+  "app/(account)/settings/page.tsx": { permission: "own", path: () => "/settings" },
+  "app/(account)/settings/digest/page.tsx": { permission: "own", path: () => "/settings/digest" },
+  "app/(account)/settings/instruments/page.tsx": { permission: "own", path: () => "/settings/instruments" },
+  "app/(account)/settings/password/page.tsx": { permission: "own", path: () => "/settings/password" },
+
+  "app/(workshop)/projects/(mine)/page.tsx": { permission: "own", path: () => "/projects" },
+  "app/(workshop)/projects/(mine)/new/page.tsx": { permission: "own", path: () => "/projects/new" },
+  "app/(workshop)/projects/[project]/page.tsx": {
+    permission: "project.see",
+    path: of(""),
+    onward: of("/rack"),
+  },
+  "app/(workshop)/projects/[project]/rack/page.tsx": { permission: "project.see", path: of("/rack") },
+  "app/(workshop)/projects/[project]/boards/page.tsx": { permission: "project.see", path: of("/boards") },
+  "app/(workshop)/projects/[project]/boards/[board]/page.tsx": { permission: "project.see", path: of("/boards/TIM") },
+  "app/(workshop)/projects/[project]/boards/[board]/procedure/page.tsx": {
+    permission: "project.see",
+    path: of("/boards/TIM/procedure"),
+  },
+  "app/(workshop)/projects/[project]/boards/[board]/procedure/[number]/page.tsx": {
+    permission: "project.see",
+    path: of("/boards/TIM/procedure/1"),
+  },
+  "app/(workshop)/projects/[project]/units/[unit]/page.tsx": { permission: "project.see", path: of("/units/TIM-01") },
+  "app/(workshop)/projects/[project]/units/[unit]/print/page.tsx": {
+    permission: "project.see",
+    path: of("/units/TIM-01/print"),
+  },
+  "app/(workshop)/projects/[project]/bench/page.tsx": { permission: "project.see", path: of("/bench") },
+  "app/(bench)/projects/[project]/bench/[unit]/page.tsx": { permission: "project.see", path: of("/bench/TIM-01") },
+  "app/(workshop)/projects/[project]/captures/page.tsx": { permission: "project.see", path: of("/captures") },
+  "app/(workshop)/projects/[project]/log/page.tsx": { permission: "project.see", path: of("/log") },
+  "app/(workshop)/projects/[project]/log/new/page.tsx": { permission: "log.write", path: of("/log/new") },
+  "app/(workshop)/projects/[project]/log/[entry]/page.tsx": {
+    permission: "project.see",
+    path: (place) => of(`/log/${place.entry}`)(place),
+  },
+  "app/(workshop)/projects/[project]/log/[entry]/edit/page.tsx": {
+    permission: "log.write",
+    path: (place) => of(`/log/${place.entry}/edit`)(place),
+  },
+  "app/(workshop)/projects/[project]/people/page.tsx": { permission: "project.see", path: of("/people") },
+  "app/(workshop)/projects/[project]/search/page.tsx": { permission: "project.see", path: of("/search") },
+  "app/(workshop)/projects/[project]/settings/page.tsx": { permission: "project.archive", path: of("/settings") },
+};
