@@ -11,7 +11,7 @@ function sentence(parts: readonly (string | false)[]): string {
 
 export function SinceThen({ since, zone }: { since: SinceView; zone: string }) {
   const rest = sentence([
-    since.firstPasses > 0 && `${counted(since.firstPasses, "check", "checks")} passed for the first time`,
+    since.firstPasses > 0 && `${since.firstPasses} passed at the first attempt`,
     since.repeats > 0 && `${since.repeats} repeated`,
     since.failures > 0 && `${since.failures} did not conform`,
   ]);

@@ -6,9 +6,12 @@ export type PinReference = {
   pin: string;
 };
 
+/** A reference designator, then the pin: row letter a … e of a two-part connector and position, or a plain number. */
+const PIN = /^(?:((?![a-e]\d)[a-z]{1,3}\d{1,3})[\s.:/-]+)?(?:pin\s+)?([a-e]?\d{1,3})$/i;
+
 /** Reads "J1 a4", "J1-a4", "J1.A4" or plain "a4" as people write a pin; undefined when there is no pin in it. */
 export function parsePin(text: string): PinReference | undefined {
-  const found = /^(?:([A-Za-z]{1,3}\d{1,3})[\s.:/-]+)?(?:pin\s+)?([A-Za-z]?\d{1,3})$/.exec(text.trim());
+  const found = PIN.exec(text.trim());
   const pin = found?.[2];
   return pin === undefined ? undefined : { connector: found?.[1]?.toUpperCase(), pin: pin.toLowerCase() };
 }
