@@ -21,7 +21,7 @@ export async function WorkshopHeader({ crumbs, search, nav }: Props) {
       {...(crumbs ? { crumbs } : {})}
       search={search}
       nav={nav}
-      theme={<SavedThemeSwitch theme={theme} />}
+      theme={<SavedThemeSwitch key={theme} theme={theme} />}
       account={
         viewer ? (
           <OwnMenu name={viewer.name} email={viewer.email} signOut={signOut} />

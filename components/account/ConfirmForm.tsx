@@ -36,7 +36,7 @@ export function ConfirmForm({ token, email, confirm }: Props) {
         autoComplete="current-password"
         description={
           <>
-            The one you chose when you signed up. Not there any more?{" "}
+            The one you chose when you signed up. Forgotten it?{" "}
             <Link className="link" href="/forgot">
               Set a new one
             </Link>

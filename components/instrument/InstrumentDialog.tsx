@@ -8,7 +8,8 @@ import { Dialog } from "@/components/ui/Dialog";
 import { FormSelect, FormTextArea, FormTextField } from "@/components/ui/form/bound-fields";
 import { Form } from "@/components/ui/form/Form";
 import { toast } from "@/components/ui/toast-store";
-import { EMPTY_RANGE, INSTRUMENT_KINDS, saveInstrumentInput, type SaveInstrumentTyped } from "@/lib/instrument/schema";
+import { EMPTY_RANGE } from "@/lib/instrument/range-schema";
+import { INSTRUMENT_KINDS, saveInstrumentInput, type SaveInstrumentTyped } from "@/lib/instrument/schema";
 import { KIND_WORDS, type InstrumentLine, type Save } from "./instrument-line";
 import { RangeFields } from "./RangeFields";
 
@@ -62,7 +63,7 @@ function InstrumentForm({ instrument, save, close }: { instrument?: InstrumentLi
         router.refresh();
       }}
       submitLabel="Save the instrument"
-      actions={<Button onPress={close}>Leave it as it was</Button>}
+      actions={<Button onPress={close}>Close without saving</Button>}
     >
       <div className="grid gap-4 sm:grid-cols-[1fr_12rem]">
         <FormTextField

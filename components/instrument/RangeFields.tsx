@@ -3,8 +3,8 @@
 import { useFieldArray, useFormContext } from "react-hook-form";
 import { Button } from "@/components/ui/Button";
 import { FormQuantityField, FormSelect } from "@/components/ui/form/bound-fields";
-import { IconButton } from "@/components/ui/IconButton";
-import { EMPTY_RANGE, MAX_RANGES, RANGE_UNITS, type SaveInstrumentTyped } from "@/lib/instrument/schema";
+import { EMPTY_RANGE, RANGE_UNITS } from "@/lib/instrument/range-schema";
+import { MAX_RANGES, type SaveInstrumentTyped } from "@/lib/instrument/schema";
 
 const UNIT_OPTIONS = RANGE_UNITS.map(({ unit, label }) => ({ id: unit, label }));
 
@@ -23,7 +23,7 @@ export function RangeFields() {
         {fields.map((field, index) => (
           <li
             key={field.id}
-            className="grid grid-cols-2 items-start gap-x-3 gap-y-2.5 border-t border-rule py-3 sm:grid-cols-[minmax(8rem,1.2fr)_repeat(5,minmax(0,1fr))_2.5rem]"
+            className="grid grid-cols-2 items-start gap-x-3 gap-y-2.5 border-t border-rule py-3 sm:grid-cols-[minmax(8rem,1.2fr)_repeat(5,minmax(0,1fr))_5rem]"
           >
             <FormSelect name={`ranges.${index}.unit`} label="Measures" options={UNIT_OPTIONS} />
             <FormQuantityField name={`ranges.${index}.fullScale`} label="Full scale" placeholder="20 V" />
@@ -31,12 +31,15 @@ export function RangeFields() {
             <FormQuantityField name={`ranges.${index}.percentOfReading`} label="% of reading" placeholder="0.5" />
             <FormQuantityField name={`ranges.${index}.counts`} label="Counts" placeholder="2" />
             <FormQuantityField name={`ranges.${index}.percentOfRange`} label="% of range" placeholder="0" />
-            <IconButton
-              icon="close"
-              label={`Remove range ${index + 1}`}
+            <Button
+              size="sm"
+              kind="quiet"
+              aria-label={`Remove range ${index + 1}`}
               onPress={() => remove(index)}
-              className="self-end"
-            />
+              className="col-span-2 justify-self-end sm:col-span-1 sm:mt-[1.9rem]"
+            >
+              Remove
+            </Button>
           </li>
         ))}
       </ol>

@@ -1,4 +1,5 @@
-import type { SaveInstrumentTyped, TypedRange } from "@/lib/instrument/schema";
+import type { TypedRange } from "@/lib/instrument/range-schema";
+import type { SaveInstrumentTyped } from "@/lib/instrument/schema";
 import type { Reply } from "@/components/ui/form/reply";
 import type { StatedRange } from "./worked-example";
 

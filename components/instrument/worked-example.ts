@@ -38,7 +38,8 @@ export function workedExample(range: StatedRange): WorkedExample | undefined {
     uncertainty: formatQuantity({ value: judged.expandedUncertainty ?? 0, unit }, { significant: 2 }),
     limits: `${write(lower)} … ${write(upper)}`,
     acceptance: `${write(lower + judged.guardBand)} … ${write(upper - judged.guardBand)}`,
-    sentences: judged.sentences,
+    // The rest of what a judgement says stands in the text around the figures.
+    sentences: judged.tooCoarse ? judged.sentences.slice(0, 1) : [],
   };
 }
 

@@ -9,6 +9,7 @@ import { signInInput } from "@/lib/account/schema";
 import { sendSignInLink } from "@/lib/account/send-sign-in-link";
 import type { Refusal } from "@/lib/actions/answer";
 import { env } from "@/lib/env";
+import { showChosenTheme } from "@/lib/account/show-chosen-theme";
 import { callFrom } from "@/lib/http/call";
 import { log } from "@/lib/http/log";
 import { sessionAdapter } from "./adapter";
@@ -61,6 +62,7 @@ export function authConfig(): NextAuthConfig {
         return target.origin === new URL(env().APP_URL).origin ? target.toString() : env().APP_URL;
       },
     },
+    events: { signIn: ({ user }) => showChosenTheme(user.id) },
     jwt: {
       encode: (params) =>
         params.token?.opensSession && params.token.sub ? openSession(params.token.sub) : encode(params),
@@ -78,5 +80,6 @@ async function personWithPassword(raw: unknown, request: Request) {
 
 /** A refused sign-in and a link that was used up are answers, not failures. */
 function logUnlessExpected(error: Error): void {
-  if (!(error instanceof SignInRefused) && error.name !== "Verification") log().warn({ err: error }, "the session library reports an error");
+  if (!(error instanceof SignInRefused) && error.name !== "Verification")
+    log().warn({ err: error }, "the session library reports an error");
 }

@@ -3,7 +3,7 @@ import { listInstruments } from "@/db/queries/instruments";
 import type { InstrumentKind, InstrumentRange } from "@/db/schema/people";
 import type { OwnScope } from "@/lib/access/scope";
 import { formatQuantity, isUnit } from "@/lib/calc/units";
-import type { TypedRange } from "./schema";
+import type { TypedRange } from "./range-schema";
 
 export type InstrumentLine = {
   id: string;

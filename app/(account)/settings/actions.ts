@@ -1,12 +1,9 @@
 "use server";
 
-import { cookies } from "next/headers";
-import { THEME_COOKIE } from "@/components/ui/theme";
 import { profileInput } from "@/lib/account/schema";
+import { keepTheme } from "@/lib/account/theme-cookie";
 import { updateProfile } from "@/lib/account/update-profile";
 import { defineAction } from "@/lib/actions/define-action";
-
-const A_YEAR = 365 * 24 * 3600;
 
 /** The cookie goes with it, so that the next page has its colours from the first byte. */
 export const saveProfile = defineAction({
@@ -15,7 +12,7 @@ export const saveProfile = defineAction({
   input: profileInput,
   run: async (scope, input) => {
     const done = await updateProfile(scope, input);
-    if (done.ok) (await cookies()).set(THEME_COOKIE, input.theme, { path: "/", maxAge: A_YEAR, sameSite: "lax" });
+    if (done.ok) await keepTheme(input.theme);
     return done;
   },
 });

@@ -1,7 +1,8 @@
 import { randomUUID } from "node:crypto";
 import { describe, expect, it } from "vitest";
 import { workedExample } from "@/components/instrument/worked-example";
-import { EMPTY_RANGE, MAX_RANGES, saveInstrumentInput, type TypedRange } from "@/lib/instrument/schema";
+import { EMPTY_RANGE, type TypedRange } from "@/lib/instrument/range-schema";
+import { MAX_RANGES, saveInstrumentInput } from "@/lib/instrument/schema";
 
 const METER: TypedRange = {
   unit: "V",
