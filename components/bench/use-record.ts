@@ -2,6 +2,7 @@ import { useCallback, useMemo, useRef, useState } from "react";
 import type { Judged, JudgeContext } from "@/lib/check-kinds/kind";
 import type { BenchProps } from "./bench-props";
 import { keepDraft } from "./draft-store";
+import { foresee } from "./foresee";
 import { nextFree } from "./next-check";
 import { clearFiles } from "./queue/file-shelf";
 import type { NewAttempt } from "./queue/held-attempt";
@@ -94,10 +95,8 @@ export function useRecord(props: BenchProps, bench: Bench) {
       files.map((file) => file.uploadId),
     ).catch(() => undefined);
     slip.offer(attempt);
-    const next = nextFree(
-      bench.checks.map((check) => (check.id === checkId ? { ...check, state: "passed" as const } : check)),
-      checkId,
-    );
+    // With this one done: a hold point that is passed frees what waited for it, network or not.
+    const next = nextFree(foresee(bench.checks, [{ checkId, verdict: verdict.verdict }]), checkId);
     if (next) bench.open(next.id);
     return undefined;
   }
