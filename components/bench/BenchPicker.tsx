@@ -6,7 +6,7 @@ import { StateGlyph } from "@/components/ui/glyphs/StateGlyph";
 import { Panel } from "@/components/ui/Panel";
 import type { NextCheck } from "@/lib/check/next-checks";
 import type { BenchUnit, BenchView } from "@/lib/traveler/load-bench";
-import { STAGES, stageName } from "./stage-name";
+import { STAGES, stageName } from "@/lib/procedure/stages";
 
 type Props = { project: string; bench: BenchView };
 
@@ -85,9 +85,9 @@ function NextLine({ project, check, isFirst }: { project: string; check: NextChe
 }
 
 function UnitLine({ project, unit }: { project: string; unit: BenchUnit }) {
-  const groups = STAGES.flatMap((stage) => {
+  const groups = STAGES.flatMap(({ id: stage, short }) => {
     const states = unit.checks.filter((check) => check.stage === stage).map((check) => check.state);
-    return states.length > 0 ? [{ name: stageName(stage), states }] : [];
+    return states.length > 0 ? [{ name: short, states }] : [];
   });
   return (
     <li className="border-rule border-t">

@@ -5,7 +5,7 @@ import { HeldLine } from "./HeldLine";
 import { nextHold } from "./next-check";
 import type { QueueState } from "./queue/attempt-queue";
 import { RunOfGlyphs } from "./RunOfGlyphs";
-import { stageName } from "./stage-name";
+import { stageName } from "@/lib/procedure/stages";
 
 type Props = {
   unitHref: string;

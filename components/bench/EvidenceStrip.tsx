@@ -1,4 +1,3 @@
-import { useEffect, useState } from "react";
 import type { AttachmentKind } from "@/db/schema/evidence";
 import type { HeldFile } from "./queue/held-attempt";
 import { Icon } from "@/components/ui/Icon";
@@ -47,21 +46,20 @@ export function EvidenceStrip({ files, smallHref, onRemove }: Props) {
 }
 
 function Thumbnail({ file, smallHref }: { file: HeldFile; smallHref: Props["smallHref"] }) {
-  const [address, setAddress] = useState<string>();
-  const blob = file.kind === "scope-data" ? null : file.file;
-  useEffect(() => {
-    if (!blob) return;
-    const made = URL.createObjectURL(blob);
-    setAddress(made);
-    return () => URL.revokeObjectURL(made);
-  }, [blob]);
-  const shown = blob
-    ? address
-    : file.attachmentId && file.kind !== "scope-data"
-      ? smallHref(file.attachmentId)
-      : undefined;
-  if (!shown) return <Icon name="file" size={28} className="m-3.5" />;
-  // A local or private picture; the image optimiser must not fetch it.
+  const picture = "size-14 rounded object-cover";
+  if (file.kind === "scope-data") return <Icon name="file" size={28} className="m-3.5" />;
+  // Local or private pictures; the image optimiser must not fetch them.
   // eslint-disable-next-line @next/next/no-img-element
-  return <img src={shown} alt="" className="size-14 rounded object-cover" />;
+  if (file.file) return <img ref={(node) => showBlob(node, file.file)} alt="" className={picture} />;
+  if (!file.attachmentId) return <Icon name="file" size={28} className="m-3.5" />;
+  // eslint-disable-next-line @next/next/no-img-element
+  return <img src={smallHref(file.attachmentId)} alt="" className={picture} />;
+}
+
+/** Shows bytes that lie on the device; answers how to let go of them. */
+function showBlob(node: HTMLImageElement | null, blob: Blob | null) {
+  if (!node || !blob) return undefined;
+  const address = URL.createObjectURL(blob);
+  node.src = address;
+  return () => URL.revokeObjectURL(address);
 }

@@ -2,7 +2,7 @@ import clsx from "clsx";
 import { StateGlyph } from "@/components/ui/glyphs/StateGlyph";
 import type { CheckView } from "@/lib/traveler/traveler-view";
 import { BottomSheet } from "./BottomSheet";
-import { STAGES, stageName } from "./stage-name";
+import { STAGES, stageName } from "@/lib/procedure/stages";
 
 type Props = {
   checks: readonly CheckView[];
@@ -15,7 +15,7 @@ type Props = {
 export function OverviewSheet({ checks, openId, onOpen, onClose }: Props) {
   return (
     <BottomSheet title="All checks" onClose={onClose}>
-      {STAGES.map((stage) => {
+      {STAGES.map(({ id: stage }) => {
         const own = checks.filter((check) => check.stage === stage);
         if (own.length === 0) return null;
         const held = own.filter(({ state }) => state === "passed" || state === "conceded").length;

@@ -1,6 +1,6 @@
 import { MiniGlyph } from "@/components/ui/glyphs/MiniGlyph";
 import type { CheckView } from "@/lib/traveler/traveler-view";
-import { STAGES } from "./stage-name";
+import { STAGES } from "@/lib/procedure/stages";
 
 type Props = { checks: readonly CheckView[]; index: number; onOverview: () => void };
 
@@ -16,7 +16,7 @@ export function RunOfGlyphs({ checks, index, onOverview }: Props) {
       aria-label={`${held} of ${checks.length} checks hold. Show all checks`}
       className="hover:bg-copper-ground -mx-1 flex min-h-11 w-[calc(100%+0.5rem)] flex-wrap items-center gap-x-3 gap-y-2 rounded px-1 py-1.5"
     >
-      {STAGES.map((stage) => {
+      {STAGES.map(({ id: stage }) => {
         const own = checks.filter((check) => check.stage === stage);
         if (own.length === 0) return null;
         return (

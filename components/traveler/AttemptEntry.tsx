@@ -68,7 +68,7 @@ function Late({ attempt, zone }: { attempt: AttemptView; zone: string }) {
 }
 
 function VoidButton({ attempt, frame }: { attempt: AttemptView; frame: TravelerFrame }) {
-  const own = useMayStillVoid(attempt.by.id === frame.viewerId ? attempt.recordedAt : undefined);
+  const own = useMayStillVoid(attempt.by.id === frame.viewerId ? attempt.recordedAt : undefined, frame.voidWindowMs);
   if (!frame.may.voidAny && !(frame.may.voidOwn && own)) return null;
   return (
     <ReasonDialog

@@ -1,4 +1,4 @@
-import { STAGES, stageName } from "@/components/bench/stage-name";
+import { STAGES, stageName } from "@/lib/procedure/stages";
 import { ButtonLink } from "@/components/ui/ButtonLink";
 import { writeDate } from "@/components/ui/DateTime";
 import type { QrCode } from "@/lib/traveler/qr-codes";
@@ -54,7 +54,7 @@ export function BenchSheet({ project, traveler, zone, rule, back, codes, printed
               </td>
             </tr>
           </thead>
-          {STAGES.map((stage) => {
+          {STAGES.map(({ id: stage }) => {
             const own = traveler.checks.filter((check) => check.stage === stage);
             if (own.length === 0) return null;
             return (

@@ -1,5 +1,5 @@
 import clsx from "clsx";
-import { stageName } from "@/components/bench/stage-name";
+import { stageName } from "@/lib/procedure/stages";
 import type { Stage } from "@/db/schema/procedures";
 
 export type Filter = "all" | "attention" | Stage;

@@ -2,7 +2,7 @@
 
 import { useRouter } from "next/navigation";
 import { useRef, useState } from "react";
-import { stageName } from "@/components/bench/stage-name";
+import { stageName } from "@/lib/procedure/stages";
 import { Button } from "@/components/ui/Button";
 import { Dialog } from "@/components/ui/Dialog";
 import { DialogActions } from "@/components/ui/DialogActions";

@@ -1,7 +1,7 @@
 "use client";
 
 import { useState } from "react";
-import { STAGES, stageName } from "@/components/bench/stage-name";
+import { STAGES, stageName } from "@/lib/procedure/stages";
 import type { Stage } from "@/db/schema/procedures";
 import type { CheckView, TravelerView } from "@/lib/traveler/traveler-view";
 import { CheckDetail } from "./CheckDetail";
@@ -30,7 +30,7 @@ export function TravelerPlace({ traveler, frame, openCheck }: Props) {
     openId,
     open,
   );
-  const present = STAGES.filter((stage) => traveler.checks.some((check) => check.stage === stage));
+  const present = STAGES.map(({ id }) => id).filter((stage) => traveler.checks.some((check) => check.stage === stage));
   return (
     <div className="grid items-start gap-6 lg:grid-cols-[minmax(0,1fr)_24rem]">
       <div className="min-w-0">

@@ -41,6 +41,8 @@ export type TravelerFrame = {
   viewerId: string;
   zone: string;
   rule: "simple" | "guarded";
+  /** How long one may void an attempt of one's own. */
+  voidWindowMs: number;
   may: TravelerMay;
   acts: TravelerActs;
 };

@@ -1,12 +1,11 @@
 import { useEffect, useState } from "react";
-import { VOID_WINDOW_MS } from "@/lib/attempt/void-window";
 
 /** Whether one's own attempt is young enough to void; false until known in the browser, and again when time is up. */
-export function useMayStillVoid(recordedAt: string | undefined): boolean {
+export function useMayStillVoid(recordedAt: string | undefined, windowMs: number): boolean {
   const [may, setMay] = useState(false);
   useEffect(() => {
     if (!recordedAt) return;
-    const left = Date.parse(recordedAt) + VOID_WINDOW_MS - Date.now();
+    const left = Date.parse(recordedAt) + windowMs - Date.now();
     if (left <= 0) return;
     const begin = setTimeout(() => setMay(true));
     const end = setTimeout(() => setMay(false), left);
@@ -14,6 +13,6 @@ export function useMayStillVoid(recordedAt: string | undefined): boolean {
       clearTimeout(begin);
       clearTimeout(end);
     };
-  }, [recordedAt]);
+  }, [recordedAt, windowMs]);
   return may;
 }

@@ -1,6 +1,5 @@
 import { formatQuantity, isUnit } from "@/lib/calc/units";
 import type { DecisionRule } from "@/db/schema/projects";
-import type { JudgedReading } from "./kind";
 
 type Drawn = {
   lower: number | undefined;

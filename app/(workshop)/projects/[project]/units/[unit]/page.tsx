@@ -3,6 +3,7 @@ import { notFound } from "next/navigation";
 import { UnitPlace } from "@/components/traveler/UnitPlace";
 import { can } from "@/lib/access/permissions";
 import { definePage } from "@/lib/actions/define-page";
+import { VOID_WINDOW_MS } from "@/lib/attempt/void-window";
 import { loadMove } from "@/lib/traveler/load-move";
 import { loadTraveler } from "@/lib/traveler/load-traveler";
 import { captionEvidence, removeEvidence, restoreEvidence } from "../../evidence/actions";
@@ -39,6 +40,7 @@ export default definePage({
           viewerId: scope.viewer.userId,
           zone: scope.viewer.timeZone,
           rule: scope.decisionRule,
+          voidWindowMs: VOID_WINDOW_MS,
           may: {
             record: allows("attempt.record"),
             attach: allows("evidence.attach"),
