@@ -14,11 +14,21 @@ export function WhatItMeans({ ranges }: { ranges: readonly StatedRange[] }) {
         <Figure>{example.uncertainty}</Figure> (k = 2).
       </p>
       <p className="mt-1">
-        Limits of ± 5 % are <Figure>{example.limits}</Figure>. Guarded, a reading conforms from{" "}
-        <Figure>{example.acceptance}</Figure>; nearer to a limit it conforms inside the guard band and is worth
-        repeating with a better instrument.
+        Limits of ± 5 % are <Figure>{example.limits}</Figure>.{" "}
+        {example.acceptance ? (
+          <>
+            Guarded, a reading conforms from <Figure>{example.acceptance}</Figure>; nearer to a limit it conforms inside
+            the guard band and is worth repeating with a better instrument.
+          </>
+        ) : (
+          "Guarded, no reading can conform: the guard bands meet. Take a finer range or a better instrument."
+        )}
       </p>
-      {example.sentences.length > 0 && <p className="mt-1 text-ink-soft">{example.sentences.join(" ")}</p>}
+      {example.isCoarse && example.acceptance && (
+        <p className="mt-1 text-ink-soft">
+          That is coarse for such limits: the uncertainty is more than a quarter of the tolerance.
+        </p>
+      )}
     </div>
   );
 }

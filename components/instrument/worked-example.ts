@@ -15,8 +15,10 @@ export type WorkedExample = {
   limitOfError: string;
   uncertainty: string;
   limits: string;
-  acceptance: string;
-  sentences: string[];
+  /** Absent when the uncertainty leaves nothing between the guard bands. */
+  acceptance: string | undefined;
+  /** The uncertainty is more than a quarter of the tolerance. */
+  isCoarse: boolean;
 };
 
 /** What the range's accuracy means for one reading with limits of ± 5 %, as a judged check would say it. */
@@ -37,9 +39,11 @@ export function workedExample(range: StatedRange): WorkedExample | undefined {
     limitOfError: formatQuantity({ value: judged.maximumError ?? 0, unit }, { significant: 2 }),
     uncertainty: formatQuantity({ value: judged.expandedUncertainty ?? 0, unit }, { significant: 2 }),
     limits: `${write(lower)} … ${write(upper)}`,
-    acceptance: `${write(lower + judged.guardBand)} … ${write(upper - judged.guardBand)}`,
-    // The rest of what a judgement says stands in the text around the figures.
-    sentences: judged.tooCoarse ? judged.sentences.slice(0, 1) : [],
+    acceptance:
+      judged.guardBand * 2 < upper - lower
+        ? `${write(lower + judged.guardBand)} … ${write(upper - judged.guardBand)}`
+        : undefined,
+    isCoarse: judged.tooCoarse,
   };
 }
 

@@ -81,7 +81,13 @@ describe("the worked example", () => {
     // a = 0.025 V + 0.002 V = 27 mV; U = 2a/√3 = 31 mV
     expect(example?.limitOfError).toBe("27\u2009mV");
     expect(example?.uncertainty).toBe("31\u2009mV");
-    expect(example?.acceptance.replaceAll("\u2009", " ")).toBe("4.781 V … 5.219 V");
+    expect(example?.acceptance?.replaceAll("\u2009", " ")).toBe("4.781 V … 5.219 V");
+  });
+
+  it("says when the range is too coarse for limits of ± 5 %, and when no reading could conform", () => {
+    const scope = { unit: "V", fullScale: 8, resolution: 0.03, percentOfReading: 0, counts: 0, percentOfRange: 1 };
+    expect(workedExample(scope)).toMatchObject({ isCoarse: true, acceptance: expect.any(String) });
+    expect(workedExample({ ...scope, percentOfRange: 5 })).toMatchObject({ isCoarse: true, acceptance: undefined });
   });
 
   it("is absent for a unit that is none", () => {
