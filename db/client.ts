@@ -13,9 +13,28 @@ export function connect(url: string, poolSize = 10) {
     connect_timeout: 5,
     idle_timeout: 60,
     onnotice: () => undefined,
-    connection: { application_name: "boardwake", statement_timeout: 20_000 },
+    // Short queries only: compiling one takes longer than running it.
+    connection: { application_name: "boardwake", statement_timeout: 20_000, jit: "off" },
   });
-  return { client, db: drizzle(client) };
+  const begin = client.begin.bind(client);
+  client.begin = <T>(options: string | Work<T>, work?: Work<T>) => {
+    if (typeof options !== "string") return begin((sql) => options(keepPlans(sql)));
+    return begin(options, (sql) => work?.(keepPlans(sql)) as T);
+  };
+  return { client: keepPlans(client), db: drizzle(client) };
+}
+
+type Work<T> = (sql: postgres.TransactionSql) => T | Promise<T>;
+
+/**
+ * The query builder sends each statement unprepared: described and planned anew every time, which for the larger ones
+ * takes longer than running them. Here a connection plans each text once. `?prepare=false` in the connection string
+ * switches that off, for poolers that cannot do it.
+ */
+function keepPlans<Sql extends Pick<postgres.TransactionSql, "unsafe">>(sql: Sql): Sql {
+  const plain = sql.unsafe;
+  sql.unsafe = (query, parameters, options) => plain(query, parameters, { ...options, prepare: true });
+  return sql;
 }
 
 type Connection = ReturnType<typeof connect>;

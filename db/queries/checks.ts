@@ -4,7 +4,15 @@ import { units } from "@/db/schema/boards";
 import { instruments, users } from "@/db/schema/people";
 import { procedureChecks } from "@/db/schema/procedures";
 import { memberships } from "@/db/schema/projects";
-import { attemptVoids, attempts, checks, concessions, holdLifts, type Verdict } from "@/db/schema/travelers";
+import {
+  attemptVoids,
+  attempts,
+  checks,
+  concessions,
+  holdLifts,
+  type CheckState,
+  type Verdict,
+} from "@/db/schema/travelers";
 
 const checkColumns = {
   id: checks.id,
@@ -19,6 +27,9 @@ const checkColumns = {
   state: checks.state,
   lastAttemptId: checks.lastAttemptId,
   retiredAt: checks.retiredAt,
+  /** Whether another check waits for this one: then its state moves others. */
+  hasDependants: sql<boolean>`${checks.holdPoint} or exists (
+    select 1 from check_prerequisites edge where edge.needs_check_id = ${checks.id})`,
 };
 
 /** One check with its wording and its unit. */
@@ -50,10 +61,14 @@ export async function findOwnInstrument(db: Queryable, userId: string, instrumen
   return row;
 }
 
-export type EarlierAttempts = {
-  /** How many valid attempts there are. */
-  valid: number;
-  /** The newest attempt of somebody else that is not voided. */
+export type Standing = {
+  state: CheckState;
+  retired: boolean;
+  /** Whether an earlier hold point that is not lifted, or a prerequisite, does not hold. */
+  blocked: boolean;
+  /** Whether there is a valid attempt already. */
+  attempted: boolean;
+  /** The newest attempt of somebody else that is not voided, among the newest twenty. */
   other: {
     name: string | null;
     recordedAt: string;
@@ -65,20 +80,31 @@ export type EarlierAttempts = {
   } | null;
 };
 
-/** What had arrived on a check before. */
-export async function findEarlierAttempts(db: Queryable, checkId: string, userId: string): Promise<EarlierAttempts> {
-  const [row] = await db.execute<EarlierAttempts>(sql`
-    with valid as (
-      select a.* from attempts a
-      where a.check_id = ${checkId} and not exists (select 1 from attempt_voids v where v.attempt_id = a.id))
-    select (select count(*) from valid)::int as valid,
-      (select json_build_object('name', users.name, 'recordedAt', a.recorded_at, 'arrival', a.arrival, 'record', a.record,
-          'secondsAgo', extract(epoch from clock_timestamp() - a.recorded_at),
+/** How a check stands before an attempt is recorded on it; read it with the locks of its unit held. */
+export async function findStanding(db: Queryable, checkId: string, userId: string): Promise<Standing | undefined> {
+  const [row] = await db.execute<Standing>(sql`
+    with valid as materialized (
+      select a.id, a.user_id, a.recorded_at, a.arrival, a.record from attempts a
+      where a.check_id = ${checkId} and not exists (select 1 from attempt_voids v where v.attempt_id = a.id)
+      order by a.arrival desc limit 20)
+    select c.state, c.retired_at is not null as retired,
+      exists (
+        select 1 from checks h
+        where h.unit_id = c.unit_id and h.position < c.position and h.hold_point and h.retired_at is null
+          and h.state not in ('passed', 'conceded') and not exists (select 1 from hold_lifts where hold_lifts.check_id = h.id)
+      ) or exists (
+        select 1 from check_prerequisites edge join checks needed on needed.id = edge.needs_check_id
+        where edge.check_id = c.id and needed.retired_at is null and needed.state not in ('passed', 'conceded')
+      ) as blocked,
+      exists (select 1 from valid) as attempted,
+      (select json_build_object('name', users.name, 'recordedAt', valid.recorded_at, 'arrival', valid.arrival, 'record', valid.record,
+          'secondsAgo', extract(epoch from clock_timestamp() - valid.recorded_at),
           'readings', coalesce((select json_agg(json_build_object('label', r.label, 'typed', r.typed, 'value', r.value,
-            'unit', r.unit, 'verdict', r.verdict) order by r.position) from readings r where r.attempt_id = a.id), '[]'))
-        from valid a left join users on users.id = a.user_id
-        where a.user_id is distinct from ${userId} order by a.arrival desc limit 1) as other`);
-  return row ?? { valid: 0, other: null };
+            'unit', r.unit, 'verdict', r.verdict) order by r.position) from readings r where r.attempt_id = valid.id), '[]'))
+        from valid left join users on users.id = valid.user_id
+        where valid.user_id is distinct from ${userId} order by valid.arrival desc limit 1) as other
+    from checks c where c.id = ${checkId}`);
+  return row;
 }
 
 /** One attempt with its check and whether it was voided. */

@@ -39,6 +39,7 @@ async function findFreeEvidence(
         isNull(attachments.archivedAt),
       ),
     )
+    .orderBy(attachments.id)
     .for("update");
   const free = rows.filter((row) => row.checkId === null || row.checkId === input.checkId);
   if (free.length < input.attachmentIds.length) {

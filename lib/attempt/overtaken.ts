@@ -1,4 +1,4 @@
-import type { EarlierAttempts } from "@/db/queries/checks";
+import type { Standing } from "@/db/queries/checks";
 import type { CheckKind, JudgedReading } from "@/lib/check-kinds/kind";
 import type { RecordedAttempt } from "./recorded-attempt";
 
@@ -6,7 +6,7 @@ const AT_ONCE_S = 120;
 
 /** The attempt of somebody else that this one came on top of, if it came within two minutes or was not seen before. */
 export function overtaken(
-  { other }: EarlierAttempts,
+  { other }: Standing,
   seenArrival: number | undefined,
   kind: CheckKind,
   spec: unknown,

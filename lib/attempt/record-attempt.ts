@@ -1,17 +1,20 @@
-import { findEarlierAttempts } from "@/db/queries/checks";
+import type { Transaction } from "@/db/client";
+import { findStanding, type CheckRow } from "@/db/queries/checks";
 import type { ProjectScope } from "@/lib/access/scope";
 import { refuse, reject, type Answer } from "@/lib/actions/answer";
 import { checkKind } from "@/lib/check-kinds/list";
 import { rejectRetired } from "@/lib/check/lock-check";
-import { lockUnits } from "@/lib/check/lock-states";
+import { lockAffectedUnits, lockOneCheck, shareStructure } from "@/lib/check/lock-states";
 import { refreshStates } from "@/lib/check/refresh-states";
-import { nameBlockers } from "@/lib/check/state-reason";
+import { movesNoOther, settleCheck } from "@/lib/check/settle-check";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
 import { insertAttempt } from "./insert-attempt";
+import { judgeAttempt } from "./judge-attempt";
 import { loadRecording } from "./load-recording";
 import { overtaken } from "./overtaken";
 import type { RecordedAttempt } from "./recorded-attempt";
+import { rejectBlocked } from "./reject-blocked";
 import type { RecordAttemptInput } from "./schema";
 
 /**
@@ -24,54 +27,50 @@ export async function recordAttempt(scope: ProjectScope, input: RecordAttemptInp
     return refuse("signed-out", "This was recorded by somebody else on this device. It goes out when they sign in.");
   }
   return change({ writeId: input.id, userId: viewer.userId, action: "record-attempt" }, async (tx) => {
-    const { check, instrument, evidence } = await loadRecording(tx, scope, input);
+    await shareStructure(tx, projectId);
+    const recording = await loadRecording(tx, scope, input);
+    const { check } = recording;
     const kind = checkKind(check.kind);
-    const context = {
-      rule: scope.decisionRule,
-      instrumentRanges: instrument?.ranges ?? [],
-      evidence,
-      note: input.note,
-    };
-    const entry = kind.readEntry(input.record);
-    if (!entry.ok) return reject("invalid", entry.message, { fields: entry.fields });
-    const judged = kind.judge(check.spec, entry.value, context);
-    if (!judged.ok) return reject("invalid", judged.message, judged.fields ? { fields: judged.fields } : {});
+    const { entry, judged } = judgeAttempt(scope, input, recording);
 
-    await lockUnits(tx, projectId, [check.unitId]);
-    const earlier = await findEarlierAttempts(tx, check.id, viewer.userId);
-    const inserted = await insertAttempt(tx, scope, { input, check, instrument, entry: entry.value, judged });
-    const refreshed = await refreshStates(tx, { projectId, actorId: viewer.userId }, [check.unitId]);
-    const now = refreshed.get(check.id) ?? rejectRetired(check.title);
-    if (now.blockers.length > 0) {
-      const names = nameBlockers(now.blockers, check.serial);
-      return reject("blocked", `“${check.title}” waits for ${names}. Nothing was recorded.`, {
-        details: { blockers: now.blockers },
-      });
-    }
+    await (check.hasDependants ? lockAffectedUnits(tx, projectId, [check.unitId]) : lockOneCheck(tx, check));
+    const before = await findStanding(tx, check.id, viewer.userId);
+    if (!before || before.retired) return rejectRetired(check.title);
+    if (before.blocked) return rejectBlocked(tx, projectId, check);
 
-    const summary = kind.summary(check.spec, entry.value, judged.readings);
+    const summary = kind.summary(check.spec, entry, judged.readings);
+    const { verdict } = judged;
+    const inserted = await insertAttempt(tx, scope, { ...recording, input, entry, judged });
+    const now = movesNoOther(check, before.state, verdict)
+      ? await settleCheck(tx, projectId, check.id, { id: input.id, verdict })
+      : await refreshed(tx, scope, check);
     const subject = { projectId, actorId: viewer.userId, unitId: check.unitId, checkId: check.id, subjectId: input.id };
     await recordEvent(tx, subject, "attempt.recorded", {
       serial: check.serial,
       title: check.title,
-      verdict: judged.verdict,
+      verdict,
       reading: summary,
-      from: now.from,
+      from: before.state,
       to: now.state,
-      firstPass: earlier.valid === 0 && judged.verdict !== "does-not-conform",
+      firstPass: !before.attempted && verdict !== "does-not-conform",
     });
     return {
       attemptId: input.id,
       checkId: check.id,
       arrival: inserted.arrival,
       recordedAt: inserted.recordedAt.toISOString(),
-      verdict: judged.verdict,
+      verdict,
       summary,
       sentences: inserted.sentences,
-      from: now.from,
+      from: before.state,
       state: now.state,
       stateReason: now.reason,
-      overtook: overtaken(earlier, input.seenArrival, kind, check.spec),
+      overtook: overtaken(before, input.seenArrival, kind, check.spec),
     };
   });
+}
+
+async function refreshed(tx: Transaction, { projectId, viewer }: ProjectScope, check: CheckRow) {
+  const states = await refreshStates(tx, { projectId, actorId: viewer.userId }, [check.unitId]);
+  return states.get(check.id) ?? reject("not-found", "The check is gone. Nothing was recorded.");
 }

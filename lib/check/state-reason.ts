@@ -1,4 +1,4 @@
-import type { CheckState } from "@/db/schema/travelers";
+import type { CheckState, Verdict } from "@/db/schema/travelers";
 import type { Blocker, CheckHistory } from "./check-history";
 import type { Doubt } from "./find-doubt";
 
@@ -32,11 +32,16 @@ export function reasonFor(
     case "conceded":
       return `Accepted: ${check.concessions.find((concession) => concession.attemptId === check.last?.id)?.reason ?? ""}`;
     case "passed":
-      return check.last?.verdict === "guard-band"
-        ? "Conforms inside the guard band: repeat it with a better instrument if you can."
-        : "";
+      return check.last ? reasonForPass(check.last.verdict) : "";
     case "failed":
     case "untested":
       return "";
   }
+}
+
+/** The same for a check that passed, whatever else is known of it. */
+export function reasonForPass(verdict: Verdict): string {
+  return verdict === "guard-band"
+    ? "Conforms inside the guard band: repeat it with a better instrument if you can."
+    : "";
 }
