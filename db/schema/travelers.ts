@@ -1,4 +1,17 @@
-import { bigserial, boolean, doublePrecision, index, integer, jsonb, pgTable, primaryKey, text, unique, uuid } from "drizzle-orm/pg-core";
+import { sql } from "drizzle-orm";
+import {
+  bigserial,
+  boolean,
+  doublePrecision,
+  index,
+  integer,
+  jsonb,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { units } from "./boards";
 import { createdAt, id, instant } from "./columns";
 import { instruments, users, type InstrumentRange } from "./people";
@@ -71,7 +84,10 @@ export const checkPrerequisites = pgTable(
       .notNull()
       .references(() => checks.id, { onDelete: "cascade" }),
   },
-  (table) => [primaryKey({ columns: [table.checkId, table.needsCheckId] }), index("check_prerequisites_needs").on(table.needsCheckId)],
+  (table) => [
+    primaryKey({ columns: [table.checkId, table.needsCheckId] }),
+    index("check_prerequisites_needs").on(table.needsCheckId),
+  ],
 );
 
 /** One carrying-out of a check. Never updated, never deleted. The id is the client's own UUID. */
@@ -106,9 +122,20 @@ export const attempts = pgTable(
     note: text("note").notNull().default(""),
     instrumentId: uuid("instrument_id").references(() => instruments.id, { onDelete: "set null" }),
     /** Name and accuracy as they were at the time. */
-    instrumentSnapshot: jsonb("instrument_snapshot").$type<{ name: string; ranges: InstrumentRange[]; calibrationNote: string } | null>(),
+    instrumentSnapshot: jsonb("instrument_snapshot").$type<{
+      name: string;
+      ranges: InstrumentRange[];
+      calibrationNote: string;
+    } | null>(),
   },
-  (table) => [index("attempts_check").on(table.checkId, table.arrival), index("attempts_project_time").on(table.projectId, table.recordedAt)],
+  (table) => [
+    index("attempts_check").on(table.checkId, table.arrival),
+    /** Finds the newest failure of a check however many attempts it has. */
+    index("attempts_failing")
+      .on(table.checkId, table.arrival)
+      .where(sql`verdict = 'does-not-conform'`),
+    index("attempts_project_time").on(table.projectId, table.recordedAt),
+  ],
 );
 
 export const readings = pgTable(

@@ -1,0 +1,1 @@
+CREATE INDEX "attempts_failing" ON "attempts" USING btree ("check_id","arrival") WHERE verdict = 'does-not-conform';
