@@ -5,14 +5,14 @@ export const light = {
   raised: "#fffdf8",
   rule: "#d8cfbb",
   ink: "#1d211e",
-  inkSoft: "#555b52",
-  copper: "#9a4a17",
+  inkSoft: "#4f554c",
+  copper: "#94460f",
   onCopper: "#fffdf8",
-  passed: "#1d6a4f",
-  failed: "#b0241b",
-  reopened: "#6b3b9c",
-  doubtful: "#835a00",
-  conceded: "#1f5a88",
+  passed: "#1a6449",
+  failed: "#aa2018",
+  reopened: "#683a98",
+  doubtful: "#785100",
+  conceded: "#1c5684",
 } as const;
 
 export const TEXT_FONT = '"Atkinson Hyperlegible Next", "Segoe UI", Helvetica, Arial, sans-serif';
@@ -25,8 +25,14 @@ export const DARK_STYLE = `
   .bw-paper { background-color: #141210 !important; }
   .bw-sheet { background-color: #1c1916 !important; border-color: #38322a !important; }
   .bw-ink, .bw-ink a { color: #efe8d8 !important; }
-  .bw-soft, .bw-soft a { color: #b3aa98 !important; }
+  .bw-soft, .bw-soft a { color: #b8af9d !important; }
   .bw-copper, .bw-copper a { color: #eb9a5c !important; }
   .bw-button { background-color: #eb9a5c !important; color: #141210 !important; }
   .bw-rule { border-color: #38322a !important; }
+  .bw-raised { background-color: #25211c !important; border-color: #38322a !important; }
+  .bw-passed, .bw-passed a { color: #69c79b !important; }
+  .bw-failed, .bw-failed a { color: #ff8674 !important; }
+  .bw-reopened, .bw-reopened a { color: #c7a0f2 !important; }
+  .bw-doubtful, .bw-doubtful a { color: #e6b84a !important; }
+  .bw-conceded, .bw-conceded a { color: #7fbbe8 !important; }
 }`;

@@ -10,7 +10,12 @@ type Options = {
 };
 
 /** Enqueues in the given transaction: the job exists if and only if the change was committed. */
-export async function enqueue<Name extends JobName>(db: Queryable, name: Name, payload: JobPayload<Name>, options: Options = {}) {
+export async function enqueue<Name extends JobName>(
+  db: Queryable,
+  name: Name,
+  payload: JobPayload<Name>,
+  options: Options = {},
+) {
   await db.execute(sql`
     select graphile_worker.add_job(
       ${name}::text,
