@@ -4,6 +4,7 @@ import type { ReactNode } from "react";
 import type { Requirement } from "@/lib/access/permissions";
 import { currentViewer } from "@/lib/auth/current-viewer";
 import { authorise, type ScopeFor } from "./authorise";
+import { orDatabaseAway } from "./unexpected";
 
 type Params = Record<string, string>;
 type Search = Record<string, string | string[] | undefined>;
@@ -26,12 +27,13 @@ export function definePage<Need extends Requirement>(definition: Definition<Need
     const [params, search] = await Promise.all([props.params, props.searchParams]);
     const path = definition.path(params);
     const viewer = await currentViewer();
-    const granted = await authorise(definition.permission, viewer, params.project);
+    const granted = await orDatabaseAway(() => authorise(definition.permission, viewer, params.project));
     if (!granted.ok) {
       if (granted.error.code === "signed-out") redirect(`/sign-in?next=${encodeURIComponent(path)}`);
       notFound();
     }
     // authorise() answers with the scope that this requirement names; the compiler cannot follow the correlation.
-    return definition.render(granted.value as ScopeFor<Need>, { params, search, path });
+    const scope = granted.value as ScopeFor<Need>;
+    return orDatabaseAway(() => definition.render(scope, { params, search, path }));
   };
 }

@@ -2,6 +2,7 @@ import { cache } from "react";
 import { database } from "@/db/client";
 import { findSessionUser } from "@/db/queries/sessions";
 import type { Viewer } from "@/lib/access/scope";
+import { orDatabaseAway } from "@/lib/actions/unexpected";
 import { currentSessionKey } from "./session-cookie";
 import { viewerOf } from "./viewer";
 
@@ -12,6 +13,6 @@ import { viewerOf } from "./viewer";
 export const currentViewer = cache(async (): Promise<Viewer | undefined> => {
   const key = await currentSessionKey();
   if (!key) return undefined;
-  const user = await findSessionUser(database(), key);
+  const user = await orDatabaseAway(() => findSessionUser(database(), key));
   return user ? viewerOf(user) : undefined;
 });

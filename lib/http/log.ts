@@ -1,5 +1,6 @@
 import pino from "pino";
 import { env } from "@/lib/env";
+import { loggableError } from "./loggable-error";
 
 let logger: pino.Logger | undefined;
 
@@ -8,8 +9,20 @@ export function log(): pino.Logger {
   logger ??= pino({
     level: env().LOG_LEVEL,
     base: { service: process.env.BOARDWAKE_SERVICE ?? "app" },
+    serializers: { err: loggableError },
     redact: {
-      paths: ["password", "token", "secret", "cookie", "authorization", "*.password", "*.token", "*.secret", "*.cookie", "*.authorization"],
+      paths: [
+        "password",
+        "token",
+        "secret",
+        "cookie",
+        "authorization",
+        "*.password",
+        "*.token",
+        "*.secret",
+        "*.cookie",
+        "*.authorization",
+      ],
       censor: "[cut]",
     },
   });
