@@ -1,6 +1,7 @@
 import { randomUUID } from "node:crypto";
 import { eq, sql } from "drizzle-orm";
 import { describe, expect, it, vi } from "vitest";
+import type * as Enqueue from "@/lib/jobs/enqueue";
 import { events } from "@/db/schema/events";
 import { attempts, concessions } from "@/db/schema/travelers";
 import { recomputeAll } from "@/lib/check/recompute-all";
@@ -37,7 +38,7 @@ async function makeOld(attemptId: string, minutes: number) {
 /** What was enqueued, in order; a worker may take the jobs before a test could look for them. */
 const mails = vi.hoisted((): unknown[] => []);
 vi.mock("@/lib/jobs/enqueue", async (original) => {
-  const { enqueue } = await original<typeof import("@/lib/jobs/enqueue")>();
+  const { enqueue } = await original<typeof Enqueue>();
   const watched: typeof enqueue = async (tx, name, payload, options) => {
     mails.push({ name, payload });
     return enqueue(tx, name, payload, options);
