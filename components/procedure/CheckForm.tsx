@@ -10,7 +10,8 @@ import { Select } from "@/components/ui/Select";
 import { TextArea } from "@/components/ui/TextArea";
 import { TextField } from "@/components/ui/TextField";
 import type { Reply } from "@/components/ui/form/reply";
-import { CHECK_KINDS, checkKind } from "@/lib/check-kinds/list";
+import { CHECK_KINDS } from "@/lib/check-kinds/list";
+import { SpecForm } from "@/lib/check-kinds/spec-forms";
 import type { CheckRow } from "@/lib/procedure/check-row";
 import type { CheckFields } from "@/lib/procedure/schema";
 import { STAGES } from "@/lib/procedure/stages";
@@ -35,7 +36,6 @@ export function CheckForm({ initial, own, checks, save, onDone, onCancel }: Prop
   const [problems, setProblems] = useState<Record<string, string>>({});
   const [failure, setFailure] = useState<{ code: string; message: string }>();
   const [isPending, setPending] = useState(false);
-  const kind = checkKind(draft.kind);
   const set = (change: Partial<CheckDraft>) => setDraft((was) => ({ ...was, ...change }));
   const problem = (name: string) => problems[`check.${name}`];
   const text = (name: "title" | "instruction" | "caution" | "reference") => ({
@@ -104,7 +104,8 @@ export function CheckForm({ initial, own, checks, save, onDone, onCancel }: Prop
           options={CHECK_KINDS.map(({ name, label, description }) => ({ id: name, label, description }))}
         />
         <div className="rounded-md border border-rule bg-raised/60 p-4">
-          <kind.SpecForm
+          <SpecForm
+            kind={draft.kind}
             value={draft.typed}
             onChange={(typed) => set({ typed })}
             errors={under(problems, "check.typed.")}

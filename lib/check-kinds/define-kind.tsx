@@ -1,6 +1,6 @@
 import type { z } from "zod";
 import { fieldErrors } from "@/lib/actions/field-errors";
-import type { BenchFormProps, CheckKind, CheckKindDefinition, Read, RecordViewProps, SpecFormProps } from "./kind";
+import type { CheckKind, CheckKindDefinition, Read, RecordViewProps } from "./kind";
 
 function read<Value>(schema: z.ZodType<Value>, raw: unknown, message: string): Read<Value> {
   const parsed = schema.safeParse(raw);
@@ -14,35 +14,7 @@ function read<Value>(schema: z.ZodType<Value>, raw: unknown, message: string): R
 export function defineKind<const Name extends string, Spec, Typed, Entry>(
   kind: CheckKindDefinition<Name, Spec, Typed, Entry>,
 ): CheckKind<Name> {
-  const { BenchForm, SpecForm, RecordView, specShape, entryShape, typedShape } = kind;
-
-  function ErasedBenchForm({
-    spec: stored,
-    draft: given,
-    onDraft,
-    onSubmit,
-    judged,
-    busy,
-    rule,
-  }: BenchFormProps<unknown, unknown>) {
-    const spec = specShape.parse(stored);
-    const draft = entryShape.safeParse(given).data ?? kind.emptyEntry(spec);
-    return (
-      <BenchForm
-        spec={spec}
-        draft={draft}
-        onDraft={onDraft}
-        onSubmit={onSubmit}
-        judged={judged}
-        busy={busy}
-        rule={rule}
-      />
-    );
-  }
-
-  function ErasedSpecForm({ value, onChange, errors }: SpecFormProps<unknown>) {
-    return <SpecForm value={typedShape.safeParse(value).data ?? kind.emptyTyped} onChange={onChange} errors={errors} />;
-  }
+  const { RecordView, specShape, entryShape } = kind;
 
   function ErasedRecordView({ spec, record, readings, rule }: RecordViewProps<unknown, unknown>) {
     return (
@@ -75,8 +47,6 @@ export function defineKind<const Name extends string, Spec, Typed, Entry>(
       return entered.success ? kind.summary(specShape.parse(spec), entered.data, readings) : "";
     },
     requires: (spec) => kind.requires(specShape.parse(spec)),
-    BenchForm: ErasedBenchForm,
-    SpecForm: ErasedSpecForm,
     RecordView: ErasedRecordView,
   };
 }

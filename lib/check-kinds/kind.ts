@@ -66,7 +66,9 @@ export type RecordViewProps<Spec, Entry> = {
 export type Requires = { kinds: AttachmentKind[]; minimum: number };
 
 /**
- * One kind of check, whole: one folder, one entry in list.ts.
+ * One kind of check: one folder, one entry in list.ts. Its two forms stand in lists of their own (bench-list.ts,
+ * spec-forms.tsx), which do not compile without an entry for every kind: whatever a server page imports is sent to
+ * that page's browser, so the forms must not hang on what loaders import.
  * Spec: what the procedure says. Typed: the same as the editor's form holds it. Entry: what the builder enters.
  * Spec and entry are stored as JSON and read again through the schemas. Schemas named …Shape only say what is there,
  * so that a half-filled form passes; what is wrong with it is said by specFromTyped and judge.
@@ -95,8 +97,6 @@ export type CheckKindDefinition<Name extends string, Spec, Typed, Entry> = {
   /** True when the verdict comes from readings; then the bench has Record instead of Conforms / Does not conform. */
   measured: boolean;
   requires: (spec: Spec) => Requires | undefined;
-  BenchForm: ComponentType<BenchFormProps<Spec, Entry>>;
-  SpecForm: ComponentType<SpecFormProps<Typed>>;
   RecordView: ComponentType<RecordViewProps<Spec, Entry>>;
 };
 
@@ -122,7 +122,5 @@ export type CheckKind<Name extends string = string> = {
   /** Empty when the record is of another shape. */
   summary: (spec: unknown, entry: unknown, readings: JudgedReading[]) => string;
   requires: (spec: unknown) => Requires | undefined;
-  BenchForm: ComponentType<BenchFormProps<unknown, unknown>>;
-  SpecForm: ComponentType<SpecFormProps<unknown>>;
   RecordView: ComponentType<RecordViewProps<unknown, unknown>>;
 };

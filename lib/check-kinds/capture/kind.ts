@@ -1,11 +1,9 @@
 import { defineKind } from "../define-kind";
 import { statedEntryShape } from "../stated-entry-shape";
 import { NOTHING_STATED, summariseStated } from "../stated-verdict";
-import { BenchForm } from "./BenchForm";
 import { judge, requires } from "./judge";
 import { RecordView } from "./RecordView";
 import { specFromTyped, specShape, typedShape } from "./schema";
-import { SpecForm } from "./SpecForm";
 
 export const capture = defineKind({
   name: "capture",
@@ -23,7 +21,5 @@ export const capture = defineKind({
   summary: (_spec, entry) => summariseStated(entry),
   measured: false,
   requires,
-  BenchForm,
-  SpecForm,
   RecordView,
 });

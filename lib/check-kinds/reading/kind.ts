@@ -1,10 +1,8 @@
 import { formatLimits } from "@/lib/calc/units";
 import { defineKind } from "../define-kind";
-import { BenchForm } from "./BenchForm";
 import { judge } from "./judge";
 import { RecordView } from "./RecordView";
 import { entryShape, specFromTyped, specShape, typedShape } from "./schema";
-import { SpecForm } from "./SpecForm";
 import { summary } from "./summary";
 
 export const reading = defineKind({
@@ -23,7 +21,5 @@ export const reading = defineKind({
   summary,
   measured: true,
   requires: () => undefined,
-  BenchForm,
-  SpecForm,
   RecordView,
 });

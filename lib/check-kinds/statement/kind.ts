@@ -1,11 +1,9 @@
 import { defineKind } from "../define-kind";
 import { statedEntryShape } from "../stated-entry-shape";
 import { NOTHING_STATED, summariseStated } from "../stated-verdict";
-import { BenchForm } from "./BenchForm";
 import { judge } from "./judge";
 import { RecordView } from "./RecordView";
 import { specFromTyped, specShape, typedShape } from "./schema";
-import { SpecForm } from "./SpecForm";
 
 export const statement = defineKind({
   name: "statement",
@@ -23,7 +21,5 @@ export const statement = defineKind({
   summary: (_spec, entry) => summariseStated(entry),
   measured: false,
   requires: () => undefined,
-  BenchForm,
-  SpecForm,
   RecordView,
 });

@@ -1,10 +1,8 @@
 import { formatLimits } from "@/lib/calc/units";
 import { defineKind } from "../define-kind";
-import { BenchForm } from "./BenchForm";
 import { judge } from "./judge";
 import { RecordView } from "./RecordView";
 import { entryShape, specFromTyped, specShape, typedShape, type Spec } from "./schema";
-import { SpecForm } from "./SpecForm";
 import { summary } from "./summary";
 
 export const table = defineKind({
@@ -31,8 +29,6 @@ export const table = defineKind({
   summary: (_spec, _entry, readings) => summary(readings),
   measured: true,
   requires: () => undefined,
-  BenchForm,
-  SpecForm,
   RecordView,
 });
 
