@@ -6,7 +6,7 @@ import type { Viewer } from "@/lib/access/scope";
 import { ok, refuse, type Answer } from "@/lib/actions/answer";
 import { limit } from "@/lib/http/rate-limit";
 import { cleanFileName } from "@/lib/storage/file-name";
-import { largestBytes, sizeText } from "@/lib/storage/limits";
+import { checkSize } from "./check-size";
 import type { UploadInput } from "./schema";
 
 /** What the object store hands back, signed, when the file is there. No secret in it. */
@@ -51,18 +51,6 @@ export async function admitUpload(
     checkId: input.checkId ?? null,
     logEntryId: input.logEntryId ?? null,
   });
-}
-
-export function checkSize(name: string, bytes: number, kinds: readonly AttachmentKind[]): Answer<void> {
-  if (!Number.isInteger(bytes) || bytes < 0)
-    return refuse("invalid", `The size of ${name} is missing. Nothing was kept.`);
-  if (bytes === 0) return refuse("invalid", `${name} is empty (0 bytes). Nothing was kept.`);
-  const most = largestBytes(kinds);
-  if (bytes <= most) return ok(undefined);
-  return refuse(
-    "too-large",
-    `${name} has ${sizeText(bytes)}; the most that can be kept here is ${sizeText(most)}. Nothing was kept.`,
-  );
 }
 
 type InProject = { projectId: string };

@@ -5,7 +5,7 @@ import { cleanImage } from "@/lib/storage/clean-image";
 import { withExtension } from "@/lib/storage/file-name";
 import { FILE_LIMITS } from "@/lib/storage/limits";
 import { sniff } from "@/lib/storage/sniff";
-import { checkSize } from "./admit-upload";
+import { checkSize } from "./check-size";
 
 /** A file as it will be kept. `clean` is undefined for scope data, whose raw bytes are kept untouched. */
 export type PreparedFile = {

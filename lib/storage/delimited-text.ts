@@ -3,16 +3,21 @@ export type Delimiter = "," | ";" | "\t";
 
 /** Enough to tell a table from prose; a scope's preamble is some 40 lines at most. */
 const HEAD_BYTES = 64 * 1024;
+const CONTROLS = /[\u0000-\u0008\u000b\u000e-\u001a\u001c-\u001f\u007f]/;
 const NUMBER = /^[+-]?(\d+([.,]\d*)?|[.,]\d+)(e[+-]?\d+)?$/i;
+
+const utf16Of = (bytes: Uint8Array) =>
+  (bytes[0] === 0xff && bytes[1] === 0xfe && "utf-16le") || (bytes[0] === 0xfe && bytes[1] === 0xff && "utf-16be");
+
+export const hasUtf16Mark = (bytes: Uint8Array): boolean => utf16Of(bytes) !== false;
 
 /** The text of the first bytes, or undefined when they are no text. Scopes write UTF-8, UTF-16 or Latin-1. */
 export function textHead(bytes: Uint8Array): string | undefined {
   const head = bytes.subarray(0, HEAD_BYTES);
-  const utf16 =
-    (head[0] === 0xff && head[1] === 0xfe && "utf-16le") || (head[0] === 0xfe && head[1] === 0xff && "utf-16be");
+  const utf16 = utf16Of(head);
   if (!utf16 && bytes.includes(0)) return undefined;
   const text = utf16 ? new TextDecoder(utf16).decode(head) : decodeBytes(head);
-  return /[\u0000-\u0008\u000b\u000e-\u001a\u001c-\u001f\u007f]/.test(text) ? undefined : text;
+  return CONTROLS.test(text) ? undefined : text;
 }
 
 function decodeBytes(head: Uint8Array): string {

@@ -1,6 +1,6 @@
 import { fileTypeFromBuffer } from "file-type";
 import { ok, refuse, type Answer } from "@/lib/actions/answer";
-import { delimiterOf, textHead } from "./delimited-text";
+import { delimiterOf, hasUtf16Mark, textHead } from "./delimited-text";
 import { extensionOf } from "./file-name";
 
 export type PictureType = "image/jpeg" | "image/png" | "image/webp" | "image/gif" | "image/tiff";
@@ -45,7 +45,9 @@ export async function sniff(bytes: Uint8Array, name: string): Promise<Answer<Con
 
 async function contentOf(bytes: Uint8Array, name: string): Promise<Answer<Content>> {
   if (bytes.length === 0) return refuse("invalid", `${name} is empty (0 bytes). Nothing was kept.`);
-  const found = await fileTypeFromBuffer(bytes);
+  // The mark of UTF-16 text is also how a frame of some sound formats begins.
+  const marked = hasUtf16Mark(bytes) && textHead(bytes) !== undefined;
+  const found = marked ? undefined : await fileTypeFromBuffer(bytes);
   if (found && isPicture(found.mime)) return ok({ what: "picture", type: found.mime });
   if (found)
     return wrong(

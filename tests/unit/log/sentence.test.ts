@@ -1,0 +1,136 @@
+import { describe, expect, it } from "vitest";
+import { glyphOf, groupOf, kindsOf } from "@/lib/event/event-group";
+import { eventPayloads, type EventKind, type EventPayload } from "@/lib/event/schema";
+import { plainSentence, sentenceOf, type SentenceContext } from "@/lib/event/sentence";
+
+const context: SentenceContext = {
+  project: "tide",
+  actor: "Mira",
+  unitSerial: "CON-01",
+  checkId: "c1",
+  checkTitle: "Rise time of CLK",
+  subjectId: "s1",
+};
+const check = { serial: "CON-01", title: "Rise time of CLK" };
+const because = { ...check, reason: "Read with the old table" };
+const board = { code: "CON", name: "Constituent M2" };
+const file = { kind: "photo", fileName: "U3.jpg" };
+
+/** For every kind one payload and what is said of it: the record does not compile when a kind is missing. */
+const SAID: { [Kind in EventKind]: [EventPayload<Kind>, string] } = {
+  "project.created": [{ name: "Tide computer" }, "Mira set up the project Tide computer."],
+  "project.edited": [{ what: "its time zone" }, "Mira changed the project: its time zone."],
+  "project.archived": [{ name: "Tide computer" }, "Mira archived the project Tide computer."],
+  "project.restored": [{ name: "Tide computer" }, "Mira restored the project Tide computer."],
+  "member.joined": [{ role: "builder" }, "Mira joined the project as builder."],
+  "member.role-changed": [
+    { name: "Bram", from: "builder", to: "maintainer" },
+    "Mira made Bram maintainer, before builder.",
+  ],
+  "member.removed": [{ name: "Bram" }, "Mira removed Bram from the project."],
+  "invitation.sent": [{ role: "collaborator" }, "Mira invited a collaborator."],
+  "invitation.withdrawn": [{ role: "collaborator" }, "Mira withdrew the invitation of a collaborator."],
+  "board.created": [board, "Mira added the board CON Constituent M2."],
+  "board.edited": [board, "Mira changed the board CON Constituent M2."],
+  "board.archived": [board, "Mira archived the board CON Constituent M2."],
+  "board.restored": [board, "Mira restored the board CON Constituent M2."],
+  "revision.created": [{ code: "CON", letter: "B" }, "Mira added revision B of CON."],
+  "revision.released": [{ code: "CON", letter: "B" }, "Mira released revision B of CON."],
+  "unit.created": [{ serial: "CON-01" }, "Mira added the unit CON-01."],
+  "unit.edited": [{ serial: "CON-01" }, "Mira changed the unit CON-01."],
+  "unit.archived": [{ serial: "CON-01" }, "Mira archived the unit CON-01."],
+  "unit.restored": [{ serial: "CON-01" }, "Mira restored the unit CON-01."],
+  "slot.created": [{ position: 3 }, "Mira added slot 3."],
+  "slot.edited": [{ position: 3 }, "Mira changed slot 3."],
+  "slot.archived": [{ position: 3 }, "Mira archived slot 3."],
+  "unit.placed": [{ serial: "CON-01", position: 3 }, "Mira put CON-01 into slot 3."],
+  "unit.removed": [{ serial: "CON-01", position: 3 }, "Mira took CON-01 out of slot 3."],
+  "procedure.issued": [
+    { code: "CON", number: 4, note: "Slow clock first" },
+    "Mira issued version 4 of the procedure of CON: Slow clock first.",
+  ],
+  "traveler.started": [
+    { serial: "CON-01", number: 4 },
+    "Mira started the traveler of CON-01 from procedure version 4.",
+  ],
+  "traveler.moved": [
+    { serial: "CON-01", from: 3, to: 4, kept: 1, changed: 2 },
+    "Mira moved the traveler of CON-01 from procedure version 3 to 4: 1 check kept, 2 changed.",
+  ],
+  "attempt.recorded": [
+    { ...check, verdict: "does-not-conform", reading: "14.8 ns", from: "untested", to: "failed", firstPass: false },
+    "Mira recorded “Rise time of CLK” on CON-01: 14.8 ns, does not conform.",
+  ],
+  "attempt.voided": [because, "Mira voided an attempt at “Rise time of CLK” on CON-01: Read with the old table."],
+  "check.reopened": [because, "Mira reopened “Rise time of CLK” on CON-01: Read with the old table."],
+  "check.doubted": [because, "“Rise time of CLK” on CON-01 is in doubt: Read with the old table."],
+  "concession.granted": [
+    because,
+    "Mira granted a concession for “Rise time of CLK” on CON-01: Read with the old table.",
+  ],
+  "concession.withdrawn": [
+    because,
+    "Mira withdrew the concession for “Rise time of CLK” on CON-01: Read with the old table.",
+  ],
+  "hold.lifted": [because, "Mira lifted the hold point “Rise time of CLK” for CON-01: Read with the old table."],
+  "prerequisite.added": [{ check: "Clock", needs: "Reset" }, "Mira made “Clock” wait for Reset."],
+  "prerequisite.removed": [{ check: "Clock", needs: "Reset" }, "Mira let “Clock” no longer wait for Reset."],
+  "evidence.attached": [file, "Mira attached the photo U3.jpg to “Rise time of CLK” on CON-01."],
+  "evidence.removed": [file, "Mira removed the photo U3.jpg from “Rise time of CLK” on CON-01."],
+  "evidence.restored": [file, "Mira restored the photo U3.jpg of “Rise time of CLK” on CON-01."],
+  "evidence.captioned": [{ ...file, caption: "Solder side" }, "Mira captioned the photo U3.jpg: Solder side."],
+  "log.written": [{ title: "It rings" }, "Mira wrote “It rings”."],
+  "log.edited": [{ title: "It rings" }, "Mira edited “It rings”."],
+  "log.archived": [{ title: "It rings" }, "Mira archived “It rings”."],
+  "log.restored": [{ title: "It rings" }, "Mira restored “It rings”."],
+};
+const KINDS = Object.entries(SAID);
+
+describe("what happened", () => {
+  it.each(KINDS)("%s is one sentence", (kind, [payload, sentence]) => {
+    expect(plainSentence(sentenceOf(kind, payload, context))).toBe(sentence);
+  });
+
+  it("is told of every kind there is", () => {
+    expect(Object.keys(SAID).sort()).toEqual(Object.keys(eventPayloads).sort());
+    for (const kind of Object.keys(eventPayloads)) expect(groupOf(kind), kind).toBeDefined();
+  });
+
+  it("links to the check, the unit, the board, the entry and the file", () => {
+    const links = (kind: EventKind) =>
+      sentenceOf(kind, SAID[kind][0], context).flatMap((part) => (part.href ? [part.href] : []));
+    expect(links("attempt.recorded")).toEqual([
+      "/projects/tide/units/CON-01?check=c1#check-c1",
+      "/projects/tide/units/CON-01",
+    ]);
+    expect(links("procedure.issued")).toEqual(["/projects/tide/boards/CON/procedure/4"]);
+    expect(links("log.written")).toEqual(["/projects/tide/log/s1"]);
+    expect(links("evidence.attached")[0]).toBe("/api/projects/tide/files/s1");
+    expect(links("member.joined")).toEqual(["/projects/tide/people"]);
+  });
+
+  it("is still told when the unit is gone or the payload is of an older form", () => {
+    const gone = { ...context, unitSerial: null, checkId: null, checkTitle: null };
+    expect(sentenceOf("unit.archived", { serial: "OLD-1" }, gone).every((part) => part.href === undefined)).toBe(true);
+    expect(plainSentence(sentenceOf("evidence.attached", file, gone))).toBe("Mira attached the photo U3.jpg.");
+    expect(plainSentence(sentenceOf("attempt.recorded", { was: "other" }, context))).toBe("Mira changed something.");
+    expect(plainSentence(sentenceOf("moon.landed", {}, context))).toBe("Mira changed something.");
+  });
+
+  it("ends with one full stop, whatever the reason ends with", () => {
+    const said = (reason: string) => plainSentence(sentenceOf("check.reopened", { ...check, reason }, context));
+    expect(said("Again!")).toMatch(/: Again!$/);
+    expect(said("")).toMatch(/ on CON-01\.$/);
+  });
+
+  it("is grouped and marked by what it means for a check", () => {
+    expect(kindsOf("reopenings")).toEqual(
+      expect.arrayContaining(["check.reopened", "check.doubted", "concession.granted", "hold.lifted"]),
+    );
+    expect(kindsOf("failures")).toEqual(["attempt.recorded"]);
+    expect(glyphOf("attempt.recorded", SAID["attempt.recorded"][0])).toBe("failed");
+    expect(glyphOf("attempt.recorded", { ...SAID["attempt.recorded"][0], verdict: "guard-band" })).toBe("passed");
+    expect(glyphOf("check.doubted", {})).toBe("doubtful");
+    expect(glyphOf("log.written", {})).toBeUndefined();
+  });
+});
