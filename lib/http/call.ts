@@ -1,6 +1,7 @@
 import { headers } from "next/headers";
 import { env } from "@/lib/env";
 import { PEER_HEADER } from "./peer-header";
+import { peerNetwork } from "./peer-network";
 
 /** What is known of one request. The request id stands in every log line and in the message of an unexpected error. */
 export type Call = { requestId: string; ip: string };
@@ -10,7 +11,7 @@ export function callFrom(given: Headers): Call {
   const forwarded = env().TRUST_PROXY ? given.get("x-forwarded-for")?.split(",").at(-1)?.trim() : undefined;
   return {
     requestId: given.get("x-request-id") ?? crypto.randomUUID(),
-    ip: forwarded ?? given.get(PEER_HEADER) ?? "local",
+    ip: peerNetwork(forwarded || given.get(PEER_HEADER) || "local"),
   };
 }
 
