@@ -72,7 +72,7 @@ export function SlotRow({ project, zone, slot, board, cards, placeable, canEdit,
             <span className="mono text-xs">{slot.pitchHp} HP</span>, {(slot.pitchHp * HP_MM).toFixed(2)} mm
           </span>
         </span>
-        <span className="flex min-w-40 flex-1 items-center gap-3">
+        <span className="flex min-w-40 flex-1 items-center gap-3 max-sm:pl-11">
           {unit ? (
             <>
               <Link href={`/projects/${project}/units/${unit.serial}`} className="link mono text-sm font-semibold">

@@ -88,8 +88,8 @@ export function DraftEditor({ state, acts }: Props) {
                 onReorder={(ids) => void reorder(stage.id, ids)}
               >
                 {({ check }) => (
-                  <div className="flex items-center gap-2">
-                    <div className="min-w-0 flex-1">
+                  <div className="flex flex-wrap items-center justify-end gap-x-2">
+                    <div className="min-w-0 flex-1 basis-64">
                       <CheckFacts check={check} number={checks.findIndex((one) => one.key === check.key) + 1} />
                     </div>
                     <Button
