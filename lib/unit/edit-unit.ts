@@ -3,6 +3,8 @@ import { findUnitBySerial, lockUnit } from "@/db/queries/units";
 import { units } from "@/db/schema/boards";
 import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
+import { lockUnits } from "@/lib/check/lock-states";
+import { refreshStates } from "@/lib/check/refresh-states";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
 import { rejectTakenSerial, requireRevision } from "./create-unit";
@@ -29,6 +31,11 @@ export async function editUnit(
     await tx.update(units).set({ serial, revisionId, note, version }).where(eq(units.id, current.id));
     const subject = { projectId, actorId: viewer.userId, unitId: current.id, subjectId: current.id };
     await recordEvent(tx, subject, "unit.edited", { serial });
+    if (serial !== current.serial) {
+      // Reasons such as “Waits for … on TIM-01” name the serial.
+      await lockUnits(tx, projectId, [current.id]);
+      await refreshStates(tx, { projectId, actorId: viewer.userId }, [current.id]);
+    }
     return { serial, version };
   });
 }
