@@ -9,9 +9,7 @@ import { light } from "./parts/palette";
 import { Sheet } from "./parts/Sheet";
 import { Act, Line, Title } from "./parts/Words";
 
-export function digestSubject({ projectName, summary, isQuiet }: DigestMailProps): string {
-  return isQuiet ? `${projectName}: a quiet week` : `${projectName}: ${summary}`;
-}
+export const digestSubject = ({ projectName, headline }: DigestMailProps): string => `${projectName}: ${headline}`;
 
 /** The week of one project: how the boards stand, what happened, what is open and what comes next. */
 export function DigestMail(props: DigestMailProps) {

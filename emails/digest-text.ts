@@ -5,7 +5,7 @@ const WORDS: Record<Mark, string> = {
   reopened: "reopened",
   doubtful: "in doubt",
   conceded: "conceded",
-  passed: "passed",
+  passed: "passes now",
   free: "free to do",
 };
 

@@ -6,7 +6,7 @@ import { attachments, logEntries } from "@/db/schema/evidence";
 import { users } from "@/db/schema/people";
 import { procedureChecks } from "@/db/schema/procedures";
 import { projects, type QuietWeek } from "@/db/schema/projects";
-import { checks } from "@/db/schema/travelers";
+import { attempts, checks } from "@/db/schema/travelers";
 
 type InProject = { projectId: string };
 type Span = { since: Date; until: Date };
@@ -141,11 +141,14 @@ export async function findEventsBetween(
       checkId: events.checkId,
       checkTitle: procedureChecks.title,
       subjectId: events.subjectId,
+      note: attempts.note,
+      state: checks.state,
     })
     .from(events)
     .leftJoin(users, eq(users.id, events.actorId))
     .leftJoin(units, eq(units.id, events.unitId))
     .leftJoin(checks, eq(checks.id, events.checkId))
+    .leftJoin(attempts, eq(attempts.id, events.subjectId))
     .leftJoin(procedureChecks, eq(procedureChecks.id, checks.procedureCheckId))
     .where(and(eq(events.projectId, projectId), gte(events.at, since), lt(events.at, until)))
     .orderBy(asc(events.id))
@@ -201,12 +204,14 @@ export async function findOpenFailures(db: Queryable, { projectId }: InProject) 
       title: procedureChecks.title,
       since: checks.stateSince,
       payload: events.payload,
+      note: attempts.note,
     })
     .from(checks)
     .innerJoin(units, and(eq(units.id, checks.unitId), isNull(units.archivedAt)))
     .innerJoin(boards, and(eq(boards.id, units.boardId), isNull(boards.archivedAt)))
     .innerJoin(procedureChecks, eq(procedureChecks.id, checks.procedureCheckId))
     .leftJoin(events, and(eq(events.subjectId, checks.lastAttemptId), eq(events.kind, "attempt.recorded")))
+    .leftJoin(attempts, eq(attempts.id, checks.lastAttemptId))
     .where(and(eq(checks.projectId, projectId), eq(checks.state, "failed"), isNull(checks.retiredAt)))
     .orderBy(asc(checks.stateSince));
 }

@@ -8,7 +8,7 @@ const WORDS: Record<Mark, string> = {
   reopened: "Reopened",
   doubtful: "In doubt",
   conceded: "Conceded",
-  passed: "Passed",
+  passed: "Passes now",
   free: "Free to do",
 };
 const COLOURS: Record<Mark, string> = {
@@ -52,7 +52,7 @@ export function DigestItems({ list, moreLink }: { list: DigestList; moreLink: st
 }
 
 export function Serial({ children }: { children: ReactNode }) {
-  return <span style={{ fontFamily: FIGURE_FONT, fontSize: 13 }}>{children}</span>;
+  return <span style={{ fontFamily: FIGURE_FONT, fontSize: 13, whiteSpace: "nowrap" }}>{children}</span>;
 }
 
 export function More({ count, link }: { count: number; link: string }) {

@@ -50,6 +50,8 @@ export type DigestMailProps = {
   logLink: string;
   /** "Sun 22 Feb to Sun 1 Mar" */
   period: string;
+  /** The week in a few words, for the subject. */
+  headline: string;
   /** What the week was, in a sentence or two. */
   summary: string;
   /** How the machine stands, in a sentence. */

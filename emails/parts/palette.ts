@@ -22,7 +22,7 @@ export const FIGURE_FONT = '"Martian Mono", Menlo, Consolas, monospace';
 export const DARK_STYLE = `
 :root { color-scheme: light dark; supported-color-schemes: light dark; }
 @media (prefers-color-scheme: dark) {
-  .bw-paper { background-color: #141210 !important; }
+  .bw-paper, .bw-paper > table > tbody > tr > td { background-color: #141210 !important; }
   .bw-sheet { background-color: #1c1916 !important; border-color: #38322a !important; }
   .bw-ink, .bw-ink a { color: #efe8d8 !important; }
   .bw-soft, .bw-soft a { color: #b8af9d !important; }

@@ -13,14 +13,31 @@ import { writeDigest, type Digest } from "./write-digest";
 type Reader = Span & { subscriptionId: string; email: string; zone: string; quietWeek: QuietWeek };
 export type DigestWriter = ReturnType<typeof createDigestWriter>;
 
-/** Writes the mails of one project. What readers of one zone and span have in common is put together once. */
+/** Stands for the reader's own address while the mail is written once for all readers of a zone. */
+const OWN_ADDRESS = "https://unsubscribe.invalid/";
+
+type Written = { subject: string; html: string; text: string; inline: Digest["inline"]; isQuiet: boolean };
+
+/** Writes the mails of one project. Readers of one zone and span get the same, each with an address of their own to end it. */
 export function createDigestWriter(week: ProjectWeek) {
   const pictures = createPictures();
-  const digests = new Map<string, Promise<Digest>>();
+  const digests = new Map<string, Promise<Written>>();
 
-  function digestFor({ since, until, zone }: Span & { zone: string }): Promise<Digest> {
+  async function make(span: Span, zone: string): Promise<Written> {
+    const { inline, ...digest } = await writeDigest(week, span, zone, pictures);
+    const props = { ...digest, unsubscribeLink: OWN_ADDRESS };
+    return {
+      subject: digestSubject(props),
+      html: await render(createElement(DigestMail, props)),
+      text: digestText(props),
+      inline: digest.isQuiet ? [] : inline,
+      isQuiet: digest.isQuiet,
+    };
+  }
+
+  function digestFor({ since, until, zone }: Span & { zone: string }): Promise<Written> {
     const key = `${since.getTime()} ${until.getTime()} ${zone}`;
-    const known = digests.get(key) ?? writeDigest(week, { since, until }, zone, pictures);
+    const known = digests.get(key) ?? make({ since, until }, zone);
     digests.set(key, known);
     return known;
   }
@@ -28,16 +45,16 @@ export function createDigestWriter(week: ProjectWeek) {
   return {
     /** Undefined in a quiet week of somebody who wants no mail then. */
     async write(reader: Reader): Promise<Message | undefined> {
-      const { inline, ...digest } = await digestFor(reader);
-      if (digest.isQuiet && reader.quietWeek === "nothing") return undefined;
+      const { subject, html, text, inline, isQuiet } = await digestFor(reader);
+      if (isQuiet && reader.quietWeek === "nothing") return undefined;
       const way = unsubscribePaths(reader.subscriptionId);
-      const props = { ...digest, unsubscribeLink: appLink(way.page) };
+      const own = (form: string) => form.replaceAll(OWN_ADDRESS, appLink(way.page));
       return {
         to: reader.email,
-        subject: digestSubject(props),
-        html: await render(createElement(DigestMail, props)),
-        text: digestText(props),
-        inline: digest.isQuiet ? [] : inline,
+        subject,
+        html: own(html),
+        text: own(text),
+        inline,
         // RFC 8058: one address, no other way, and nothing but the press in the body.
         headers: {
           "List-Unsubscribe": `<${appLink(way.oneClick)}>`,

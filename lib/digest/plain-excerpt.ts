@@ -4,10 +4,13 @@ export function plainExcerpt(markdown: string, most = 280): string {
     .replace(/```[\s\S]*?(```|$)/g, " ")
     .replace(/!\[[^\]]*\]\([^)]*\)/g, " ")
     .replace(/\[([^\]]*)\]\([^)]*\)/g, "$1")
-    .replace(/^\s{0,3}(#{1,6}|>|[-*+]|\d+\.)\s+/gm, "")
+    // The points of a list come one after the other with a semicolon.
+    .replace(/(?<![.:;!?…])[ \t]*\n+\s*([-*+]|\d+[.)])\s+/g, "; ")
+    .replace(/^\s{0,3}(#{1,6}|>|[-*+]|\d+[.)])\s+/gm, "")
     .replace(/[*_`~]{1,3}(?=\S)|(?<=\S)[*_`~]{1,3}/g, "")
     .replace(/\s+/g, " ")
-    .trim();
+    .trim()
+    .replace(/^; /, "");
   if (words.length <= most) return words;
   const head = words.slice(0, most);
   const end = head.lastIndexOf(" ");

@@ -1,33 +1,32 @@
-import type { DigestItem, DigestList, Mark } from "@/emails/parts/digest-mail-props";
+import type { DigestItem, DigestList } from "@/emails/parts/digest-mail-props";
 import { nextChecks } from "@/lib/check/next-checks";
 import { eventPayloads } from "@/lib/event/schema";
 import { checkLink } from "@/lib/mail/app-link";
 import { writeDay } from "@/lib/mail/write-day";
 import { stageName } from "@/lib/procedure/stages";
 import type { ProjectWeek } from "./project-week";
-import { cut, readingOf } from "./week-lists";
+import { cut, markOf, quoted, readingOf } from "./week-attempts";
 
 const MOST_OPEN = 8;
 const MOST_NEXT = 5;
 
 /** Checks that fail now, whenever they were recorded. */
 export function openItems({ project, failures }: ProjectWeek, zone: string): DigestList {
-  const items = failures.map(({ checkId, serial, title, since, payload }): DigestItem => {
+  const items = failures.map(({ checkId, serial, title, since, payload, note }): DigestItem => {
     const recorded = eventPayloads["attempt.recorded"].safeParse(payload);
     const reading = recorded.success ? readingOf(recorded.data.reading) : "";
-    const detail = `${reading}Open since ${writeDay(since, zone)}.`;
+    const open = `Open since ${writeDay(since, zone)}.`;
+    const detail = [reading, quoted(note), open].filter((part) => part !== "").join(" ");
     return { mark: "failed", serial, title, link: checkLink(project.slug, serial, checkId), detail };
   });
   return cut(items, MOST_OPEN);
 }
 
-const MARKS: Record<string, Mark> = { failed: "failed", reopened: "reopened", doubtful: "doubtful" };
-
 /** What the bench should do next, in the order of the rack's own list. */
 export function nextItems({ project, checks }: ProjectWeek): DigestList {
   const items = nextChecks(checks).map(({ checkId, serial, stage, title, state, reason }): DigestItem => {
     const link = checkLink(project.slug, serial, checkId);
-    return { mark: MARKS[state] ?? "free", serial, title, link, detail: `${stageName(stage)}. ${reason}` };
+    return { mark: markOf(state), serial, title, link, detail: `${stageName(stage)}. ${reason}` };
   });
   return { items: items.slice(0, MOST_NEXT), more: 0 };
 }

@@ -8,7 +8,8 @@ import { plainExcerpt } from "./plain-excerpt";
 import { partOf, type EntryRow, type ProjectWeek, type Span } from "./project-week";
 import { nextItems, openItems, standingSentence } from "./standing-lists";
 import { summarise } from "./summary";
-import { alsoSentences, attemptsOf, cut, decidedItems, failedItems, passedLines } from "./week-lists";
+import { attemptsOf, cut, failedItems, passedLines } from "./week-attempts";
+import { alsoSentences, decidedItems } from "./week-decisions";
 
 const MOST_ENTRIES = 4;
 const MOST_PICTURES = 3;
@@ -31,7 +32,7 @@ export async function writeDigest(week: ProjectWeek, span: Span, zone: string, p
     projectLink: appLink(`${home}/rack`),
     logLink: appLink(`${home}/log`),
     period: `${writeDay(span.since, zone)} to ${writeDay(span.until, zone)}`,
-    ...summarise(attempts, decided.items.length + decided.more, written.total, also.sentences.length),
+    ...summarise({ attempts, events }, written.total, also.sentences.length),
     standing: standingSentence(week),
     boards: boardLines(week),
     passed: passedLines(attempts, reader),

@@ -1,14 +1,13 @@
-import type { DigestItem, DigestList, PassedLine } from "@/emails/parts/digest-mail-props";
+import type { DigestItem, DigestList, Mark, PassedLine } from "@/emails/parts/digest-mail-props";
 import type { DigestEvent } from "@/db/queries/digests";
 import { eventPayloads, type EventPayload } from "@/lib/event/schema";
-import { plainSentence, sentenceOf } from "@/lib/event/sentence";
 import { appLink, checkLink } from "@/lib/mail/app-link";
 import { writeDay } from "@/lib/mail/write-day";
 
 /** A mail is read on a phone between two other things; the rest is one press away. */
-const MOST = { items: 8, passedUnits: 12, titles: 4, also: 6 };
+const MOST = { items: 8, passedUnits: 12, titles: 4 };
 
-type Reader = { project: string; zone: string };
+export type Reader = { project: string; zone: string };
 type Attempt = EventPayload<"attempt.recorded"> & { event: DigestEvent };
 
 export function cut<Item>(items: readonly Item[], most: number): { items: Item[]; more: number } {
@@ -27,7 +26,7 @@ export function attemptsOf(events: readonly DigestEvent[]): Attempt[] {
   });
 }
 
-const linkTo = (event: DigestEvent, serial: string, { project }: Reader) =>
+export const linkTo = (event: DigestEvent, serial: string, { project }: Reader) =>
   event.checkId ? checkLink(project, event.unitSerial ?? serial, event.checkId) : appLink(`/projects/${project}/log`);
 
 /** Passes by unit, the most first. */
@@ -38,7 +37,6 @@ export function passedLines(attempts: readonly Attempt[], reader: Reader): { lin
     units.set(attempt.serial, [...(units.get(attempt.serial) ?? []), attempt]);
   }
   const lines = [...units].map(([serial, list]) => {
-    const first = list.filter((attempt) => attempt.firstPass);
     const links = new Map(
       list.map((one) => [one.title, { title: one.title, link: linkTo(one.event, serial, reader) }]),
     );
@@ -47,7 +45,7 @@ export function passedLines(attempts: readonly Attempt[], reader: Reader): { lin
     return {
       serial,
       link,
-      counts: passCounts(first.length, list.length - first.length),
+      counts: passCounts(countPasses(list)),
       checks,
       more,
       total: list.length,
@@ -60,7 +58,18 @@ export function passedLines(attempts: readonly Attempt[], reader: Reader): { lin
   return { lines: items, more };
 }
 
-export function passCounts(first: number, repeats: number): string {
+export type Passes = { checks: number; first: number; repeats: number };
+
+/** Counts checks, not attempts: what passed three times on one evening is one check. */
+export function countPasses(attempts: readonly Attempt[]): Passes {
+  const passes = attempts.filter((attempt) => attempt.verdict !== "does-not-conform");
+  const key = ({ event }: Attempt) => event.checkId ?? event.subjectId;
+  const checks = new Set(passes.map(key)).size;
+  const first = new Set(passes.filter((attempt) => attempt.firstPass).map(key)).size;
+  return { checks, first, repeats: checks - first };
+}
+
+export function passCounts({ first, repeats }: Passes): string {
   const parts = [first > 0 ? `${first} for the first time` : "", repeats > 0 ? `${repeats} on repeat` : ""];
   return parts.filter((part) => part !== "").join(", ");
 }
@@ -72,67 +81,32 @@ export function failedItems(attempts: readonly Attempt[], reader: Reader): Diges
   const times = (key: string | null) =>
     failed.filter((one) => (one.event.checkId ?? one.event.subjectId) === key).length;
   const items = [...last].map(([key, { serial, title, reading, event }]): DigestItem => {
-    const who = `${event.actorName ?? "Somebody"}, ${writeDay(event.at, reader.zone)}`;
-    const often = times(key) > 1 ? ` Failed ${times(key)} times.` : "";
-    return {
-      mark: "failed",
-      serial,
-      title,
-      link: linkTo(event, serial, reader),
-      detail: `${readingOf(reading)}${who}.${often}`,
-    };
+    const who = `${event.actorName ?? "Somebody"}, ${writeDay(event.at, reader.zone)}.`;
+    const often = times(key) > 1 ? `Failed ${times(key)} times.` : "";
+    const detail = [readingOf(reading), quoted(event.note), who, often].filter((part) => part !== "").join(" ");
+    return { mark: markOf(event.state), serial, title, link: linkTo(event, serial, reader), detail };
   });
   return cut(items.reverse(), MOST.items);
 }
 
 /** A statement has no reading; the words of the verdict say nothing that the heading does not. */
-export const readingOf = (reading: string) => (reading === "" || reading === "does not conform" ? "" : `${reading}. `);
+export const readingOf = (reading: string) => (reading === "" || reading === "does not conform" ? "" : `${reading}.`);
 
-const DECISIONS = {
-  "check.reopened": { mark: "reopened", verb: "reopened it" },
-  "check.doubted": { mark: "doubtful", verb: "" },
-  "concession.granted": { mark: "conceded", verb: "granted a concession" },
-  "concession.withdrawn": { mark: "failed", verb: "withdrew the concession" },
-  "hold.lifted": { mark: "conceded", verb: "lifted the hold point for this unit" },
-} as const;
+const MOST_CHARACTERS = 240;
 
-const isDecision = (kind: string): kind is keyof typeof DECISIONS => Object.hasOwn(DECISIONS, kind);
-
-/** What was reopened, conceded, lifted or put in doubt, with the reason and who decided, newest first. */
-export function decidedItems(events: readonly DigestEvent[], reader: Reader): DigestList {
-  const items = events.flatMap((event): DigestItem[] => {
-    if (!isDecision(event.kind)) return [];
-    const payload = eventPayloads[event.kind].safeParse(event.payload);
-    if (!payload.success) return [];
-    const { serial, title, reason } = payload.data;
-    const { mark, verb } = DECISIONS[event.kind];
-    const day = writeDay(event.at, reader.zone);
-    const who = verb === "" ? `In doubt since ${day}.` : `${event.actorName ?? "Somebody"} ${verb}, ${day}.`;
-    const why = reason === "" ? "" : ` “${reason}”`;
-    return [{ mark, serial, title, link: linkTo(event, serial, reader), detail: `${who}${why}` }];
-  });
-  return cut(items.reverse(), MOST.items);
+/** What somebody wrote, in their words; a long text by its beginning. */
+export function quoted(text: string | null): string {
+  if (!text) return "";
+  return `“${text.length > MOST_CHARACTERS ? `${text.slice(0, MOST_CHARACTERS).trimEnd()}…` : text}”`;
 }
 
-const ALSO = [
-  "procedure.issued",
-  "revision.released",
-  "board.created",
-  "unit.created",
-  "unit.placed",
-  "traveler.started",
-  "traveler.moved",
-  "member.joined",
-];
+const NOW: Record<string, Mark> = {
+  failed: "failed",
+  reopened: "reopened",
+  doubtful: "doubtful",
+  conceded: "conceded",
+  passed: "passed",
+};
 
-/** Other steps of the project, each as the log's own sentence. */
-export function alsoSentences(events: readonly DigestEvent[], { project }: Reader) {
-  const sentences = events.flatMap((event) => {
-    if (!ALSO.includes(event.kind)) return [];
-    const parts = sentenceOf(event.kind, event.payload, { ...event, project, actor: event.actorName ?? "Somebody" });
-    const href = parts.find((part) => part.href)?.href ?? `/projects/${project}/log`;
-    return [{ text: plainSentence(parts), link: appLink(href) }];
-  });
-  const { items, more } = cut(sentences.reverse(), MOST.also);
-  return { sentences: items, more };
-}
+/** How the check stands now: what failed on Monday may have passed on Wednesday. */
+export const markOf = (state: string | null): Mark => NOW[state ?? "failed"] ?? "free";
