@@ -1,3 +1,4 @@
+import clsx from "clsx";
 import { Icon } from "@/components/ui/Icon";
 import type { BenchKind } from "@/lib/check-kinds/bench-kind";
 import { BenchButton } from "./BenchButton";
@@ -75,7 +76,14 @@ export function EntryPanel({
           </p>
         )}
       </div>
-      <div className="grid shrink-0 grid-cols-[minmax(0,1.3fr)_minmax(0,1fr)_auto_auto] lg:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_auto_auto] gap-2">
+      <div
+        className={clsx(
+          "grid shrink-0 gap-2",
+          stated
+            ? "grid-cols-[1fr_1fr_auto_auto]"
+            : "grid-cols-[minmax(0,1.3fr)_minmax(0,1fr)_auto_auto] lg:grid-cols-[1fr_1fr_auto_auto]",
+        )}
+      >
         {stated ? (
           <>
             <BenchButton
@@ -91,6 +99,7 @@ export function EntryPanel({
               disabled={disabled}
               onClick={() => onRecord(stated(false))}
               aria-keyshortcuts="x"
+              className="text-base sm:text-lg"
             >
               Does not conform
             </BenchButton>

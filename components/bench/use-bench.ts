@@ -1,6 +1,6 @@
 "use client";
 
-import { useCallback, useEffect, useMemo, useState } from "react";
+import { useCallback, useEffect, useMemo, useState, useSyncExternalStore } from "react";
 import { benchKind } from "@/lib/check-kinds/bench-list";
 import type { CheckView } from "@/lib/traveler/traveler-view";
 import type { BenchProps } from "./bench-props";
@@ -20,6 +20,15 @@ export async function restore({ userId, body, files }: NewAttempt): Promise<void
   await putBack(files);
 }
 
+/** A page kept for use without network was made for another check than its address may ask for now. */
+function useCheckInAddress(): string | undefined {
+  return useSyncExternalStore(
+    () => () => undefined,
+    () => new URL(location.href).searchParams.get("check") ?? undefined,
+    () => undefined,
+  );
+}
+
 /** The unit on the bench: the server's picture with what is on its way laid over it, and which check is open. */
 export function useBench({ project, viewer, traveler: initial, openCheck }: BenchProps) {
   const { traveler, refresh } = useTraveler(project.slug, initial);
@@ -28,7 +37,10 @@ export function useBench({ project, viewer, traveler: initial, openCheck }: Benc
   const [told, setTold] = useState<{ checkId: string; sentence: string }>();
   const first =
     initial.checks.find((check) => check.id === openCheck) ?? nextFree(initial.checks, undefined) ?? initial.checks[0];
-  const [currentId, setCurrentId] = useState(first?.id);
+  const [chosenId, setChosenId] = useState<string>();
+  const addressed = useCheckInAddress();
+  const inAddress = initial.checks.some((check) => check.id === addressed) ? addressed : undefined;
+  const currentId = chosenId ?? inAddress ?? first?.id;
 
   useEffect(
     () =>
@@ -57,7 +69,7 @@ export function useBench({ project, viewer, traveler: initial, openCheck }: Benc
   const current = checks[index];
 
   const open = useCallback((id: string) => {
-    setCurrentId(id);
+    setChosenId(id);
     const address = new URL(location.href);
     address.searchParams.set("check", id);
     // Only the address: the page is already here, also without network.
