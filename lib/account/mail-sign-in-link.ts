@@ -3,7 +3,6 @@ import { createElement } from "react";
 import { SignInLinkMail, signInLinkSubject } from "@/emails/SignInLinkMail";
 import { log } from "@/lib/http/log";
 import { renderMail } from "@/lib/mail/render-mail";
-import { renderMail } from "@/lib/mail/render-mail";
 import { sendMail } from "@/lib/mail/send";
 import { LINK_MINUTES } from "./link-minutes";
 
