@@ -13,10 +13,9 @@ function expected(row: PageRow, asker: Asker, path: string, onward: string | und
   if (row.permission !== "public" && asker === "nobody") {
     return { status: 307, location: `/sign-in?next=${encodeURIComponent(path)}` };
   }
-  const isOfProject = row.permission !== "public" && row.permission !== "own";
-  const allowed =
-    isOfProject && asker !== "nobody" && asker !== "stranger" ? MAY[row.permission].includes(asker) : false;
-  if (isOfProject && !allowed) return { status: 404 };
+  const needed = row.permission === "public" || row.permission === "own" ? undefined : row.permission;
+  const isMember = asker !== "nobody" && asker !== "stranger";
+  if (needed && !(isMember && MAY[needed].includes(asker))) return { status: 404 };
   if (onward && asker !== "nobody") return { status: 307, location: onward };
   return { status: 200 };
 }

@@ -69,7 +69,11 @@ test("a change that another site's page sends is refused, whoever is signed in",
   for (const [name, row] of Object.entries(routes).filter(
     ([key, each]) => key.startsWith("POST") && each.permission !== "public",
   )) {
-    for (const headers of [{ "sec-fetch-site": "cross-site" }, { origin: "https://elsewhere.example" }]) {
+    const elsewhere: Record<string, string>[] = [
+      { "sec-fetch-site": "cross-site" },
+      { origin: "https://elsewhere.example" },
+    ];
+    for (const headers of elsewhere) {
       const { path, data } = row.ask(place);
       const answer = await clients.maintainer.post(path, { data, headers });
       expect(answer.status(), `${name} with ${JSON.stringify(headers)}`).toBe(403);
