@@ -8,12 +8,13 @@ export const confirmAddressSubject = "Confirm your address for Boardwake";
 export function ConfirmAddressMail({ name, link, hoursValid }: ConfirmAddressProps) {
   return (
     <Sheet
-      preheader="One press confirms that this address is yours."
-      footer="You get this because somebody signed up with this address. If it was not you, do nothing: without the press nothing is sent to you again."
+      preheader="Confirm that this address is yours."
+      footer="You get this because somebody signed up with this address. If it was not you, do nothing: without it nothing is sent to you again."
     >
       <Title>Confirm your address</Title>
       <Line>
-        Hello {name}, one press confirms that this address is yours. Then invitations and the weekly digest reach you.
+        Hello {name}, the page behind this link asks for your password once and confirms that this address is yours.
+        Then invitations and the weekly digest reach you.
       </Line>
       <Act href={link}>Confirm my address</Act>
       <Line soft>The link works for {hoursValid} hours, once.</Line>
