@@ -13,6 +13,8 @@ export function BottomSheet({ title, onClose, children, wide = false }: Props) {
   useEffect(() => {
     const shown = dialog.current;
     shown?.showModal();
+    // The dialog takes its first button; who opened it to write wants the text.
+    shown?.querySelector("textarea")?.focus();
     return () => shown?.close();
   }, []);
   return (

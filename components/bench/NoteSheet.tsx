@@ -31,7 +31,6 @@ export function NoteSheet({ note, onNote, onClose, asked }: Props) {
         <textarea
           id={id}
           value={note}
-          autoFocus
           rows={4}
           maxLength={LONGEST}
           onChange={(event) => onNote(event.currentTarget.value)}

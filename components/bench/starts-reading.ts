@@ -4,15 +4,16 @@ import { isTyping } from "./key-map";
 const BEGINS = /^[0-9.,+\-−]$/;
 
 /**
- * Typing a figure anywhere begins the reading: focusing the field on keydown lets the character land in it.
- * Returns how to stop listening.
+ * Typing a figure anywhere begins the reading. The character is handed over instead of left to the browser, which
+ * would give it to whatever had the focus before. Returns how to stop listening.
  */
-export function startsReading(focus: () => void): () => void {
+export function startsReading(begin: (character: string) => void): () => void {
   const onKeyDown = (event: KeyboardEvent) => {
     if (event.ctrlKey || event.metaKey || event.altKey || !BEGINS.test(event.key)) return;
     if (event.target instanceof HTMLElement && (isTyping(event.target) || event.target.closest("dialog"))) return;
     if (document.querySelector("dialog[open]")) return;
-    focus();
+    event.preventDefault();
+    begin(event.key);
   };
   addEventListener("keydown", onKeyDown);
   return () => removeEventListener("keydown", onKeyDown);

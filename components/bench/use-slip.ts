@@ -52,5 +52,10 @@ export function useSlip({ project, voidAttempt }: BenchProps, bench: Bench) {
     }
   }
 
-  return { slip, offer, undo, dismiss: () => setSlip(undefined) };
+  // Refused meanwhile: it is in the form again and there is nothing to take back.
+  const refused = bench.queueState.held.some(
+    (one) => one.body.id === slip?.attempt.body.id && one.trouble?.kind === "refused",
+  );
+
+  return { slip: refused ? undefined : slip, offer, undo, dismiss: () => setSlip(undefined) };
 }

@@ -1,10 +1,9 @@
 "use client";
 
-import { useEffect, useRef } from "react";
 import { NumericPad } from "@/components/bench/NumericPad";
 import { PadSlot } from "@/components/bench/PadSlot";
 import { ReadingField } from "@/components/bench/ReadingField";
-import { startsReading } from "@/components/bench/starts-reading";
+import { useTypedAnywhere } from "@/components/bench/use-typed-anywhere";
 import { LimitBar } from "@/components/ui/glyphs/LimitBar";
 import type { BenchFormProps } from "../kind";
 import { drawnLimits } from "../reading-limits";
@@ -12,12 +11,11 @@ import type { Entry, Spec } from "./schema";
 
 /** The figure as one reads it off the meter, its place between the limits, and the pad. */
 export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy, rule }: BenchFormProps<Spec, Entry>) {
-  const field = useRef<HTMLInputElement>(null);
+  const write = (typed: string) => onDraft({ typed });
+  const field = useTypedAnywhere(draft.typed, write);
   const reading = judged?.ok ? judged.readings[0] : undefined;
   const drawn = drawnLimits(spec.limits.value, spec.unit, reading?.expandedUncertainty ?? null, rule);
   const shown = reading && Number.isFinite(reading.value) ? reading.value : undefined;
-
-  useEffect(() => startsReading(() => field.current?.focus()), []);
 
   return (
     <div className="grid gap-2">
@@ -29,13 +27,13 @@ export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy, rule }
         judged={judged}
         verdict={reading?.verdict}
         disabled={busy}
-        onTyped={(typed) => onDraft({ typed })}
+        onTyped={write}
         onEnter={() => onSubmit(draft)}
       />
       <LimitBar {...drawn} value={shown} size="bench" className="px-6" />
       {judged?.ok && <p className="text-ink-soft text-sm">{judged.sentences.join(" ")}</p>}
       <PadSlot>
-        <NumericPad unit={spec.unit} typed={draft.typed} onTyped={(typed) => onDraft({ typed })} disabled={busy} />
+        <NumericPad unit={spec.unit} typed={draft.typed} onTyped={write} disabled={busy} />
       </PadSlot>
     </div>
   );

@@ -1,10 +1,10 @@
 "use client";
 
-import { useEffect, useRef, useState } from "react";
+import { useState } from "react";
 import { NumericPad } from "@/components/bench/NumericPad";
 import { PadSlot } from "@/components/bench/PadSlot";
 import { ReadingField } from "@/components/bench/ReadingField";
-import { startsReading } from "@/components/bench/starts-reading";
+import { useTypedAnywhere } from "@/components/bench/use-typed-anywhere";
 import { LimitBar } from "@/components/ui/glyphs/LimitBar";
 import type { BenchFormProps } from "../kind";
 import { drawnLimits } from "../reading-limits";
@@ -15,15 +15,14 @@ import type { Entry, Spec } from "./schema";
 
 /** One cell at a time, big; above it the whole grid, in which a touch chooses the cell. */
 export function BenchForm({ spec, draft, onDraft, judged, onSubmit, busy, rule }: BenchFormProps<Spec, Entry>) {
-  const field = useRef<HTMLInputElement>(null);
   const [at, setAt] = useState<CellPlace>(() => firstOpenCell(spec, draft) ?? { row: 0, column: 0 });
   const cells = cellsOf(spec, draft, rule);
   const cell = cells.find((one) => one.row === at.row && one.column === at.column);
 
-  useEffect(() => startsReading(() => field.current?.focus()), []);
+  const write = (typed: string) => onDraft(withCell(draft, spec.rows.length, spec.columns.length, at, typed));
+  const field = useTypedAnywhere(cell?.typed ?? "", write);
   if (!cell) return null;
 
-  const write = (typed: string) => onDraft(withCell(draft, spec.rows.length, spec.columns.length, at, typed));
   const goOn = () => {
     const next = cellAfter(spec, draft, at);
     if (next) setAt(next);
