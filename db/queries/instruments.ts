@@ -1,4 +1,4 @@
-import { and, asc, eq, isNull } from "drizzle-orm";
+import { asc, eq } from "drizzle-orm";
 import type { Queryable } from "@/db/client";
 import { instruments } from "@/db/schema/people";
 
@@ -11,13 +11,4 @@ export function listInstruments(db: Queryable, userId: string): Promise<Instrume
     .from(instruments)
     .where(eq(instruments.userId, userId))
     .orderBy(asc(instruments.archivedAt), asc(instruments.name));
-}
-
-/** Those that can be named beside a reading. */
-export function listUsableInstruments(db: Queryable, userId: string): Promise<InstrumentRow[]> {
-  return db
-    .select()
-    .from(instruments)
-    .where(and(eq(instruments.userId, userId), isNull(instruments.archivedAt)))
-    .orderBy(asc(instruments.name));
 }

@@ -36,8 +36,6 @@ export type Permission = keyof typeof PERMISSIONS;
 /** A permission of a project, or one of the two that must be written out: nobody signed in, or one's own things. */
 export type Requirement = Permission | "public" | "own";
 
-export const ROLES = everyone;
-
 /** Whether the role may do it. No role (a stranger to the project) may do nothing. */
 export function can(role: Role | undefined, permission: Permission): boolean {
   const allowed: readonly Role[] = PERMISSIONS[permission];

@@ -37,7 +37,6 @@ const token = z
 export const next = z.string().max(500).optional().transform(safeNext);
 
 export const signInInput = z.object({ email, password: givenPassword, next });
-export type SignInInput = z.output<typeof signInInput>;
 
 export const linkInput = z.object({ email, next });
 export type LinkInput = z.output<typeof linkInput>;

@@ -30,7 +30,11 @@ export type Answer<T> = { ok: true; value: T } | { ok: false; error: Refusal };
 
 export const ok = <T>(value: T): Answer<T> => ({ ok: true, value });
 
-export function refuse(code: ErrorCode, message: string, more: Omit<Refusal, "code" | "message"> = {}): { ok: false; error: Refusal } {
+export function refuse(
+  code: ErrorCode,
+  message: string,
+  more: Omit<Refusal, "code" | "message"> = {},
+): { ok: false; error: Refusal } {
   return { ok: false, error: { code, message, ...more } };
 }
 

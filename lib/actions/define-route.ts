@@ -17,7 +17,12 @@ type Definition<Need extends Requirement, Schema extends z.ZodType> = {
   /** Of path parameters, query and JSON body together; the path wins. */
   input: Schema;
   /** Most routes answer JSON; a Response (a file, a redirect) is passed on as it is. */
-  run: (scope: ScopeFor<Need>, input: z.output<Schema>, call: Call, request: Request) => Promise<Answer<unknown> | Response>;
+  run: (
+    scope: ScopeFor<Need>,
+    input: z.output<Schema>,
+    call: Call,
+    request: Request,
+  ) => Promise<Answer<unknown> | Response>;
   /** Set false only for machine-to-machine posts that prove themselves otherwise (one-click unsubscribe). */
   browserOnly?: boolean;
 };
@@ -28,15 +33,22 @@ export type Route = ((request: Request, context: Context) => Promise<Response>) 
 };
 
 /** The one chain of a route handler: session → permission → schema → use case → JSON or an RFC 9457 problem. */
-export function defineRoute<Need extends Requirement, Schema extends z.ZodType>(definition: Definition<Need, Schema>): Route {
+export function defineRoute<Need extends Requirement, Schema extends z.ZodType>(
+  definition: Definition<Need, Schema>,
+): Route {
   async function perform(request: Request, context: Context, call: Call): Promise<Answer<unknown> | Response> {
     const changes = request.method !== "GET" && request.method !== "HEAD";
     if (changes && definition.browserOnly !== false && !sameOrigin(request)) {
       return refuse("forbidden", "The request came from another site. Nothing was changed.");
     }
-    const params = await context.params;
+    // A route without a part in brackets is given none.
+    const params = (await context.params) ?? {};
     const viewer: Viewer | undefined = await currentViewer();
-    const granted = await authorise(definition.permission, viewer, typeof params.project === "string" ? params.project : undefined);
+    const granted = await authorise(
+      definition.permission,
+      viewer,
+      typeof params.project === "string" ? params.project : undefined,
+    );
     if (!granted.ok) return granted;
     const body = changes && request.headers.get("content-type")?.includes("json") ? await readJson(request) : undefined;
     if (body && !body.ok) return body;
@@ -44,7 +56,9 @@ export function defineRoute<Need extends Requirement, Schema extends z.ZodType>(
     const fromBody = z.record(z.string(), z.unknown()).safeParse(body?.value);
     const parsed = await definition.input.safeParseAsync({ ...query, ...(fromBody.data ?? {}), ...params });
     if (!parsed.success) {
-      return refuse("invalid", "Something in the request is not valid. Nothing was changed.", { fields: fieldErrors(parsed.error) });
+      return refuse("invalid", "Something in the request is not valid. Nothing was changed.", {
+        fields: fieldErrors(parsed.error),
+      });
     }
     // authorise() answers with the scope that this requirement names; the compiler cannot follow the correlation.
     return definition.run(granted.value as ScopeFor<Need>, parsed.data, call, request);
@@ -52,10 +66,14 @@ export function defineRoute<Need extends Requirement, Schema extends z.ZodType>(
 
   const handler = async (request: Request, context: Context): Promise<Response> => {
     const call = callFrom(request.headers);
-    const answer = await perform(request, context, call).catch((error: unknown) => answerForError(error, call, definition.name));
+    const answer = await perform(request, context, call).catch((error: unknown) =>
+      answerForError(error, call, definition.name),
+    );
     if (answer instanceof Response) return answer;
     if (!answer.ok) return problem(answer.error, call.requestId);
-    return Response.json(answer.value ?? null, { headers: { "cache-control": "no-store", "x-request-id": call.requestId } });
+    return Response.json(answer.value ?? null, {
+      headers: { "cache-control": "no-store", "x-request-id": call.requestId },
+    });
   };
   return Object.assign(handler, { definition: { name: definition.name, permission: definition.permission } });
 }

@@ -21,7 +21,10 @@ export async function change<Value>(write: Write, work: (tx: Transaction) => Pro
         .returning({ id: writes.id });
       if (fresh.length === 0) return await firstAnswer<Value>(tx, write);
       const done = await work(tx);
-      await tx.update(writes).set({ answer: done ?? null }).where(eq(writes.id, write.writeId));
+      await tx
+        .update(writes)
+        .set({ answer: done ?? null })
+        .where(eq(writes.id, write.writeId));
       return done;
     });
     return ok(value);
@@ -34,7 +37,10 @@ export async function change<Value>(write: Write, work: (tx: Transaction) => Pro
 async function firstAnswer<Value>(tx: Transaction, write: Write): Promise<Value> {
   const [row] = await tx.select().from(writes).where(eq(writes.id, write.writeId));
   if (!row || row.action !== write.action || row.userId !== write.userId) {
-    throw new RefusalError({ code: "conflict", message: "This write id was used for something else. Nothing was changed." });
+    throw new RefusalError({
+      code: "conflict",
+      message: "This write id was used for something else. Nothing was changed.",
+    });
   }
   // What this very action stored under this id: the same type by construction.
   return row.answer as Value;

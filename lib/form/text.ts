@@ -1,9 +1,7 @@
 import { z } from "zod";
 
 /** C0 and C1 controls, which no keyboard types on purpose; tab and line breaks are allowed where lines are. */
-// eslint-disable-next-line no-control-regex
 const CONTROLS_IN_LINE = /[\u0000-\u001f\u007f-\u009f\u2028\u2029]/;
-// eslint-disable-next-line no-control-regex
 const CONTROLS_IN_LINES = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f]/;
 
 /** Half of a surrogate pair is no character; PostgreSQL would refuse it. */

@@ -18,7 +18,11 @@ const TITLES: Record<Refusal["code"], string> = {
 /** An RFC 9457 problem document. */
 export function problem(refusal: Refusal, requestId: string): Response {
   const status = STATUS[refusal.code];
-  const headers = new Headers({ "content-type": "application/problem+json", "cache-control": "no-store", "x-request-id": requestId });
+  const headers = new Headers({
+    "content-type": "application/problem+json",
+    "cache-control": "no-store",
+    "x-request-id": requestId,
+  });
   const retryAfter = refusal.details?.retryAfterSeconds;
   if (typeof retryAfter === "number") headers.set("retry-after", String(retryAfter));
   const body = {

@@ -21,5 +21,3 @@ export type SendOptions = {
   idempotencyKey: string;
   timeoutMs: number;
 };
-
-export type Transport = (message: Message, options: SendOptions) => Promise<Sent>;

@@ -6,7 +6,6 @@ import { PasswordField, type PasswordFieldProps } from "../PasswordField";
 import { QuantityField } from "../QuantityField";
 import { RadioGroup, type RadioGroupProps } from "../RadioGroup";
 import { Select, type SelectProps } from "../Select";
-import { Switch, type SwitchProps } from "../Switch";
 import { TextArea, type TextAreaProps } from "../TextArea";
 import { TextField, type TextFieldProps } from "../TextField";
 import { asText, useBound } from "./useBound";
@@ -54,9 +53,4 @@ export function FormRadioGroup({ name, ...rest }: Bound<RadioGroupProps>) {
 export function FormCheckbox({ name, ...rest }: Bound<CheckboxProps>) {
   const { value, ...bound } = useBound(name);
   return <Checkbox {...rest} {...bound} value={value === true} />;
-}
-
-export function FormSwitch({ name, ...rest }: Bound<SwitchProps>) {
-  const { value, error: _error, ...bound } = useBound(name);
-  return <Switch {...rest} {...bound} value={value === true} />;
 }
