@@ -136,7 +136,11 @@ export function CheckForm({ initial, own, checks, save, onDone, onCancel }: Prop
           others={checks.filter((check) => check.key !== own)}
         />
         <TextField label="Reference" maxLength={200} placeholder="IPC-A-610, in outline" {...text("reference")} />
-        {failure && <Notice kind="error">{failure.message}</Notice>}
+        {failure && (
+          <div ref={intoView}>
+            <Notice kind="error">{failure.message}</Notice>
+          </div>
+        )}
         {failure?.code === "conflict" && own !== undefined && (
           <TheirCheck theirs={checks.find((check) => check.key === own)} yours={draft} />
         )}
@@ -151,6 +155,9 @@ export function CheckForm({ initial, own, checks, save, onDone, onCancel }: Prop
     </div>
   );
 }
+
+/** Of one identity, so that it scrolls when the sentence appears and not at every key press after. */
+const intoView = (node: HTMLElement | null) => node?.scrollIntoView({ block: "center" });
 
 /** Problems under a path, with the path cut off: what the kind's own form expects. */
 function under(problems: Record<string, string>, path: string): Record<string, string> {
