@@ -1,22 +1,16 @@
 "use client";
 
 import { useEffect, useMemo, useRef, useState } from "react";
-import { Notice } from "@/components/ui/Notice";
 import type { BenchProps } from "./bench-props";
-import { BenchButton } from "./BenchButton";
 import { BenchSheets, type OpenSheet } from "./BenchSheets";
 import { BenchTop } from "./BenchTop";
-import { CheckBody } from "./CheckBody";
-import { CheckTools } from "./CheckTools";
+import { CheckColumn } from "./CheckColumn";
 import { EntryPanel } from "./EntryPanel";
 import { EvidenceStrip } from "./EvidenceStrip";
 import { FileInputs } from "./FileInputs";
-import { InstrumentPicker } from "./InstrumentPicker";
 import { keepOffline } from "./keep-offline";
-import { LastAttempts } from "./LastAttempts";
 import { Pad } from "./PadSlot";
 import { clearFiles } from "./queue/file-shelf";
-import { RefusedNotice } from "./RefusedNotice";
 import { acceptFor, kindsWanted, takeFiles } from "./take-files";
 import { UndoBar } from "./UndoBar";
 import { useBench } from "./use-bench";
@@ -94,68 +88,17 @@ export function BenchScreen(props: BenchProps) {
         <NothingHere known={Boolean(current)} unitHref={unitHref} />
       ) : (
         <div className="mx-auto flex min-h-0 w-full max-w-5xl flex-1 flex-col lg:grid lg:grid-cols-[1fr_26rem]">
-          <main className="min-h-0 flex-1 overflow-y-auto overscroll-contain px-4 pt-4 pb-6">
-            <CheckBody
-              check={current}
-              board={traveler.board}
-              expected={kind.expected(current.spec)}
-              measured={kind.measured}
-            >
-              {bench.told && (
-                <Notice
-                  kind="info"
-                  actions={
-                    <BenchButton size="md" onClick={bench.dismissTold}>
-                      Seen
-                    </BenchButton>
-                  }
-                  role="status"
-                >
-                  {bench.told}
-                </Notice>
-              )}
-              {bench.refused.map((attempt) => (
-                <RefusedNotice
-                  key={attempt.body.id}
-                  attempt={attempt}
-                  onRetry={() => void bench.queue().retry(attempt)}
-                  onDiscard={() => void bench.queue().withdraw(attempt.body.id)}
-                />
-              ))}
-              {kind.measured && (
-                <InstrumentPicker
-                  fitting={recording.instrument.fitting}
-                  chosen={recording.instrument.instrument}
-                  onChoose={recording.instrument.choose}
-                  settingsHref="/settings/instruments"
-                />
-              )}
-              {recording.note && (
-                <button
-                  type="button"
-                  onClick={() => setSheet("note")}
-                  className="border-rule bg-raised rounded-md border px-4 py-3 text-left"
-                >
-                  <span className="text-ink-soft block text-sm">Note with this attempt</span>
-                  <span className="whitespace-pre-line">{recording.note}</span>
-                </button>
-              )}
-              <LastAttempts
-                attempts={current.attempts}
-                coming={bench.coming}
-                historyHref={`${unitHref}?check=${current.id}`}
-                zone={viewer.timeZone}
-              />
-              <CheckTools
-                hasPrevious={bench.index > 0}
-                hasNext={bench.index < bench.checks.length - 1}
-                onStep={bench.step}
-                reading={read}
-                onKeys={() => setSheet("keys")}
-                onFile={may.attach ? () => chooser.current?.click() : undefined}
-              />
-            </CheckBody>
-          </main>
+          <CheckColumn
+            bench={bench}
+            recording={recording}
+            current={current}
+            kind={kind}
+            unitHref={unitHref}
+            zone={viewer.timeZone}
+            reading={read}
+            onSheet={setSheet}
+            onFile={may.attach ? () => chooser.current?.click() : undefined}
+          />
           <section
             aria-label="Record"
             className="border-rule bg-sheet flex max-h-[calc(100dvh-6.5rem)] shrink-0 flex-col gap-2 border-t px-4 pt-3 pb-[max(0.75rem,env(safe-area-inset-bottom))] lg:self-start lg:border-t-0 lg:pt-6"
