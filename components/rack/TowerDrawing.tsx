@@ -6,7 +6,8 @@ import { CardLink } from "./CardLink";
 import { BackplaneFoot } from "./BackplaneFoot";
 import { CardStages, stageRoom } from "./CardStages";
 import { EdgeConnector } from "./EdgeConnector";
-import { slotAddress, unitAddress } from "./rack-addresses";
+import { EmptySlot } from "./EmptySlot";
+import { unitAddress } from "./rack-addresses";
 import { useSlotWalk } from "./slot-walk";
 
 type Props = {
@@ -138,26 +139,5 @@ export function NextMark() {
     <span className="absolute -top-2.5 right-3 z-10 rounded-sm bg-copper px-2 text-2xs font-semibold leading-[1.125rem] text-on-copper">
       next on the bench
     </span>
-  );
-}
-
-function EmptySlot({ slot, project, canPlace, stop }: Pick<RowProps, "slot" | "project" | "canPlace" | "stop">) {
-  const wanted = slot.board ? `Wired for ${slot.board.name}.` : "Takes any card.";
-  return (
-    <CardLink
-      href={project && slotAddress(project, slot.position)}
-      {...stop}
-      className="ml-3 flex min-w-0 flex-1 items-center rounded-md border border-dashed border-rule-strong bg-sheet/70 no-underline hover:border-ink-soft sm:ml-4"
-    >
-      <span className="-ml-3 flex max-h-12 self-center sm:-ml-4">
-        <EdgeConnector type={slot.board?.connectorType ?? null} isEmpty />
-      </span>
-      <span className="flex flex-wrap gap-x-3 px-3 py-1.5 text-sm text-ink-soft @3xl:pl-4">
-        <span className="font-semibold">empty slot</span>
-        <span>
-          {wanted} {canPlace ? "Put a unit in." : "Its pins stay open."}
-        </span>
-      </span>
-    </CardLink>
   );
 }
