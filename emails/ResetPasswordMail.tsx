@@ -1,14 +1,14 @@
 import { Sheet } from "./parts/Sheet";
 import { Act, Line, PlainAddress, Title } from "./parts/Words";
 
-export type ResetPasswordProps = { name: string; link: string; minutesValid: number };
+export type ResetPasswordProps = { name: string; link: string; hoursValid: number };
 
 export const resetPasswordSubject = "Set a new password for Boardwake";
 
-export function ResetPasswordMail({ name, link, minutesValid }: ResetPasswordProps) {
+export function ResetPasswordMail({ name, link, hoursValid }: ResetPasswordProps) {
   return (
     <Sheet
-      preheader={`Works for ${minutesValid} minutes, once.`}
+      preheader={`Works for ${hoursValid} hours, once.`}
       footer="You get this because somebody asked to reset the password of this address. If it was not you, do nothing: the old password stays."
     >
       <Title>Set a new password</Title>
@@ -17,7 +17,7 @@ export function ResetPasswordMail({ name, link, minutesValid }: ResetPasswordPro
         out then.
       </Line>
       <Act href={link}>Choose a new password</Act>
-      <Line soft>The link works for {minutesValid} minutes, once.</Line>
+      <Line soft>The link works for {hoursValid} hours, once.</Line>
       <PlainAddress href={link} />
     </Sheet>
   );

@@ -52,10 +52,11 @@ export function Act({ href, children }: { href: string; children: string }) {
   );
 }
 
-/** The address in full, for readers that strip buttons and for people who copy. */
+/** The address in full, for readers that strip buttons and for people who copy; the text form has it anyway. */
 export function PlainAddress({ href }: { href: string }) {
   return (
     <Text
+      data-skip-in-text="true"
       className="bw-soft"
       style={{ color: light.inkSoft, fontSize: 13, lineHeight: "20px", margin: 0, wordBreak: "break-all" }}
     >

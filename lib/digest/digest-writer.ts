@@ -43,6 +43,13 @@ export function createDigestWriter(week: ProjectWeek) {
   }
 
   return {
+    /** As somebody looks at it before it goes out: the address to end it is the page of one's settings. */
+    async preview(span: Span, zone: string): Promise<Written> {
+      const written = await digestFor({ ...span, zone });
+      const own = (form: string) => form.replaceAll(OWN_ADDRESS, appLink("/settings/digest"));
+      return { ...written, html: own(written.html), text: own(written.text) };
+    },
+
     /** Undefined in a quiet week of somebody who wants no mail then. */
     async write(reader: Reader): Promise<Message | undefined> {
       const { subject, html, text, inline, isQuiet } = await digestFor(reader);

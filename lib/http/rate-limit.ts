@@ -23,6 +23,8 @@ export const LIMITS = {
   "mail-ip": { points: 40, seconds: HOUR, what: "Too many mails were asked for from your connection." },
   /** By person who invites. */
   invitations: { points: 40, seconds: HOUR, what: "You have sent many invitations in the last hour." },
+  /** By person who sends the weekly e-mail to themselves. */
+  previews: { points: 20, seconds: HOUR, what: "You have sent yourself many previews in the last hour." },
   /** By person who uploads. */
   uploads: { points: 300, seconds: 10 * MINUTE, what: "You have uploaded many files in the last ten minutes." },
 } as const satisfies Record<string, { points: number; seconds: number; what: string }>;

@@ -8,7 +8,7 @@ import { appLink } from "./app-link";
 import type { Message } from "./message";
 import { renderMail } from "./render-mail";
 
-const MINUTE = 60_000;
+const HOUR = 3_600_000;
 
 /** The mail that confirms an address or sets a new password; undefined once the link is used, replaced or expired. */
 export async function accountMail(id: string): Promise<Message | undefined> {
@@ -17,12 +17,12 @@ export async function accountMail(id: string): Promise<Message | undefined> {
   const { token, email } = row;
   const name = row.name ?? email;
   const secret = tokenFor(token.purpose, id);
-  const minutesValid = Math.round((token.expiresAt.getTime() - token.createdAt.getTime()) / MINUTE);
+  const hoursValid = Math.round((token.expiresAt.getTime() - token.createdAt.getTime()) / HOUR);
   if (token.purpose === "confirm-address") {
     const link = appLink(`/confirm/${secret}`);
-    const mail = createElement(ConfirmAddressMail, { name, link, hoursValid: Math.round(minutesValid / 60) });
+    const mail = createElement(ConfirmAddressMail, { name, link, hoursValid });
     return { to: email, subject: confirmAddressSubject, ...(await renderMail(mail)) };
   }
-  const mail = createElement(ResetPasswordMail, { name, link: appLink(`/reset/${secret}`), minutesValid });
+  const mail = createElement(ResetPasswordMail, { name, link: appLink(`/reset/${secret}`), hoursValid });
   return { to: email, subject: resetPasswordSubject, ...(await renderMail(mail)) };
 }
