@@ -11,6 +11,7 @@ import { accountRows } from "./action-rows/account";
 import { boardRows } from "./action-rows/boards";
 import { evidenceRows } from "./action-rows/evidence";
 import { peopleRows } from "./action-rows/people";
+import { procedureRows } from "./action-rows/procedures";
 import type { ProjectRow, Row, Rows } from "./action-rows/row";
 import { travelerRows } from "./action-rows/travelers";
 import { actionFiles, root } from "./exported-actions";
@@ -20,7 +21,14 @@ import { contentsOf, wholeDatabase } from "./whole-database";
 
 useDatabase();
 
-const table: Record<string, Rows> = { ...accountRows, ...boardRows, ...evidenceRows, ...peopleRows, ...travelerRows };
+const table: Record<string, Rows> = {
+  ...accountRows,
+  ...boardRows,
+  ...evidenceRows,
+  ...peopleRows,
+  ...procedureRows,
+  ...travelerRows,
+};
 type Listed = { file: string; name: string; row: Row };
 const listed: Listed[] = Object.entries(table).flatMap(([file, rows]) =>
   Object.entries(rows).map(([name, row]) => ({ file, name, row })),

@@ -27,6 +27,10 @@ export const pages: Record<string, PageRow> = {
   "app/(account)/(entry)/sign-in/link/page.tsx": { permission: "public", path: () => "/sign-in/link" },
   "app/(account)/(entry)/sign-in/page.tsx": { permission: "public", path: () => "/sign-in", ...signedInGoOn },
   "app/(account)/(entry)/sign-up/page.tsx": { permission: "public", path: () => "/sign-up", ...signedInGoOn },
+  "app/(account)/(entry)/unsubscribe/[subscription]/[token]/page.tsx": {
+    permission: "public",
+    path: () => `/unsubscribe/${"0".repeat(8)}-0000-4000-8000-${"0".repeat(12)}/${"u".repeat(43)}`,
+  },
   "app/(account)/settings/page.tsx": { permission: "own", path: () => "/settings" },
   "app/(account)/settings/digest/page.tsx": { permission: "own", path: () => "/settings/digest" },
   "app/(account)/settings/instruments/page.tsx": { permission: "own", path: () => "/settings/instruments" },
@@ -69,6 +73,7 @@ export const pages: Record<string, PageRow> = {
     path: (place) => of(`/log/${place.entry}/edit`)(place),
   },
   "app/(workshop)/projects/[project]/people/page.tsx": { permission: "project.see", path: of("/people") },
+  "app/(workshop)/projects/[project]/digest/page.tsx": { permission: "digest.preview", path: of("/digest") },
   "app/(workshop)/projects/[project]/search/page.tsx": { permission: "project.see", path: of("/search") },
   "app/(workshop)/projects/[project]/settings/page.tsx": { permission: "project.archive", path: of("/settings") },
 };

@@ -22,7 +22,7 @@ export const routes: Record<string, RouteRow> = {
     status: 302,
   },
   "GET app/api/health/route.ts": { permission: "public", ask: () => ({ path: "/api/health" }), status: 200 },
-  "GET app/api/health/live/route.ts": { permission: "public", ask: () => ({ path: "/api/health/live" }), status: 200 },
+  "GET app/api/health/live/route.ts": { permission: "public", ask: () => ({ path: "/api/health/live" }), status: 204 },
   "POST app/api/projects/[project]/attempts/route.ts": {
     permission: "attempt.record",
     ask: (place) => ({
@@ -51,6 +51,12 @@ export const routes: Record<string, RouteRow> = {
     permission: "project.see",
     ask: (place) => ({ path: of(place, "/units/TIM-01/traveler") }),
     status: 200,
+  },
+  "POST app/api/unsubscribe/[subscription]/[token]/route.ts": {
+    permission: "public",
+    // The mail's address is the proof; one that was made up ends nothing.
+    ask: () => ({ path: `/api/unsubscribe/${randomUUID()}/${"u".repeat(43)}` }),
+    status: 404,
   },
   "POST app/api/uploadthing/route.ts": {
     permission: "evidence.attach",

@@ -14,6 +14,10 @@ export const accountRows: Record<string, Rows> = {
     sendSignInLink: { permission: "public" },
   },
   "app/(account)/(entry)/sign-up/actions.ts": { signUp: { permission: "public" } },
+  "app/(account)/(entry)/unsubscribe/[subscription]/[token]/actions.ts": {
+    unsubscribe: { permission: "public" },
+    subscribeAgain: { permission: "public" },
+  },
   "app/(account)/settings/actions.ts": { saveProfile: { permission: "own" } },
   "app/(account)/settings/digest/actions.ts": {
     updateSubscription: {

@@ -1,0 +1,86 @@
+import AxeBuilder from "@axe-core/playwright";
+import { eq } from "drizzle-orm";
+import type { Page } from "@playwright/test";
+import { database } from "@/db/client";
+import { users } from "@/db/schema/people";
+import { DEMO_ACCOUNTS } from "@/db/seed/accounts";
+import { one } from "../support/database";
+import { signInAs } from "../support/session";
+import { expect, test } from "./journey";
+
+const demo = (path: string) => `/projects/tide-computer${path}`;
+
+/** Every kind of page, on the demo's data: only looked at. */
+const OPEN = ["/", "/safety", "/sign-in", "/sign-up", "/forgot", "/check-email", "/nothing-here"];
+const OWN = [
+  "/settings",
+  "/settings/password",
+  "/settings/instruments",
+  "/settings/digest",
+  "/projects",
+  "/projects/new",
+];
+const MACHINE = [
+  ...[
+    "/rack",
+    "/rack?as=table",
+    "/boards",
+    "/boards/TIM",
+    "/boards/TIM/procedure",
+    "/units/TIM-01",
+    "/units/TIM-01/print",
+  ],
+  ...["/bench", "/bench/TIM-01", "/captures", "/log", "/log/new", "/people", "/settings", "/search?q=clock", "/digest"],
+];
+const THEMES = ["light", "dark"] as const;
+const LEVELS = ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa", "best-practice"];
+
+async function asMaintainer(page: Page): Promise<void> {
+  const [account] = DEMO_ACCOUNTS;
+  const user = one(
+    await database()
+      .select()
+      .from(users)
+      .where(eq(users.email, account?.email ?? "")),
+  );
+  await signInAs(page.context(), { userId: user.id });
+}
+
+async function violations(page: Page): Promise<string[]> {
+  const { violations: found } = await new AxeBuilder({ page }).withTags(LEVELS).analyze();
+  return found.flatMap(({ id, nodes }) =>
+    nodes.map(({ target, failureSummary }) => `${id} ${target.join(" ")}: ${failureSummary}`),
+  );
+}
+
+const sideways = (page: Page) =>
+  page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
+
+for (const path of [...OPEN, ...OWN, ...MACHINE.map(demo)]) {
+  test(`${path} has no fault that axe knows, in light and in dark`, async ({ page }) => {
+    if (!OPEN.includes(path)) await asMaintainer(page);
+    await page.emulateMedia({ reducedMotion: "reduce", colorScheme: "light" });
+    await page.goto(path);
+    await expect(page.getByRole("heading", { level: 1 })).toHaveCount(1);
+    expect(await page.title()).toMatch(/\S.*Boardwake/);
+    for (const colorScheme of THEMES) {
+      await page.emulateMedia({ colorScheme });
+      expect(await violations(page), colorScheme).toEqual([]);
+    }
+    expect(await sideways(page), "pixels to scroll sideways").toBe(0);
+  });
+}
+
+test("No page has to be scrolled sideways at 320 pixels @phone", async ({ page }) => {
+  await page.setViewportSize({ width: 320, height: 640 });
+  const look = async (paths: string[]) => {
+    for (const path of paths) {
+      await page.goto(path);
+      await expect(page.getByRole("heading", { level: 1 })).toHaveCount(1);
+      expect.soft(await sideways(page), path).toBe(0);
+    }
+  };
+  await look(OPEN);
+  await asMaintainer(page);
+  await look([...OWN, ...MACHINE.filter((path) => !path.endsWith("/print")).map(demo)]);
+});
