@@ -10,6 +10,7 @@ import { ToastRegion } from "@/components/ui/ToastRegion";
 /** One language on server and client: the reader's own locale would make the first client render differ. */
 const LOCALE = "en-GB";
 
+/** For every place but the bench, which stays light and needs none of it. */
 export function Providers({ children }: { children: ReactNode }) {
   const router = useRouter();
   const [client] = useState(() => new QueryClient({ defaultOptions: { queries: { staleTime: 5_000, retry: 1 } } }));

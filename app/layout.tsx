@@ -4,7 +4,6 @@ import type { ReactNode } from "react";
 import { asTheme, THEME_COOKIE } from "@/components/ui/theme";
 import { faces } from "./fonts";
 import "./globals.css";
-import { Providers } from "./Providers";
 
 const description =
   "Build log and bring-up tracker for machines made of several circuit boards: what was measured, what it proves, what to do next.";
@@ -33,9 +32,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
   const theme = asTheme((await cookies()).get(THEME_COOKIE)?.value);
   return (
     <html lang="en-GB" data-theme={theme} className={faces}>
-      <body>
-        <Providers>{children}</Providers>
-      </body>
+      <body>{children}</body>
     </html>
   );
 }
