@@ -13,6 +13,15 @@ export async function findUnitBySerial(db: Queryable, scope: InProject, serial: 
   return row;
 }
 
+export async function findUnit(db: Queryable, scope: InProject, unitId: string) {
+  const [row] = await db
+    .select()
+    .from(units)
+    .where(and(eq(units.projectId, scope.projectId), eq(units.id, unitId)))
+    .limit(1);
+  return row;
+}
+
 /** The row stays locked until the transaction ends: changes of one unit come one after another. */
 export async function lockUnit(db: Queryable, scope: InProject, unitId: string) {
   const [row] = await db

@@ -23,6 +23,7 @@ export const PERMISSIONS = {
   "concession.grant": maintainers,
   "hold.lift": maintainers,
   "board.edit": maintainers,
+  "board.purge": maintainers,
   "project.edit": maintainers,
   "member.manage": maintainers,
   "digest.preview": maintainers,

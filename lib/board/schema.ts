@@ -36,6 +36,12 @@ export type EditBoardInput = z.output<typeof editBoardInput>;
 export const changeBoardInput = z.object({ project: z.string(), writeId, boardId: z.uuid() });
 export type ChangeBoardInput = z.output<typeof changeBoardInput>;
 
+export const purgeBoardInput = changeBoardInput.extend({
+  /** The code of the board, typed by hand. */
+  confirmation: z.string({ message: "Type the code of the board." }).trim(),
+});
+export type PurgeBoardInput = z.output<typeof purgeBoardInput>;
+
 export const createRevisionInput = z.object({
   project: z.string(),
   writeId,

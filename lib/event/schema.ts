@@ -4,6 +4,8 @@ const text = z.string();
 const reason = z.object({ reason: text });
 const check = z.object({ serial: text, title: text });
 const change = z.object({ what: text });
+/** What a purge took; waits are the prerequisites of other units that went with it. */
+const gone = { checks: z.number(), attempts: z.number(), files: z.number(), waits: z.number() };
 
 /**
  * The kinds of event and what each carries: enough to write its sentence without another query.
@@ -23,12 +25,14 @@ export const eventPayloads = {
   "board.edited": z.object({ code: text, name: text }),
   "board.archived": z.object({ code: text, name: text }),
   "board.restored": z.object({ code: text, name: text }),
+  "board.purged": z.object({ code: text, name: text, units: z.number(), ...gone }),
   "revision.created": z.object({ code: text, letter: text }),
   "revision.released": z.object({ code: text, letter: text }),
   "unit.created": z.object({ serial: text }),
   "unit.edited": z.object({ serial: text }),
   "unit.archived": z.object({ serial: text }),
   "unit.restored": z.object({ serial: text }),
+  "unit.purged": z.object({ serial: text, ...gone }),
   "slot.created": z.object({ position: z.number() }),
   "slot.edited": z.object({ position: z.number() }),
   "slot.archived": z.object({ position: z.number() }),

@@ -51,6 +51,10 @@ export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
   "board.edited": ({ code, name }, { who, board }) => [who, " changed the board ", board(code, name), "."],
   "board.archived": ({ code, name }, { who, board }) => [who, " archived the board ", board(code, name), "."],
   "board.restored": ({ code, name }, { who, board }) => [who, " restored the board ", board(code, name), "."],
+  "board.purged": ({ code, name, units, ...gone }, { who }) => [
+    who,
+    ` purged the board ${code} ${name} for good: ${count(units, "unit")}, ${whatWent(gone)}.`,
+  ],
   "revision.created": ({ code, letter }, { who, board }) => [who, ` added revision ${letter} of `, board(code), "."],
   "revision.released": ({ code, letter }, { who, board }) => [
     who,
@@ -62,6 +66,7 @@ export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
   "unit.edited": ({ serial }, { who, unit }) => [who, " changed the unit ", unit(serial), "."],
   "unit.archived": ({ serial }, { who, unit }) => [who, " archived the unit ", unit(serial), "."],
   "unit.restored": ({ serial }, { who, unit }) => [who, " restored the unit ", unit(serial), "."],
+  "unit.purged": ({ serial, ...gone }, { who }) => [who, ` purged the unit ${serial} for good: ${whatWent(gone)}.`],
   "slot.created": ({ position }, { who, slots }) => [who, " added ", slots(`slot ${position}`), "."],
   "slot.edited": ({ position }, { who, slots }) => [who, " changed ", slots(`slot ${position}`), "."],
   "slot.archived": ({ position }, { who, slots }) => [who, " archived ", slots(`slot ${position}`), "."],
@@ -192,5 +197,12 @@ export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
   "log.archived": ({ title }, { who, entry }) => [who, " archived ", entry(title), "."],
   "log.restored": ({ title }, { who, entry }) => [who, " restored ", entry(title), "."],
 };
+
+type Gone = { checks: number; attempts: number; files: number; waits: number };
+
+function whatWent({ checks, attempts, files, waits }: Gone): string {
+  const own = `${count(checks, "check")}, ${count(attempts, "attempt")} and ${count(files, "file")} went`;
+  return waits === 0 ? own : `${own}, and ${count(waits, "prerequisite")} of other units`;
+}
 
 const count = (n: number, word: string) => `${n} ${word}${n === 1 ? "" : "s"}`;

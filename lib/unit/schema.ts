@@ -37,3 +37,9 @@ export const changeUnitInput = z.object({
   unitId: z.uuid({ message: "Choose a unit." }),
 });
 export type ChangeUnitInput = z.output<typeof changeUnitInput>;
+
+export const purgeUnitInput = changeUnitInput.extend({
+  /** The serial number of the unit, typed by hand. */
+  confirmation: z.string({ message: "Type the serial number of the unit." }).trim(),
+});
+export type PurgeUnitInput = z.output<typeof purgeUnitInput>;

@@ -31,6 +31,7 @@ export const MAY: Record<Permission, readonly Role[]> = {
   "member.manage": maintainers,
   "digest.preview": maintainers,
   "project.archive": maintainers,
+  "board.purge": maintainers,
   // own digest; leaving
   "digest.own": everyone,
   "membership.leave": everyone,

@@ -14,6 +14,7 @@ const context: SentenceContext = {
 const check = { serial: "CON-01", title: "Rise time of CLK" };
 const because = { ...check, reason: "Read with the old table" };
 const board = { code: "CON", name: "Constituent M2" };
+const gone = { checks: 12, attempts: 30, files: 1, waits: 2 };
 const file = { kind: "photo", fileName: "U3.jpg" };
 
 /** For every kind one payload and what is said of it: the record does not compile when a kind is missing. */
@@ -34,12 +35,20 @@ const SAID: { [Kind in EventKind]: [EventPayload<Kind>, string] } = {
   "board.edited": [board, "Mira changed the board CON Constituent M2."],
   "board.archived": [board, "Mira archived the board CON Constituent M2."],
   "board.restored": [board, "Mira restored the board CON Constituent M2."],
+  "board.purged": [
+    { ...board, units: 1, ...gone, waits: 0 },
+    "Mira purged the board CON Constituent M2 for good: 1 unit, 12 checks, 30 attempts and 1 file went.",
+  ],
   "revision.created": [{ code: "CON", letter: "B" }, "Mira added revision B of CON."],
   "revision.released": [{ code: "CON", letter: "B" }, "Mira released revision B of CON."],
   "unit.created": [{ serial: "CON-01" }, "Mira added the unit CON-01."],
   "unit.edited": [{ serial: "CON-01" }, "Mira changed the unit CON-01."],
   "unit.archived": [{ serial: "CON-01" }, "Mira archived the unit CON-01."],
   "unit.restored": [{ serial: "CON-01" }, "Mira restored the unit CON-01."],
+  "unit.purged": [
+    { serial: "CON-01", ...gone },
+    "Mira purged the unit CON-01 for good: 12 checks, 30 attempts and 1 file went, and 2 prerequisites of other units.",
+  ],
   "slot.created": [{ position: 3 }, "Mira added slot 3."],
   "slot.edited": [{ position: 3 }, "Mira changed slot 3."],
   "slot.archived": [{ position: 3 }, "Mira archived slot 3."],

@@ -5,6 +5,7 @@ import { archiveBoard as archive } from "@/lib/board/archive-board";
 import { createBoard as create } from "@/lib/board/create-board";
 import { createRevision as begin } from "@/lib/board/create-revision";
 import { editBoard as edit } from "@/lib/board/edit-board";
+import { purgeBoard as purge } from "@/lib/board/purge-board";
 import { releaseRevision as release } from "@/lib/board/release-revision";
 import { restoreBoard as restore } from "@/lib/board/restore-board";
 import {
@@ -12,6 +13,7 @@ import {
   createBoardInput,
   createRevisionInput,
   editBoardInput,
+  purgeBoardInput,
   releaseRevisionInput,
 } from "@/lib/board/schema";
 
@@ -24,6 +26,13 @@ export const editBoard = defineAction({ name: "edit-board", permission, input: e
 export const archiveBoard = defineAction({ name: "archive-board", permission, input: changeBoardInput, run: archive });
 
 export const restoreBoard = defineAction({ name: "restore-board", permission, input: changeBoardInput, run: restore });
+
+export const purgeBoard = defineAction({
+  name: "purge-board",
+  permission: "board.purge",
+  input: purgeBoardInput,
+  run: purge,
+});
 
 export const createRevision = defineAction({
   name: "create-revision",
