@@ -45,7 +45,7 @@ function Frame({ html, title, width }: { html: string; title: string; width: str
       sandbox="allow-popups allow-popups-to-escape-sandbox"
       srcDoc={`<base target="_blank">${html}`}
       title={title}
-      className={`h-[46rem] w-full rounded border border-rule ${width}`}
+      className={`mx-auto block h-[46rem] w-full rounded border border-rule ${width}`}
     />
   );
 }

@@ -4,7 +4,7 @@ import { More, Serial } from "./DigestItems";
 import { FIGURE_FONT, light } from "./palette";
 
 /** More boards than a mail should show stand on the rack. */
-export const MOST_BOARDS = 16;
+export const MOST_BOARDS = 12;
 
 /** The machine as the rack has it: a card a row, its five stages as counts, in words for who reads it aloud. */
 export function DigestBoards({ boards, link }: { boards: readonly BoardLine[]; link: string }) {
@@ -64,10 +64,12 @@ function StageCell({ stage }: { stage: BoardLine["stages"][number] }) {
   const isDone = total > 0 && holding === total;
   const [state, bar] =
     failing > 0
-      ? ["bw-failed", light.failed]
+      ? ["bw-failed bw-bar-failed", light.failed]
       : isDone
-        ? ["bw-passed", light.passed]
-        : ["bw-soft", holding > 0 ? light.copper : light.rule];
+        ? ["bw-passed bw-bar-passed", light.passed]
+        : holding > 0
+          ? ["bw-soft bw-bar-copper", light.copper]
+          : ["bw-soft bw-rule", light.rule];
   const colour = failing > 0 ? light.failed : isDone ? light.passed : light.inkSoft;
   return (
     <td
@@ -79,7 +81,8 @@ function StageCell({ stage }: { stage: BoardLine["stages"][number] }) {
         color: colour,
         fontSize: 11,
         lineHeight: "16px",
-        padding: "2px 1px 6px",
+        padding: "2px 0 6px",
+        whiteSpace: "nowrap",
       }}
     >
       {short}

@@ -34,5 +34,8 @@ export const DARK_STYLE = `
   .bw-failed, .bw-failed a { color: #ff8674 !important; }
   .bw-reopened, .bw-reopened a { color: #c7a0f2 !important; }
   .bw-doubtful, .bw-doubtful a { color: #e6b84a !important; }
+  .bw-bar-passed { border-color: #69c79b !important; }
+  .bw-bar-failed { border-color: #ff8674 !important; }
+  .bw-bar-copper { border-color: #eb9a5c !important; }
   .bw-conceded, .bw-conceded a { color: #7fbbe8 !important; }
 }`;

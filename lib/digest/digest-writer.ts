@@ -1,13 +1,11 @@
-import { render } from "@react-email/render";
-import { createElement } from "react";
 import type { QuietWeek } from "@/db/schema/projects";
-import { digestText } from "@/emails/digest-text";
-import { DigestMail, digestSubject } from "@/emails/DigestMail";
+import { digestSubject } from "@/emails/DigestMail";
 import { tokenFor } from "@/lib/auth/token";
 import { appLink } from "@/lib/mail/app-link";
 import type { Message } from "@/lib/mail/message";
 import { createPictures } from "./digest-pictures";
 import type { ProjectWeek, Span } from "./project-week";
+import { renderDigest } from "./render-digest";
 import { writeDigest, type Digest } from "./write-digest";
 
 type Reader = Span & { subscriptionId: string; email: string; zone: string; quietWeek: QuietWeek };
@@ -28,8 +26,7 @@ export function createDigestWriter(week: ProjectWeek) {
     const props = { ...digest, unsubscribeLink: OWN_ADDRESS };
     return {
       subject: digestSubject(props),
-      html: await render(createElement(DigestMail, props)),
-      text: digestText(props),
+      ...(await renderDigest(props)),
       inline: digest.isQuiet ? [] : inline,
       isQuiet: digest.isQuiet,
     };

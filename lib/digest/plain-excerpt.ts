@@ -5,7 +5,7 @@ export function plainExcerpt(markdown: string, most = 280): string {
     .replace(/!\[[^\]]*\]\([^)]*\)/g, " ")
     .replace(/\[([^\]]*)\]\([^)]*\)/g, "$1")
     // The points of a list come one after the other with a semicolon.
-    .replace(/(?<![.:;!?…])[ \t]*\n+\s*([-*+]|\d+[.)])\s+/g, "; ")
+    .replace(/(?<![.:;!?…\s])[ \t]*\n+\s*([-*+]|\d+[.)])\s+/g, "; ")
     .replace(/^\s{0,3}(#{1,6}|>|[-*+]|\d+[.)])\s+/gm, "")
     .replace(/[*_`~]{1,3}(?=\S)|(?<=\S)[*_`~]{1,3}/g, "")
     .replace(/\s+/g, " ")

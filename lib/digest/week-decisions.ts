@@ -6,7 +6,7 @@ import { appLink } from "@/lib/mail/app-link";
 import { writeDay } from "@/lib/mail/write-day";
 import { cut, linkTo, quoted, type Reader } from "./week-attempts";
 
-const MOST_DECISIONS = 8;
+const MOST_DECISIONS = 6;
 const MOST_OTHERS = 6;
 
 const DECISIONS = {

@@ -21,17 +21,24 @@ export default definePage({
     return (
       <Page
         title="Weekly e-mail"
-        lede={`The last seven days as they would go out now. ${readers === 1 ? "One person gets" : `${readers} people get`} it.`}
+        lede={`The last seven days as they would go out now. ${readersText(readers)}`}
         actions={<SendToMe project={scope.slug} send={sendToMe} />}
       >
-        <MailPreview subject={subject} html={html} text={text} />
-        <Panel title="Who gets it" padding="none">
-          <SubscriberTable subscribers={subscribers} zone={zone} />
-        </Panel>
-        <Panel title="Sent lately" padding={deliveries.length > 0 ? "none" : "md"}>
-          <DeliveryTable deliveries={deliveries} zone={zone} />
-        </Panel>
+        <div className="flex flex-col gap-5">
+          <MailPreview subject={subject} html={html} text={text} />
+          <Panel title="Who gets it" padding="none">
+            <SubscriberTable subscribers={subscribers} zone={zone} />
+          </Panel>
+          <Panel title="Sent lately" padding={deliveries.length > 0 ? "none" : "md"}>
+            <DeliveryTable deliveries={deliveries} zone={zone} />
+          </Panel>
+        </div>
       </Page>
     );
   },
 });
+
+function readersText(count: number): string {
+  if (count === 0) return "Nobody gets it yet.";
+  return count === 1 ? "One person gets it." : `${count} people get it.`;
+}

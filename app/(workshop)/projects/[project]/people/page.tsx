@@ -5,6 +5,7 @@ import { MembersTable } from "@/components/people/MembersTable";
 import { OpenInvitations } from "@/components/people/OpenInvitations";
 import { RolesExplained } from "@/components/people/RolesExplained";
 import { Page } from "@/components/shell/Page";
+import { ButtonLink } from "@/components/ui/ButtonLink";
 import { Panel } from "@/components/ui/Panel";
 import { can } from "@/lib/access/permissions";
 import { definePage } from "@/lib/actions/define-page";
@@ -25,6 +26,10 @@ export default definePage({
       <Page
         title="People"
         lede={ledeFor(members.length, invitations.length)}
+        actions={
+          can(scope.role, "digest.preview") &&
+          !scope.archived && <ButtonLink href={`/projects/${scope.slug}/digest`}>Weekly e-mail</ButtonLink>
+        }
         aside={
           <>
             {manages && (
