@@ -1,3 +1,4 @@
+import { createHash } from "node:crypto";
 import type postgres from "postgres";
 
 export type LargeProject = { slug: string; cookie: string; projectId: string; userId: string };
@@ -23,8 +24,10 @@ export async function makeLargeProject(
     insert into projects (slug, name, decision_rule) values (${slug}, ${slug}, 'guarded') returning id`;
   if (!user || !project) throw new Error("the bench project was not inserted");
   const cookie = crypto.randomUUID();
+  // The table keeps hashes of tokens; see sessionKey in lib/auth/session-cookie.ts.
+  const key = createHash("sha256").update(cookie).digest("base64url");
   await sql`insert into memberships (project_id, user_id, role) values (${project.id}, ${user.id}, 'builder')`;
-  await sql`insert into sessions (session_token, user_id, expires) values (${cookie}, ${user.id}, now() + interval '1 day')`;
+  await sql`insert into sessions (session_token, user_id, expires) values (${key}, ${user.id}, now() + interval '1 day')`;
   await sql`
     insert into boards (project_id, code, name) select ${project.id}, 'B' || n, 'Board ' || n from generate_series(1, ${boards}) n`;
   await sql`insert into revisions (board_id, letter) select id, 'A' from boards where project_id = ${project.id}`;
