@@ -2,6 +2,7 @@
 
 import Link from "next/link";
 import { useState } from "react";
+import { DataHead } from "@/components/evidence/DataHead";
 import { EvidenceThumb } from "@/components/evidence/EvidenceThumb";
 import { EvidenceViewer } from "@/components/evidence/EvidenceViewer";
 import { altText } from "@/components/evidence/file-address";
@@ -17,6 +18,9 @@ type Props = {
   actions: EvidenceActions | undefined;
 };
 
+/** The shape of most scope screens; the frame runs into the card. */
+const FRAME = "aspect-5/3! rounded-t-lg rounded-b-none! border-0!";
+
 /** One card a capture: what it shows, where it belongs, who took it when. */
 export function CaptureWall({ project, zone, captures, actions }: Props) {
   const [open, setOpen] = useState<string | null>(null);
@@ -31,14 +35,18 @@ export function CaptureWall({ project, zone, captures, actions }: Props) {
               aria-label={`Look at ${altText(capture)}`}
               className="block w-full rounded-t-lg hover:brightness-95"
             >
-              <EvidenceThumb
-                project={project}
-                evidence={capture}
-                fit={capture.kind === "photo" ? "fill" : "fit"}
-                className="rounded-b-none! border-x-0! border-t-0!"
-              />
+              {capture.kind === "scope-data" ? (
+                <DataHead project={project} evidence={capture} form="stamp" className={`bg-raised ${FRAME}`} />
+              ) : (
+                <EvidenceThumb
+                  project={project}
+                  evidence={capture}
+                  fit={capture.kind === "photo" ? "fill" : "fit"}
+                  className={FRAME}
+                />
+              )}
             </button>
-            <div className="flex flex-1 flex-col gap-1 px-3.5 pb-3.5 pt-3 text-sm">
+            <div className="flex flex-1 flex-col gap-1 border-t border-rule px-3.5 pb-3.5 pt-3 text-sm">
               <p className="line-clamp-2 text-[0.9375rem] font-semibold leading-snug">
                 {capture.caption === "" ? <span className="mono text-sm">{capture.fileName}</span> : capture.caption}
               </p>

@@ -1,46 +1,49 @@
 "use client";
 
 import { useQuery } from "@tanstack/react-query";
+import clsx from "clsx";
 import type { EvidenceView } from "@/lib/traveler/traveler-view";
 import { fileAddress } from "./file-address";
+import { readDataHead } from "./read-data-head";
 
-const HEAD_BYTES = 2048;
-const LINES = 14;
+type Props = {
+  project: string;
+  evidence: EvidenceView;
+  /** "stamp" is a still picture of the text, for inside a button; "sheet" can be scrolled and read out. */
+  form?: "sheet" | "stamp";
+  className?: string;
+};
 
 /** The first lines of a data file, as they stand in it. Only those bytes are fetched. */
-export function DataHead({ project, evidence }: { project: string; evidence: EvidenceView }) {
+export function DataHead({ project, evidence, form = "sheet", className }: Props) {
   const { data, isPending, isError } = useQuery({
     queryKey: ["data-head", project, evidence.id],
-    queryFn: ({ signal }) => readHead(fileAddress(project, evidence.id), evidence.bytes, signal),
+    queryFn: ({ signal }) => readDataHead(fileAddress(project, evidence.id), evidence.bytes, signal),
     staleTime: Infinity,
   });
-  if (isPending) return <p className="motion-wait text-sm text-ink-soft">Reading the first lines…</p>;
-  if (isError) return <p className="text-sm text-failed">The first lines could not be read just now.</p>;
+  const text = isPending ? "Reading the first lines…" : isError ? "The first lines could not be read just now." : data;
+  if (form === "stamp") {
+    return (
+      <span
+        aria-hidden="true"
+        className={clsx("mono block overflow-hidden whitespace-pre p-3 text-left text-2xs text-ink-soft", className)}
+      >
+        {text}
+      </span>
+    );
+  }
   return (
     <pre
       tabIndex={0}
       aria-label={`First lines of ${evidence.fileName}`}
-      className="mono max-h-80 overflow-auto rounded border border-rule bg-raised p-3 text-xs leading-5"
+      aria-busy={isPending}
+      className={clsx(
+        "mono max-h-80 overflow-auto rounded border border-rule bg-raised p-3 text-xs leading-5",
+        isPending && "motion-wait text-ink-soft",
+        className,
+      )}
     >
-      {data}
+      {text}
     </pre>
   );
-}
-
-async function readHead(address: string, bytes: number, signal: AbortSignal): Promise<string> {
-  const response = await fetch(address, { headers: { range: `bytes=0-${HEAD_BYTES - 1}` }, signal });
-  if (!response.ok) throw new Error(`status ${response.status}`);
-  const head = new Uint8Array(await response.arrayBuffer()).subarray(0, HEAD_BYTES);
-  const lines = decode(head).split(/\r\n|\r|\n/);
-  // The last one is cut off in the middle unless the whole file is shorter.
-  if (bytes > HEAD_BYTES) lines.pop();
-  return lines.slice(0, LINES).join("\n") + (bytes > HEAD_BYTES || lines.length > LINES ? "\n…" : "");
-}
-
-/** Scopes write UTF-16 with a mark, UTF-8, or the bytes of a desktop of the nineties. */
-function decode(head: Uint8Array): string {
-  if (head[0] === 0xff && head[1] === 0xfe) return new TextDecoder("utf-16le").decode(head);
-  if (head[0] === 0xfe && head[1] === 0xff) return new TextDecoder("utf-16be").decode(head);
-  const text = new TextDecoder().decode(head, { stream: true });
-  return text.includes("\ufffd") ? new TextDecoder("windows-1252").decode(head) : text;
 }

@@ -18,7 +18,7 @@ export function EvidenceThumb({ project, evidence, fit = "fill", className }: Ev
   const frame = clsx("block aspect-4/3 w-full overflow-hidden rounded border border-rule", className);
   if (!isPicture(evidence)) {
     return (
-      <span className={clsx(frame, "grid-paper flex! flex-col items-center justify-center gap-1.5 p-2 text-ink-soft")}>
+      <span className={clsx(frame, "flex! flex-col bg-raised items-center justify-center gap-1.5 p-2 text-ink-soft")}>
         <Icon name="file" size={24} />
         <span className="mono max-w-full truncate text-2xs">{evidence.fileName}</span>
         <span className="sr-only">
@@ -28,7 +28,7 @@ export function EvidenceThumb({ project, evidence, fit = "fill", className }: Ev
     );
   }
   return (
-    <span className={clsx(frame, "bg-raised")}>
+    <span className={clsx(frame, "bg-ink/6")}>
       {/* eslint-disable-next-line @next/next/no-img-element -- private, sized by the worker, read through the app */}
       <img
         src={fileAddress(project, evidence.id, "small")}

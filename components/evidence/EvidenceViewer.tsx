@@ -95,13 +95,18 @@ function Stage({ project, evidence }: { project: string; evidence: EvidenceView 
       <img
         src={fileAddress(project, evidence.id, "large")}
         alt={altText(evidence)}
-        width={evidence.width ?? 1280}
-        height={evidence.height ?? 960}
-        className="mx-auto h-auto max-h-[62dvh] w-auto max-w-full rounded bg-raised object-contain"
+        style={stageSize(evidence.width ?? 1280, evidence.height ?? 960)}
+        className="mx-auto rounded bg-ink/6"
       />
     </a>
   );
 }
+
+/** As large as fits, never larger than the picture itself, and the same before it has loaded. */
+const stageSize = (width: number, height: number) => ({
+  width: `min(100%, ${width}px, ${((56 * width) / height).toFixed(2)}dvh)`,
+  aspectRatio: `${width} / ${height}`,
+});
 
 function Facts({ evidence, zone }: { evidence: EvidenceView; zone: string }) {
   const size = evidence.width && evidence.height ? `${evidence.width} × ${evidence.height} px, ` : "";

@@ -2,7 +2,7 @@ import Link from "next/link";
 import { EvidenceThumb } from "@/components/evidence/EvidenceThumb";
 import { Markdown } from "@/components/ui/Markdown";
 import type { EntryView } from "@/lib/log-entry/entry-view";
-import { EntryByline } from "./EntryByline";
+import { Byline } from "./Byline";
 import { excerpt, picturesBesideText } from "./excerpt";
 
 const SHOWN = 4;
@@ -20,8 +20,10 @@ export function EntryCard({ project, zone, entry }: { project: string; zone: str
           {entry.title}
         </Link>
       </h3>
-      <EntryByline project={project} zone={zone} entry={entry} />
-      {text !== "" && <Markdown text={text} className="mt-3" />}
+      <p className="mt-0.5 text-sm text-ink-soft">
+        <Byline project={project} zone={zone} entry={entry} />
+      </p>
+      {text !== "" && <Markdown text={text} className="mt-3 [&_img]:max-h-80 [&_img]:w-auto" />}
       {pictures.length > 0 && (
         <Link href={href} className="mt-3 grid max-w-prose grid-cols-4 gap-2" aria-label={`Pictures of ${entry.title}`}>
           {pictures.slice(0, SHOWN).map((picture) => (

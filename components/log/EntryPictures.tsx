@@ -9,6 +9,7 @@ import { TextField } from "@/components/ui/TextField";
 import { FILE_LIMITS } from "@/lib/storage/limits";
 import type { EvidenceView } from "@/lib/traveler/traveler-view";
 import type { EntryDraft } from "./entry-draft";
+import { withoutPicture } from "./excerpt";
 
 type Change = (part: (before: EntryDraft) => Partial<EntryDraft>) => void;
 type Props = {
@@ -24,7 +25,11 @@ export function EntryPictures({ project, draft, change, onBusy, error }: Props) 
   const { pictures } = draft;
   const update = (id: string, part: Partial<EvidenceView>) =>
     change((before) => ({ pictures: before.pictures.map((one) => (one.id === id ? { ...one, ...part } : one)) }));
-  const leaveOut = (id: string) => change((before) => ({ pictures: before.pictures.filter((one) => one.id !== id) }));
+  const leaveOut = (id: string) =>
+    change((before) => ({
+      pictures: before.pictures.filter((one) => one.id !== id),
+      body: withoutPicture(before.body, id),
+    }));
   const intoText = (picture: EvidenceView) =>
     change((before) => ({ body: `${before.body.trimEnd()}\n\n${asMarkdown(project, picture)}\n`.trimStart() }));
 

@@ -7,7 +7,7 @@ import { Notice } from "@/components/ui/Notice";
 import { Panel } from "@/components/ui/Panel";
 import type { EntryView } from "@/lib/log-entry/entry-view";
 import { ArchiveEntry, RestoreEntry, type EntryActions } from "./EntryActs";
-import { EntryByline } from "./EntryByline";
+import { Byline } from "./Byline";
 import { picturesBesideText } from "./excerpt";
 
 type Props = {
@@ -26,6 +26,7 @@ export function EntryPlace({ project, zone, entry, actions, evidenceActions }: P
   return (
     <Page
       title={entry.title}
+      lede={<Byline project={project} zone={zone} entry={entry} />}
       width="prose"
       actions={
         actions &&
@@ -40,7 +41,6 @@ export function EntryPlace({ project, zone, entry, actions, evidenceActions }: P
       }
     >
       <div className="flex flex-col gap-4">
-        <EntryByline project={project} zone={zone} entry={entry} />
         {isArchived && (
           <Notice
             kind="waiting"

@@ -12,7 +12,7 @@ export function LogLine({ project, zone, item }: { project: string; zone: string
   return (
     <li
       id={`event-${item.id}`}
-      className="grid grid-cols-[2.75rem_1.5rem_minmax(0,1fr)] items-baseline gap-x-3 border-b border-rule px-4 py-2.5 last:border-b-0"
+      className="grid grid-cols-[2.75rem_1.5rem_minmax(0,1fr)] items-baseline gap-x-2 border-b border-rule px-3.5 sm:gap-x-3 sm:px-4 py-2.5 last:border-b-0"
     >
       <DateTime at={item.at} zone={zone} form="time" className="mono text-xs text-ink-soft" />
       <span className="translate-y-0.5">{item.glyph && <StateGlyph state={item.glyph} size={14} />}</span>
@@ -22,10 +22,16 @@ export function LogLine({ project, zone, item }: { project: string; zone: string
             <Part key={index} part={part} />
           ))}
         </p>
-        {item.evidence && (
-          <a href={fileAddress(project, item.evidence.id)} className="mt-2 block w-28">
-            <EvidenceThumb project={project} evidence={item.evidence} />
-          </a>
+        {item.evidence.length > 0 && (
+          <ul className="mt-2 flex flex-wrap gap-2">
+            {item.evidence.map((one) => (
+              <li key={one.id} className="w-24">
+                <a href={fileAddress(project, one.id)} className="block rounded hover:brightness-95">
+                  <EvidenceThumb project={project} evidence={one} />
+                </a>
+              </li>
+            ))}
+          </ul>
         )}
       </div>
     </li>
@@ -43,7 +49,7 @@ function Part({ part }: { part: SentencePart }) {
     );
   }
   return (
-    <Link href={part.href} className="link" prefetch={false}>
+    <Link href={part.href} className={clsx("link", !part.text.includes(" ") && "whitespace-nowrap")} prefetch={false}>
       {part.text}
     </Link>
   );

@@ -21,3 +21,8 @@ export function picturesBesideText<Picture extends { id: string }>(
 ): Picture[] {
   return pictures.filter((picture) => !body.includes(picture.id));
 }
+
+/** The text without the places where it shows the picture. */
+export function withoutPicture(body: string, id: string): string {
+  return body.replace(/\n*!\[[^\]]*\]\(([^)\s]*)\)/g, (place, address: string) => (address.includes(id) ? "" : place));
+}

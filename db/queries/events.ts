@@ -2,6 +2,7 @@ import { and, asc, desc, eq, inArray, isNotNull, lt, sql } from "drizzle-orm";
 import type { Queryable } from "@/db/client";
 import { units } from "@/db/schema/boards";
 import { events } from "@/db/schema/events";
+import { attachments } from "@/db/schema/evidence";
 import { users } from "@/db/schema/people";
 import { procedureChecks } from "@/db/schema/procedures";
 import { checks } from "@/db/schema/travelers";
@@ -10,12 +11,17 @@ type InProject = { projectId: string };
 export type EventFilter = {
   kinds?: readonly string[] | undefined;
   onlyFailures?: boolean | undefined;
+  /** Leaves out that a file was attached when it now stands in a log entry. */
+  withoutEntryPictures?: boolean | undefined;
   /** Serial. */
   unit?: string | undefined;
   actorId?: string | undefined;
   /** Events older than this one. */
   before?: number | undefined;
 };
+
+const notOfEntry = sql`not (${events.kind} = 'evidence.attached' and exists (
+  select 1 from ${attachments} where ${attachments.id} = ${events.subjectId} and ${attachments.logEntryId} is not null))`;
 
 /** Newest first, each with the names that its sentence needs. The order is the order of arrival. */
 export async function findEvents(db: Queryable, scope: InProject, filter: EventFilter, limit: number) {
@@ -42,6 +48,7 @@ export async function findEvents(db: Queryable, scope: InProject, filter: EventF
         eq(events.projectId, scope.projectId),
         filter.kinds ? inArray(events.kind, [...filter.kinds]) : undefined,
         filter.onlyFailures ? sql`${events.payload} ->> 'verdict' = 'does-not-conform'` : undefined,
+        filter.withoutEntryPictures ? notOfEntry : undefined,
         filter.unit === undefined ? undefined : eq(units.serial, filter.unit),
         filter.actorId === undefined ? undefined : eq(events.actorId, filter.actorId),
         filter.before === undefined ? undefined : lt(events.id, filter.before),

@@ -18,6 +18,13 @@ function write<Kind extends EventKind>(kind: Kind, payload: unknown, context: Se
   return parsed.success ? WRITERS[kind](parsed.data as EventPayload<Kind>, phrases(context)) : undefined;
 }
 
+/** One sentence for several files that one person attached to one place in a row. */
+export function severalAttached(files: number, context: SentenceContext): SentencePart[] {
+  const { who, place } = phrases(context);
+  const parts = [who, ` attached ${files} files`, ...place(" to "), "."];
+  return parts.map((part) => (typeof part === "string" ? { text: part } : part));
+}
+
 export function isEventKind(kind: string): kind is EventKind {
   return Object.hasOwn(eventPayloads, kind);
 }

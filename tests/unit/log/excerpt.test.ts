@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { byDay } from "@/components/log/by-day";
-import { excerpt, picturesBesideText } from "@/components/log/excerpt";
+import { excerpt, picturesBesideText, withoutPicture } from "@/components/log/excerpt";
 
 describe("an entry in the stream", () => {
   it("is shown whole when it is short", () => {
@@ -20,6 +20,11 @@ describe("an entry in the stream", () => {
   it("shows beneath the text only the pictures that are not in it", () => {
     const pictures = [{ id: "one" }, { id: "two" }];
     expect(picturesBesideText("see ![](/api/projects/x/files/one?size=large)", pictures)).toEqual([{ id: "two" }]);
+  });
+
+  it("no longer shows a picture that was left out of it", () => {
+    const body = "Before\n\n![the ribbon](/api/projects/x/files/one?size=large)\n\n![](/api/projects/x/files/two)";
+    expect(withoutPicture(body, "one")).toBe("Before\n\n![](/api/projects/x/files/two)");
   });
 
   it("falls on the day of the reader's own zone", () => {

@@ -3,10 +3,10 @@ import { DateTime } from "@/components/ui/DateTime";
 import type { EntryView } from "@/lib/log-entry/entry-view";
 
 /** Who wrote it, when, about which unit. */
-export function EntryByline({ project, zone, entry }: { project: string; zone: string; entry: EntryView }) {
+export function Byline({ project, zone, entry }: { project: string; zone: string; entry: EntryView }) {
   const { unit, editedAt } = entry;
   return (
-    <p className="text-sm text-ink-soft">
+    <>
       {entry.by.name}, <DateTime at={entry.at} zone={zone} />
       {unit && (
         <>
@@ -21,6 +21,6 @@ export function EntryByline({ project, zone, entry }: { project: string; zone: s
           . Edited <DateTime at={editedAt} zone={zone} />
         </>
       )}
-    </p>
+    </>
   );
 }
