@@ -47,7 +47,7 @@ function BoardCard({ board }: { board: BoardLine }) {
           </td>
         </tr>
         {total === 0 ? null : (
-          <tr>
+          <tr style={{ verticalAlign: "top" }}>
             {stages.map((stage) => (
               <StageCell key={stage.name} stage={stage} />
             ))}

@@ -51,7 +51,7 @@ const fullest: DigestMailProps = {
     })),
   })),
   passed: {
-    lines: Array.from({ length: 10 }, (_, index) => ({
+    lines: Array.from({ length: 8 }, (_, index) => ({
       serial: `SIN-${index}`,
       link: `${HOME}/units/SIN-${index}`,
       counts: "9 for the first time",
@@ -143,9 +143,9 @@ describe("the beginning of a log entry in the mail", () => {
     ["**Lamp 7** came on at `64`.", "Lamp 7 came on at 64."],
     [
       "Left:\n\n- the carry\n- the sine table\n\nThen first power.",
-      "Left: the carry; the sine table Then first power.",
+      "Left: the carry; the sine table. Then first power.",
     ],
-    ["![W3](file.png)\n# Wrong pin\n\nSee [the check](https://x.example).", "Wrong pin See the check."],
+    ["![W3](file.png)\n# Wrong pin\n\nSee [the check](https://x.example).", "Wrong pin. See the check."],
   ])("%j reads as plain words", (markdown, words) => {
     expect(plainExcerpt(markdown)).toBe(words);
   });
