@@ -1,11 +1,18 @@
 import clsx from "clsx";
+import { ConnectorPin } from "./ConnectorPin";
 
 export type ConnectorFaceProps = {
   /** Row letters as the standard names them, e.g. ["a", "c"]; letters that are left out keep their room. */
   rows: readonly string[];
   positions: number;
+  /** Where pins are not named by row letter and position: the name at a row, counted from 0, and a position. */
+  pinName?: (row: number, position: number) => string;
   /** Pins to light, by name: "a4". */
   lit: ReadonlySet<string>;
+  /** One pin that stands out among the lit ones. */
+  marked?: string;
+  /** Told of the lit pin under the pointer; undefined beside it. */
+  onPin?: (pin: string | undefined) => void;
   /** From the solder side everything is mirrored. */
   side?: "card" | "solder";
   /** "lying" for a phone (positions from left to right), "standing" for a sheet beside a table. */
@@ -21,7 +28,17 @@ const TEXT = 17;
 
 /** The mating face to scale: one pitch between positions and between neighbouring row letters. */
 export function ConnectorFace(props: ConnectorFaceProps) {
-  const { rows, positions, lit, side = "card", orientation = "lying", label = "Connector", className } = props;
+  const {
+    rows,
+    positions,
+    lit,
+    marked,
+    onPin,
+    side = "card",
+    orientation = "lying",
+    label = "Connector",
+    className,
+  } = props;
   const offsets = rowOffsets(rows);
   const across = Math.max(...offsets, 0);
   const isLying = orientation === "lying";
@@ -36,8 +53,9 @@ export function ConnectorFace(props: ConnectorFaceProps) {
   const length = (positions - 1) * PITCH + 2 * EDGE;
   const breadth = across * PITCH + 2 * EDGE;
   const [width, height] = isLying ? [length, breadth] : [breadth, length];
+  const nameOf = props.pinName ?? ((row: number, position: number) => `${rows[row] ?? ""}${position}`);
   const names = rows
-    .flatMap((row) => range(positions).map((position) => `${row}${position}`))
+    .flatMap((_, row) => range(positions).map((position) => nameOf(row, position)))
     .filter((pin) => lit.has(pin));
   return (
     <svg
@@ -69,9 +87,21 @@ export function ConnectorFace(props: ConnectorFaceProps) {
             >
               {row}
             </text>
-            {range(positions).map((position) => (
-              <Pin key={position} {...place(index, position)} isLit={lit.has(`${row}${position}`)} isLying={isLying} />
-            ))}
+            {range(positions).map((position) => {
+              const pin = nameOf(index, position);
+              const isLit = lit.has(pin);
+              return (
+                <ConnectorPin
+                  key={pin}
+                  {...place(index, position)}
+                  room={PITCH}
+                  isLit={isLit}
+                  isMarked={marked === pin}
+                  isLying={isLying}
+                  {...(onPin && isLit ? { onPoint: () => onPin(pin) } : {})}
+                />
+              );
+            })}
           </g>
         );
       })}
@@ -91,37 +121,6 @@ export function ConnectorFace(props: ConnectorFaceProps) {
           );
         })}
     </svg>
-  );
-}
-
-function Pin({ x, y, isLit, isLying }: { x: number; y: number; isLit: boolean; isLying: boolean }) {
-  const [width, height] = isLying ? [5, 7] : [7, 5];
-  if (!isLit) {
-    return (
-      <rect
-        x={x - width / 2}
-        y={y - height / 2}
-        width={width}
-        height={height}
-        rx="0.75"
-        className="fill-sheet stroke-edge"
-        strokeWidth="0.75"
-      />
-    );
-  }
-  return (
-    <g className="fill-copper stroke-copper">
-      <rect x={x - width / 2 - 0.5} y={y - height / 2 - 0.5} width={width + 1} height={height + 1} rx="1" />
-      <rect
-        x={x - width / 2 - 2}
-        y={y - height / 2 - 2}
-        width={width + 4}
-        height={height + 4}
-        rx="2"
-        fill="none"
-        strokeWidth="0.75"
-      />
-    </g>
   );
 }
 

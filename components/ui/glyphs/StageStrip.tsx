@@ -1,4 +1,5 @@
 import clsx from "clsx";
+import { glyphRuns } from "./glyph-runs";
 import { MiniGlyph } from "./MiniGlyph";
 import { GLYPH_STATES, STATE_TEXT, type GlyphState } from "./StateGlyph";
 
@@ -76,8 +77,8 @@ function StripColumn({ group, marked }: { group: StripGroup; marked: number | un
         {group.name}
       </span>
       <span aria-hidden="true" className="flex min-h-3 flex-wrap gap-x-[2px] gap-y-1">
-        {group.states.map((state, index) => (
-          <MiniGlyph key={index} state={state} isMarked={marked === index} />
+        {glyphRuns(group.states, marked).map(({ start, ...run }) => (
+          <MiniGlyph key={start} {...run} />
         ))}
       </span>
       <span aria-hidden="true" className={clsx("mono text-xs leading-none", emphasis)}>
