@@ -80,8 +80,8 @@ export function EntryPanel({
         className={clsx(
           "grid shrink-0 gap-2",
           stated
-            ? "grid-cols-[1fr_1fr_auto_auto]"
-            : "grid-cols-[minmax(0,1.3fr)_minmax(0,1fr)_auto_auto] lg:grid-cols-[1fr_1fr_auto_auto]",
+            ? "grid-cols-[1fr_1fr_auto_auto] max-[389px]:grid-cols-2"
+            : "grid-cols-[minmax(0,1.3fr)_minmax(0,1fr)_auto_auto] max-[389px]:grid-cols-2 lg:grid-cols-[1fr_1fr_auto_auto]",
         )}
       >
         {stated ? (
@@ -125,11 +125,11 @@ export function EntryPanel({
           onClick={required && !required.kinds.includes("photo") ? onFile : onPhoto}
           aria-keyshortcuts="p"
           aria-label={required && !required.kinds.includes("photo") ? "Add a capture" : "Take a photo"}
-          className="w-16"
+          className="w-16 max-[389px]:w-full"
         >
           <Icon name={required && !required.kinds.includes("photo") ? "file" : "camera"} size={24} />
         </BenchButton>
-        <BenchButton onClick={onNote} aria-keyshortcuts="n" className="w-16 text-base">
+        <BenchButton onClick={onNote} aria-keyshortcuts="n" className="w-16 text-base max-[389px]:w-full">
           Note
         </BenchButton>
       </div>

@@ -3,7 +3,8 @@ import type { StatedRange } from "./worked-example";
 
 export function RangeTable({ name, ranges }: { name: string; ranges: readonly StatedRange[] }) {
   return (
-    <div className="overflow-x-auto">
+    // Scrolled by keys as well where the screen is narrow.
+    <div className="overflow-x-auto" role="group" aria-label={`Ranges of ${name}`} tabIndex={0}>
       <table aria-label={`Ranges of ${name}`} className="w-full max-w-2xl border-collapse text-left text-[0.9375rem]">
         <thead>
           <tr className="text-sm text-ink-soft">
