@@ -71,7 +71,7 @@ const OFFLINE = "There is no network just now. The file is still on this device.
 const LOST = "The network dropped before the file was there. The file is still on this device; send it again.";
 
 /** What can be said before a byte is sent; the server checks all of it again. */
-export function whyNotSend(file: File, kinds: readonly AttachmentKind[]): string | undefined {
+function whyNotSend(file: File, kinds: readonly AttachmentKind[]): string | undefined {
   if (file.size === 0) return `${file.name} is empty (0 bytes).`;
   const limit = largestBytes(kinds);
   if (file.size > limit)

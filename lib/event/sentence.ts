@@ -25,7 +25,7 @@ export function severalAttached(files: number, context: SentenceContext): Senten
   return parts.map((part) => (typeof part === "string" ? { text: part } : part));
 }
 
-export function isEventKind(kind: string): kind is EventKind {
+function isEventKind(kind: string): kind is EventKind {
   return Object.hasOwn(eventPayloads, kind);
 }
 

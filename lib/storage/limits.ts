@@ -21,7 +21,7 @@ export const FILE_LIMITS = {
   thumbnails: { small: 320, large: 1280 },
 } as const;
 
-export const PICTURE_TYPES = ["image/jpeg", "image/png", "image/webp"] as const;
+const PICTURE_TYPES = ["image/jpeg", "image/png", "image/webp"] as const;
 
 /** For the file dialog of the browser; the content decides in the end. */
 export const ACCEPT: Record<AttachmentKind, string> = {

@@ -11,7 +11,7 @@ function store(): UTApi {
   return api;
 }
 
-export class ObjectStoreError extends Error {
+class ObjectStoreError extends Error {
   override name = "ObjectStoreError";
 }
 
