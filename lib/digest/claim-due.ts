@@ -1,5 +1,5 @@
 import { database } from "@/db/client";
-import { claimDeliveries, lockDueSubscriptions } from "@/db/queries/digests";
+import { claimDeliveries, lockDueSubscriptions } from "@/db/queries/digest-deliveries";
 import { nextDue } from "./next-due";
 
 const SECOND = 1000;

@@ -5,7 +5,7 @@ import {
   findOpenFailures,
   findProjectToMail,
   type DigestEvent,
-} from "@/db/queries/digests";
+} from "@/db/queries/digest-week";
 import { findBoardsWithUnits, findRackChecks, findSlotsOfProject } from "@/db/queries/rack";
 
 /** More than any week has; a script that records without end does not fill the worker's memory. */

@@ -1,4 +1,4 @@
-import type { Settled, TakenDelivery } from "@/db/queries/digests";
+import type { Settled, TakenDelivery } from "@/db/queries/digest-deliveries";
 import { log } from "@/lib/http/log";
 import { sendMail } from "@/lib/mail/send";
 import type { DigestWriter } from "./digest-writer";

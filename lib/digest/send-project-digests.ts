@@ -1,5 +1,5 @@
 import { database } from "@/db/client";
-import { settleDeliveries, takeDeliveries } from "@/db/queries/digests";
+import { settleDeliveries, takeDeliveries } from "@/db/queries/digest-deliveries";
 import { log } from "@/lib/http/log";
 import { enqueue } from "@/lib/jobs/enqueue";
 import { claimDue } from "./claim-due";

@@ -1,4 +1,4 @@
-import type { DigestEvent } from "@/db/queries/digests";
+import type { DigestEvent } from "@/db/queries/digest-week";
 import { countPasses, passCounts, type attemptsOf } from "./week-attempts";
 
 const counted = (count: number, one: string, many: string) => `${count} ${count === 1 ? one : many}`;

@@ -1,5 +1,5 @@
 import type { DigestItem, DigestList, Mark, PassedLine } from "@/emails/parts/digest-mail-props";
-import type { DigestEvent } from "@/db/queries/digests";
+import type { DigestEvent } from "@/db/queries/digest-week";
 import { eventPayloads, type EventPayload } from "@/lib/event/schema";
 import { appLink, checkLink } from "@/lib/mail/app-link";
 import { writeDay } from "@/lib/mail/write-day";

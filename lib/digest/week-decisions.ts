@@ -1,5 +1,5 @@
 import type { DigestItem, DigestList } from "@/emails/parts/digest-mail-props";
-import type { DigestEvent } from "@/db/queries/digests";
+import type { DigestEvent } from "@/db/queries/digest-week";
 import { eventPayloads } from "@/lib/event/schema";
 import { plainSentence, sentenceOf } from "@/lib/event/sentence";
 import { appLink } from "@/lib/mail/app-link";
