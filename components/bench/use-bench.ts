@@ -8,10 +8,11 @@ import { draftOf, keepDraft } from "./draft-store";
 import { foresee } from "./foresee";
 import { nextFree } from "./next-check";
 import { onTheWay } from "./on-the-way";
-import { overtakenBy } from "./overtaken-by";
+import { arrivalIn, overtakenBy } from "./overtaken-by";
 import { putBack } from "./queue/file-shelf";
 import type { HeldAttempt, NewAttempt } from "./queue/held-attempt";
 import { useQueue } from "./queue/use-queue";
+import { useOvertaking } from "./use-overtaking";
 import { useTraveler } from "./use-traveler";
 
 /** Puts what was typed and taken for an attempt back into the check. */
@@ -34,6 +35,7 @@ export function useBench({ project, viewer, traveler: initial, openCheck }: Benc
   const { traveler, refresh } = useTraveler(project.slug, initial);
   const { queue, state } = useQueue(viewer.id);
   const [arrived, setArrived] = useState<HeldAttempt[]>([]);
+  const overtaking = useOvertaking(traveler.checks, viewer.id, refresh);
   const [told, setTold] = useState<{ checkId: string; sentence: string }>();
   const first =
     initial.checks.find((check) => check.id === openCheck) ?? nextFree(initial.checks, undefined) ?? initial.checks[0];
@@ -47,9 +49,11 @@ export function useBench({ project, viewer, traveler: initial, openCheck }: Benc
       queue().listen((event) => {
         if (event.kind === "sent") {
           setArrived((before) => [...before.slice(-19), event.attempt]);
+          const { checkId } = event.attempt.body;
+          const arrival = arrivalIn(event.answer);
+          if (arrival !== undefined) overtaking.arrived({ checkId, arrival, at: Date.now() });
           const sentence = overtakenBy(event.answer);
-          if (sentence)
-            setTold({ checkId: event.attempt.body.checkId, sentence: `${event.attempt.checkTitle}: ${sentence}` });
+          if (sentence) setTold({ checkId, sentence: `${event.attempt.checkTitle}: ${sentence}` });
         }
         // Rolled back: what was typed stands in the check again, unless something newer does.
         else if (!draftOf(viewer.id, event.attempt.body.checkId)) void restore(event.attempt).catch(() => undefined);
@@ -97,8 +101,11 @@ export function useBench({ project, viewer, traveler: initial, openCheck }: Benc
     refused: state.held.filter(
       (attempt) => attempt.body.checkId === current?.id && attempt.trouble?.kind === "refused",
     ),
-    told: told?.sentence,
-    dismissTold: () => setTold(undefined),
+    told: told?.sentence ?? overtaking.sentence,
+    dismissTold: () => {
+      setTold(undefined);
+      overtaking.dismiss();
+    },
     open,
     step,
   };
