@@ -1,4 +1,4 @@
-import { freshAddress, makeAccount, PASSWORD } from "../support/accounts";
+import { freshAddress, makeAccount, PASSWORD } from "./account";
 import { expect, test } from "./journey";
 import { linkIn, mailTo } from "./mailbox";
 

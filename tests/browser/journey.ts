@@ -20,8 +20,6 @@ export const test = base.extend<Fixtures, { closing: void }>({
     await Promise.all(contexts.map((context) => context.close()));
   },
   closing: [
-    // The runner reads the fixtures' names from this pattern.
-    // eslint-disable-next-line no-empty-pattern
     async ({}, use) => {
       await use();
       await closeDatabase();

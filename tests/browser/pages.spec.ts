@@ -46,8 +46,20 @@ async function asMaintainer(page: Page): Promise<void> {
   await signInAs(page.context(), { userId: user.id });
 }
 
+/** Colours that are still on their way from one theme to the other would be judged halfway. */
+const atRest = (page: Page) =>
+  page.evaluate(async () => {
+    const moving = document
+      .getAnimations()
+      .filter((one) => Number.isFinite(Number(one.effect?.getComputedTiming().endTime)));
+    await Promise.allSettled(moving.map((one) => one.finished));
+  });
+
 async function violations(page: Page): Promise<string[]> {
-  const { violations: found } = await new AxeBuilder({ page }).withTags(LEVELS).analyze();
+  await atRest(page);
+  // The one frame there is shows a mail without scripts, which axe could not enter.
+  const axe = new AxeBuilder({ page }).setLegacyMode(true).withTags(LEVELS);
+  const { violations: found } = await axe.analyze();
   return found.flatMap(({ id, nodes }) =>
     nodes.map(({ target, failureSummary }) => `${id} ${target.join(" ")}: ${failureSummary}`),
   );
@@ -57,13 +69,14 @@ const sideways = (page: Page) =>
   page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
 
 for (const path of [...OPEN, ...OWN, ...MACHINE.map(demo)]) {
-  test(`${path} has no fault that axe knows, in light and in dark`, async ({ page }) => {
+  test(`${path} has no fault that axe knows, in light and in dark`, async ({ page }, { project }) => {
     if (!OPEN.includes(path)) await asMaintainer(page);
     await page.emulateMedia({ reducedMotion: "reduce", colorScheme: "light" });
     await page.goto(path);
     await expect(page.getByRole("heading", { level: 1 })).toHaveCount(1);
-    expect(await page.title()).toMatch(/\S.*Boardwake/);
-    for (const colorScheme of THEMES) {
+    expect(await page.title()).toMatch(/.Boardwake|Boardwake./);
+    // At phone width the layout differs, the colours do not.
+    for (const colorScheme of project.name === "phone" ? (["light"] as const) : THEMES) {
       await page.emulateMedia({ colorScheme });
       expect(await violations(page), colorScheme).toEqual([]);
     }
@@ -72,6 +85,7 @@ for (const path of [...OPEN, ...OWN, ...MACHINE.map(demo)]) {
 }
 
 test("No page has to be scrolled sideways at 320 pixels @phone", async ({ page }) => {
+  test.slow();
   await page.setViewportSize({ width: 320, height: 640 });
   const look = async (paths: string[]) => {
     for (const path of paths) {

@@ -2,7 +2,7 @@ import { and, eq, sql } from "drizzle-orm";
 import { database } from "@/db/client";
 import { digestSubscriptions, memberships } from "@/db/schema/projects";
 import { users } from "@/db/schema/people";
-import { freshAddress, PASSWORD } from "../support/accounts";
+import { freshAddress, PASSWORD } from "./account";
 import { checkOf, must, send } from "../support/bench";
 import { one } from "../support/database";
 import { makeCard } from "./card";
@@ -46,12 +46,13 @@ test("A person invited by e-mail signs up, follows along, and the week's e-mail 
   await expect(page).toHaveURL(new RegExp(`${card.slug}/rack$`));
 
   await makeDue(card, email);
-  const digest = await mailTo(email, /week/i);
+  const digest = await mailTo(email, /^Tide computer:/);
+  expect(digest.subject).toBe("Tide computer: 1 check passed, 1 did not conform");
   expect(digest.text).toContain("Supply rail under load");
   expect(digest.html).toContain("Supply rail under load");
   await page.goto(linkIn(digest, card.failed.id));
   await expect(page.getByRole("complementary", { name: "Check" }).getByText("4.61 V").first()).toBeVisible();
-  expect((await mailsTo(email, /week/i)).length).toBe(1);
+  expect((await mailsTo(email, /^Tide computer:/)).length).toBe(1);
 
   const header = digest.headers["list-unsubscribe"] ?? "";
   expect(digest.headers["list-unsubscribe-post"]).toBe("List-Unsubscribe=One-Click");
@@ -72,7 +73,7 @@ test("A maintainer looks at this week's e-mail before it goes out, and sends it 
   const page = await pageOf(card.viewers.maintainer);
   await page.goto(card.at("/digest"));
   await page.getByRole("button", { name: /send it to me/i }).click();
-  const mail = await mailTo(card.viewers.maintainer.email, /week/i);
+  const mail = await mailTo(card.viewers.maintainer.email, /^Preview: Tide computer/);
   expect(mail.text).toContain("Supply rail under load");
 });
 
@@ -94,12 +95,12 @@ async function subscriptionOf(project: { id: string }, email: string) {
   return one(await database().select().from(digestSubscriptions).where(own));
 }
 
-/** The subscriber's weekday and hour have come: joined a week ago, due a minute ago, and the worker is told to look. */
+/** The subscriber's weekday and hour have come: joined a week ago, due just now, and the worker is told to look. */
 async function makeDue(project: { id: string }, email: string): Promise<void> {
   const { id, userId } = await subscriptionOf(project, email);
   const weekAgo = new Date(Date.now() - 7 * 86_400_000);
   await database().update(memberships).set({ createdAt: weekAgo }).where(eq(memberships.userId, userId));
-  const due = { nextDueAt: new Date(Date.now() - 60_000), createdAt: weekAgo };
+  const due = { nextDueAt: new Date(), createdAt: weekAgo };
   await database().update(digestSubscriptions).set(due).where(eq(digestSubscriptions.id, id));
   await database().execute(sql`select graphile_worker.add_job('find-due-digests', '{}'::json)`);
 }

@@ -35,7 +35,7 @@ test("A maintainer writes the next version: limits as people write them, a new o
   await limits.fill("4k7 ± 5 %");
   await dialog.getByRole("button", { name: "Save the check" }).click();
   await expect(dialog).toBeHidden();
-  await expect(page.getByText(/4k7 ± 5\s%/).first()).toBeVisible();
+  await expect(page.getByText(/4\.7\skΩ ± 5\s%/).first()).toBeVisible();
 
   const list = page.getByRole("grid", { name: "Checks of the stage Inspection, in order" });
   const order = () => list.getByRole("row").evaluateAll((rows) => rows.map((row) => row.textContent ?? ""));
