@@ -11,6 +11,8 @@ export type Profile = {
   speakAloud: boolean;
   mailOnReopen: boolean;
   hasPassword: boolean;
+  /** Mail to the address came back; no digest is sent until a mailed link was used again. */
+  mailBounced: boolean;
 };
 
 export async function loadProfile(scope: OwnScope): Promise<Profile> {
@@ -25,5 +27,6 @@ export async function loadProfile(scope: OwnScope): Promise<Profile> {
     speakAloud,
     mailOnReopen,
     hasPassword: user.passwordHash !== null,
+    mailBounced: user.mailBouncedAt !== null,
   };
 }
