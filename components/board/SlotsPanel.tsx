@@ -6,6 +6,7 @@ import { EmptyState } from "@/components/ui/EmptyState";
 import { Panel } from "@/components/ui/Panel";
 import type { BoardsView } from "@/lib/board/load-boards";
 import type { SlotActs } from "./board-acts";
+import { ArchivedSlots } from "./ArchivedSlots";
 import { SlotForm } from "./SlotForm";
 import { SlotRow } from "./SlotRow";
 import { useAct } from "./use-act";
@@ -61,6 +62,11 @@ export function SlotsPanel({ project, zone, view, canEdit, acts }: Props) {
               />
             ))}
           </ul>
+        )}
+        {view.archivedSlots.length > 0 && (
+          <div className="mt-3">
+            <ArchivedSlots slots={view.archivedSlots} restore={acts.restore} {...{ project, canEdit }} />
+          </div>
         )}
       </Panel>
     </section>

@@ -29,10 +29,18 @@ export type SlotLine = {
   history: { serial: string; placedAt: string; removedAt: string | null }[];
 };
 
+/** A slot that was taken off the drawing. */
+export type ArchivedSlot = { id: string; position: number; label: string; boardName: string | null };
+
 /** A unit that could go into a slot. */
 export type PlaceableUnit = { id: string; serial: string; boardId: string; position: number | null };
 
-export type BoardsView = { boards: BoardLine[]; slots: SlotLine[]; placeable: PlaceableUnit[] };
+export type BoardsView = {
+  boards: BoardLine[];
+  slots: SlotLine[];
+  archivedSlots: ArchivedSlot[];
+  placeable: PlaceableUnit[];
+};
 
 export async function loadBoards(scope: ProjectScope): Promise<BoardsView> {
   const db = database();
@@ -61,15 +69,16 @@ export async function loadBoards(scope: ProjectScope): Promise<BoardsView> {
   const slotRows = db
     .select()
     .from(slots)
-    .where(and(eq(slots.projectId, scope.projectId), isNull(slots.archivedAt)))
-    .orderBy(asc(slots.position));
+    .where(eq(slots.projectId, scope.projectId))
+    .orderBy(asc(slots.position), asc(slots.archivedAt));
   const unitRows = db
     .select({ id: units.id, serial: units.serial, boardId: units.boardId })
     .from(units)
     .innerJoin(boards, eq(boards.id, units.boardId))
     .where(and(eq(units.projectId, scope.projectId), isNull(units.archivedAt), eq(boards.kind, "card")))
     .orderBy(asc(units.serial));
-  const [foundBoards, foundSlots, foundUnits] = await Promise.all([boardRows, slotRows, unitRows]);
+  const [foundBoards, allSlots, foundUnits] = await Promise.all([boardRows, slotRows, unitRows]);
+  const foundSlots = allSlots.filter((slot) => slot.archivedAt === null);
   const sittings = foundSlots.length === 0 ? [] : await sittingsOf(foundSlots.map((slot) => slot.id));
   return {
     boards: foundBoards.map(({ archivedAt, ...board }) => ({ ...board, archived: archivedAt !== null })),
@@ -91,6 +100,14 @@ export async function loadBoards(scope: ProjectScope): Promise<BoardsView> {
         })),
       };
     }),
+    archivedSlots: allSlots
+      .filter((slot) => slot.archivedAt !== null)
+      .map(({ id, position, label, boardId }) => ({
+        id,
+        position,
+        label,
+        boardName: foundBoards.find((board) => board.id === boardId)?.name ?? null,
+      })),
     placeable: foundUnits.map((unit) => {
       const seat = sittings.find((line) => line.unitId === unit.id && line.removedAt === null);
       return { ...unit, position: foundSlots.find((slot) => slot.id === seat?.slotId)?.position ?? null };

@@ -139,6 +139,7 @@ describe("a slot", () => {
     const { project, scope, slots } = await machine();
     const slotId = slots[1] ?? "";
     await archiveSlot(scope, { ...write(project), slotId });
+    expect((await loadBoards(scope)).archivedSlots.map(({ position }) => position)).toEqual([2]);
     expect((await restoreSlot(scope, { ...write(project), slotId })).ok).toBe(true);
     await archiveSlot(scope, { ...write(project), slotId });
     await createSlot(scope, { ...write(project), position: 2, label: "", pitchHp: 4, boardId: null });
