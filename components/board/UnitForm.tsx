@@ -8,7 +8,7 @@ import { Form } from "@/components/ui/form/Form";
 import type { Reply } from "@/components/ui/form/reply";
 import { TheirVersion } from "@/components/workshop/TheirVersion";
 import { useStaleEdit } from "@/components/workshop/use-stale-edit";
-import type { RevisionView } from "@/lib/board/load-board";
+import type { RevisionChoice } from "@/lib/board/load-revisions";
 import { createUnitInput } from "@/lib/unit/schema";
 
 const fields = createUnitInput.pick({ serial: true, revisionId: true, note: true });
@@ -17,7 +17,7 @@ const current = fields.extend({ version: z.int() });
 
 type Props<Value> = {
   unit: UnitFields & { version?: number };
-  revisions: readonly RevisionView[];
+  revisions: readonly RevisionChoice[];
   submitLabel: string;
   save: (values: UnitFields, asked: { writeId: string; version: number }) => Promise<Reply<Value>>;
   onDone: (value: Value) => void;

@@ -3,12 +3,11 @@
 import Link from "next/link";
 import { useState } from "react";
 import { CardStages } from "@/components/rack/CardStages";
-import { Dialog } from "@/components/ui/Dialog";
 import { IconButton } from "@/components/ui/IconButton";
 import { Menu } from "@/components/ui/Menu";
 import type { BoardUnit, BoardView } from "@/lib/board/load-board";
 import type { UnitActs } from "./board-acts";
-import { UnitForm } from "./UnitForm";
+import { EditUnit } from "./EditUnit";
 import { useAct } from "./use-act";
 
 type RowProps = {
@@ -36,7 +35,7 @@ export function UnitRow({ unit, project, board, canEdit, acts, room }: RowProps)
         ),
     );
   return (
-    <li className="flex items-center gap-3 border-b border-rule py-3 last:border-b-0 last:pb-0">
+    <li className="relative flex items-center gap-3 border-b border-rule py-3 last:border-b-0 last:pb-0">
       <div className="grid min-w-0 flex-1 items-center gap-x-4 gap-y-2 @2xl:grid-cols-[9rem_minmax(0,1fr)]">
         <div className="flex min-w-0 flex-col">
           <Link
@@ -61,33 +60,24 @@ export function UnitRow({ unit, project, board, canEdit, acts, room }: RowProps)
         {unit.note && <p className="col-span-full line-clamp-2 text-sm text-ink-soft">{unit.note}</p>}
       </div>
       {canEdit && (
-        <Menu
-          label={unit.serial}
-          trigger={<IconButton icon="more" label={`More for ${unit.serial}`} size="sm" tooltip={false} />}
-          entries={[
-            { id: "edit", label: "Change the unit", onAction: () => setEditing(true) },
-            { id: "archive", label: "Archive the unit", isDanger: true, onAction: () => void archive() },
-          ]}
-        />
-      )}
-      <Dialog title={`Change ${unit.serial}`} isOpen={isEditing} onOpenChange={setEditing}>
-        {(close) => (
-          <UnitForm
-            unit={unit}
-            revisions={board.revisions}
-            submitLabel="Save the unit"
-            save={(values, asked) => acts.edit({ project, unitId: unit.id, ...asked, ...values })}
-            onCancel={close}
-            onDone={(value) => {
-              close();
-              void act(
-                async () => ({ ok: true, value }),
-                ({ serial }) => `${serial} is saved.`,
-              );
-            }}
+        <span className="absolute right-0 top-2 @2xl:static">
+          <Menu
+            label={unit.serial}
+            trigger={<IconButton icon="more" label={`More for ${unit.serial}`} size="sm" tooltip={false} />}
+            entries={[
+              { id: "edit", label: "Change the unit", onAction: () => setEditing(true) },
+              { id: "archive", label: "Archive the unit", isDanger: true, onAction: () => void archive() },
+            ]}
           />
-        )}
-      </Dialog>
+        </span>
+      )}
+      <EditUnit
+        {...{ project, unit }}
+        revisions={board.revisions}
+        edit={acts.edit}
+        isOpen={isEditing}
+        onOpenChange={setEditing}
+      />
     </li>
   );
 }

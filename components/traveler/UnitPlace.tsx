@@ -1,7 +1,12 @@
+import type { UnitActs } from "@/components/board/board-acts";
+import { EditUnit } from "@/components/board/EditUnit";
+import { RestoreUnit } from "@/components/board/RestoreUnit";
 import { Page } from "@/components/shell/Page";
+import { Button } from "@/components/ui/Button";
 import { ButtonLink } from "@/components/ui/ButtonLink";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { Notice } from "@/components/ui/Notice";
+import type { RevisionChoice } from "@/lib/board/load-revisions";
 import type { MoveView } from "@/lib/traveler/load-move";
 import type { TravelerView, UnitWithoutTraveler } from "@/lib/traveler/traveler-view";
 import { countsSentence } from "./counts-sentence";
@@ -14,15 +19,22 @@ type Props = {
   traveler: TravelerView | undefined;
   move: MoveView | undefined;
   openCheck: string | undefined;
+  /** What it can have been made from; asked for only when it can be changed. */
+  revisions: readonly RevisionChoice[];
   canEditUnit: boolean;
+  unitActs: Pick<UnitActs, "edit" | "restore">;
   frame: TravelerFrame;
 };
 
 /** One physical board and the document that accompanies it. */
-export function UnitPlace({ unit, traveler, move, openCheck, canEditUnit, frame }: Props) {
+export function UnitPlace({ unit, traveler, move, openCheck, revisions, canEditUnit, unitActs, frame }: Props) {
   const { serial, note, archived } = unit.unit;
   const base = `/projects/${frame.project}`;
   const self = `${base}/units/${encodeURIComponent(serial)}`;
+  const newest =
+    traveler && traveler.procedure.newestNumber > traveler.procedure.number
+      ? traveler.procedure.newestNumber
+      : undefined;
   return (
     <Page
       title={
@@ -41,8 +53,15 @@ export function UnitPlace({ unit, traveler, move, openCheck, canEditUnit, frame 
       actions={
         <>
           {move && frame.may.move && <MoveTraveler project={frame.project} move={move} act={frame.acts.move} />}
-          {canEditUnit && (
-            <ButtonLink href={`${base}/boards/${encodeURIComponent(unit.board.code)}`}>Edit the unit</ButtonLink>
+          {canEditUnit && !archived && (
+            <EditUnit
+              project={frame.project}
+              unit={{ ...unit.unit, revisionId: unit.revision.id }}
+              revisions={revisions}
+              edit={unitActs.edit}
+              addressOf={`${base}/units`}
+              trigger={<Button>Change the unit</Button>}
+            />
           )}
           {traveler && (
             <ButtonLink href={`${self}/print`} prefetch={false}>
@@ -59,13 +78,16 @@ export function UnitPlace({ unit, traveler, move, openCheck, canEditUnit, frame 
     >
       <div className="grid gap-4">
         {archived && (
-          <Notice kind="waiting">
-            This unit is put away. Its traveler can be read; nothing can be recorded on it.
+          <Notice
+            kind="waiting"
+            actions={canEditUnit && <RestoreUnit project={frame.project} unit={unit.unit} restore={unitActs.restore} />}
+          >
+            This unit is archived. Its traveler can be read; nothing can be recorded on it.
           </Notice>
         )}
         {note && <p className="text-ink-soft max-w-prose whitespace-pre-line">{note}</p>}
-        {move && !frame.may.move && (
-          <Notice kind="info">Version {move.to} of the procedure is out. A maintainer can move this unit over.</Notice>
+        {newest !== undefined && !archived && !frame.may.move && (
+          <Notice kind="info">Version {newest} of the procedure is out. A maintainer can move this unit over.</Notice>
         )}
         {traveler ? (
           <TravelerPlace traveler={traveler} frame={frame} openCheck={openCheck} />

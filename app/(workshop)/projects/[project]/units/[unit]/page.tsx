@@ -4,8 +4,10 @@ import { UnitPlace } from "@/components/traveler/UnitPlace";
 import { can } from "@/lib/access/permissions";
 import { definePage } from "@/lib/actions/define-page";
 import { VOID_WINDOW_MS } from "@/lib/attempt/void-window";
+import { loadRevisions } from "@/lib/board/load-revisions";
 import { loadMove } from "@/lib/traveler/load-move";
 import { loadTraveler } from "@/lib/traveler/load-traveler";
+import { editUnit, restoreUnit } from "../../boards/unit-actions";
 import { captionEvidence, removeEvidence, restoreEvidence } from "../../evidence/actions";
 import * as acts from "./actions";
 
@@ -25,6 +27,7 @@ export default definePage({
     ]);
     if (loaded.kind === "missing") notFound();
     const unit = loaded.kind === "none" ? loaded.unit : loaded.traveler;
+    const mayEdit = !scope.archived && can(scope.role, "unit.edit");
     const allows = (permission: Parameters<typeof can>[1]) =>
       !scope.archived && !unit.unit.archived && can(scope.role, permission);
     return (
@@ -33,7 +36,9 @@ export default definePage({
         traveler={loaded.kind === "traveler" ? loaded.traveler : undefined}
         move={move}
         openCheck={typeof search.check === "string" ? search.check : undefined}
-        canEditUnit={allows("unit.edit")}
+        revisions={mayEdit && !unit.unit.archived ? await loadRevisions(scope, unit.board.id) : []}
+        canEditUnit={mayEdit}
+        unitActs={{ edit: editUnit, restore: restoreUnit }}
         frame={{
           project: scope.slug,
           serial: unit.unit.serial,
@@ -50,7 +55,7 @@ export default definePage({
             voidOwn: allows("attempt.void-own"),
             voidAny: allows("attempt.void-any"),
             prerequisites: allows("prerequisite.edit"),
-            move: mayMove,
+            move: allows("procedure.edit"),
           },
           acts: {
             reopen: acts.reopenCheck,
