@@ -1,5 +1,5 @@
 import { ConnectorFace } from "@/components/ui/glyphs/ConnectorFace";
-import { findConnector, findPin } from "@/lib/calc/connector";
+import { findConnector, findPin, pinAt } from "@/lib/calc/connector";
 
 export type BoardFace = { connectorType: string | null; connectorReference: string };
 
@@ -16,6 +16,7 @@ export function PinDrawing({ pins, board }: { pins: readonly string[]; board: Bo
       <ConnectorFace
         rows={connector.rows.map((row) => row.name)}
         positions={connector.positions}
+        pinName={(row, position) => pinAt(connector, row, position)}
         lit={new Set(lit.map((pin) => pin.name))}
         label={`Connector ${board.connectorReference}`}
         className="w-full"

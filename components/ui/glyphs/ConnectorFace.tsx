@@ -53,6 +53,8 @@ export function ConnectorFace(props: ConnectorFaceProps) {
   const length = (positions - 1) * PITCH + 2 * EDGE;
   const breadth = across * PITCH + 2 * EDGE;
   const [width, height] = isLying ? [length, breadth] : [breadth, length];
+  // Pins that only count have no row letter: each row says its first pin, and there is no axis of positions.
+  const isNumbered = props.pinName !== undefined && !rows.every((row) => row.length === 1);
   const nameOf = props.pinName ?? ((row: number, position: number) => `${rows[row] ?? ""}${position}`);
   const names = rows
     .flatMap((_, row) => range(positions).map((position) => nameOf(row, position)))
@@ -85,7 +87,7 @@ export function ConnectorFace(props: ConnectorFaceProps) {
               textAnchor="middle"
               className="mono fill-ink-soft text-[9px]"
             >
-              {row}
+              {isNumbered ? nameOf(index, 1) : row}
             </text>
             {range(positions).map((position) => {
               const pin = nameOf(index, position);
@@ -106,6 +108,7 @@ export function ConnectorFace(props: ConnectorFaceProps) {
         );
       })}
       {range(positions)
+        .filter(() => !isNumbered)
         .filter((position) => position === 1 || position === positions || position % 8 === 0)
         .map((position) => {
           const { x, y } = place(0, position);

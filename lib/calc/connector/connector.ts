@@ -62,3 +62,7 @@ export function header(positions: number): Connector {
     pins,
   };
 }
+
+/** The name of the pin in a row, counted from 0, at a position; empty where the connector has none. */
+export const pinAt = (connector: Connector, row: number, position: number): string =>
+  connector.pins.find((pin) => pin.row === row && pin.position === position)?.name ?? "";
