@@ -7,12 +7,13 @@ import { Badge } from "@/components/ui/Badge";
 import { Button } from "@/components/ui/Button";
 import { ConfirmDialog } from "@/components/ui/ConfirmDialog";
 import { Dialog } from "@/components/ui/Dialog";
-import { Notice } from "@/components/ui/Notice";
 import type { BoardView } from "@/lib/board/load-board";
 import { findConnector } from "@/lib/calc/connector";
 import type { BoardActs, RevisionActs, UnitActs } from "./board-acts";
+import { ArchivedBoard } from "./ArchivedBoard";
 import { BoardForm } from "./BoardForm";
 import { connectorId } from "./connector-id";
+import { ConnectorPanel } from "./ConnectorPanel";
 import { ProcedurePanel } from "./ProcedurePanel";
 import { RevisionsPanel } from "./RevisionsPanel";
 import { UnitsPanel } from "./UnitsPanel";
@@ -22,7 +23,7 @@ type Props = {
   project: string;
   zone: string;
   board: BoardView;
-  can: { editBoard: boolean; editUnits: boolean; editProcedure: boolean };
+  can: { editBoard: boolean; editUnits: boolean; editProcedure: boolean; purge: boolean };
   boardActs: Omit<BoardActs, "create">;
   revisionActs: RevisionActs;
   unitActs: UnitActs;
@@ -88,18 +89,7 @@ export function BoardPlace({ project, zone, board, can, boardActs, revisionActs,
       }
     >
       {board.archived && (
-        <Notice
-          kind="waiting"
-          actions={
-            can.editBoard && (
-              <Button size="sm" onPress={() => void restore()}>
-                Restore the board
-              </Button>
-            )
-          }
-        >
-          This board is archived. Its units are out of the slots; what was recorded stays.
-        </Notice>
+        <ArchivedBoard {...{ project, board }} can={{ restore: can.editBoard, purge: can.purge }} acts={boardActs} />
       )}
       <p className="-mt-2 flex flex-wrap gap-2">
         <Badge>{board.kind}</Badge>
@@ -108,7 +98,14 @@ export function BoardPlace({ project, zone, board, can, boardActs, revisionActs,
           {findConnector(board.connectorType)?.label ?? "no connector drawn"}
         </Badge>
       </p>
-      <UnitsPanel project={project} board={board} canEdit={can.editUnits && !board.archived} acts={unitActs} />
+      <UnitsPanel
+        project={project}
+        board={board}
+        canEdit={can.editUnits && !board.archived}
+        canPurge={can.purge}
+        acts={unitActs}
+      />
+      <ConnectorPanel board={board} />
       <Dialog title="Change the board" isOpen={isEditing} onOpenChange={setEditing}>
         {(close) => (
           <BoardForm

@@ -1,6 +1,5 @@
 "use client";
 
-import Link from "next/link";
 import { stageRoom } from "@/components/rack/CardStages";
 import { Button } from "@/components/ui/Button";
 import { Dialog } from "@/components/ui/Dialog";
@@ -9,13 +8,14 @@ import { Panel } from "@/components/ui/Panel";
 import { Disclosure } from "@/components/workshop/Disclosure";
 import type { BoardView } from "@/lib/board/load-board";
 import type { UnitActs } from "./board-acts";
+import { ArchivedUnit } from "./ArchivedUnit";
 import { UnitForm } from "./UnitForm";
 import { UnitRow } from "./UnitRow";
 import { useAct } from "./use-act";
 
-type Props = { project: string; board: BoardView; canEdit: boolean; acts: UnitActs };
+type Props = { project: string; board: BoardView; canEdit: boolean; canPurge: boolean; acts: UnitActs };
 
-export function UnitsPanel({ project, board, canEdit, acts }: Props) {
+export function UnitsPanel({ project, board, canEdit, canPurge, acts }: Props) {
   const { act } = useAct();
   const inWork = board.units.filter((unit) => !unit.archived);
   const archived = board.units.filter((unit) => unit.archived);
@@ -50,7 +50,7 @@ export function UnitsPanel({ project, board, canEdit, acts }: Props) {
       actions={canEdit && inWork.length > 0 && add}
     >
       {inWork.length === 0 ? (
-        <EmptyState title="No units yet" action={canEdit && add}>
+        <EmptyState title={archived.length > 0 ? "No units in work" : "No units yet"} action={canEdit && add}>
           <p>
             A unit is one physical copy with a serial number. Checks are carried out on units; each has its own
             traveler.
@@ -68,24 +68,7 @@ export function UnitsPanel({ project, board, canEdit, acts }: Props) {
           <Disclosure summary={archived.length === 1 ? "1 archived unit" : `${archived.length} archived units`}>
             <ul className="flex flex-col gap-2">
               {archived.map((unit) => (
-                <li key={unit.id} className="flex flex-wrap items-center gap-3">
-                  <Link href={`/projects/${project}/units/${unit.serial}`} className="link mono text-sm">
-                    {unit.serial}
-                  </Link>
-                  {canEdit && (
-                    <Button
-                      size="sm"
-                      onPress={() =>
-                        void act(
-                          () => acts.restore({ project, writeId: crypto.randomUUID(), unitId: unit.id }),
-                          ({ serial }) => `${serial} is back.`,
-                        )
-                      }
-                    >
-                      Restore
-                    </Button>
-                  )}
-                </li>
+                <ArchivedUnit key={unit.id} {...{ project, unit, acts }} can={{ restore: canEdit, purge: canPurge }} />
               ))}
             </ul>
           </Disclosure>

@@ -5,10 +5,11 @@ import type {
   createBoardInput,
   createRevisionInput,
   editBoardInput,
+  purgeBoardInput,
   releaseRevisionInput,
 } from "@/lib/board/schema";
 import type { changeSlotInput, createSlotInput, editSlotInput, placeUnitInput } from "@/lib/slot/schema";
-import type { changeUnitInput, createUnitInput, editUnitInput } from "@/lib/unit/schema";
+import type { changeUnitInput, createUnitInput, editUnitInput, purgeUnitInput } from "@/lib/unit/schema";
 
 type Act<Schema extends z.ZodType, Value> = (input: z.input<Schema>) => Promise<Reply<Value>>;
 
@@ -18,6 +19,7 @@ export type BoardActs = {
   edit: Act<typeof editBoardInput, { code: string; version: number }>;
   archive: Act<typeof changeBoardInput, { units: number }>;
   restore: Act<typeof changeBoardInput, { units: number }>;
+  purge: Act<typeof purgeBoardInput, { code: string }>;
 };
 
 export type RevisionActs = {
@@ -39,4 +41,5 @@ export type UnitActs = {
   edit: Act<typeof editUnitInput, { serial: string; version: number }>;
   archive: Act<typeof changeUnitInput, { serial: string }>;
   restore: Act<typeof changeUnitInput, { serial: string }>;
+  purge: Act<typeof purgeUnitInput, { serial: string }>;
 };

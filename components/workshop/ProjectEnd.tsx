@@ -1,14 +1,14 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useRef, useState } from "react";
 import { Button } from "@/components/ui/Button";
 import { ConfirmDialog } from "@/components/ui/ConfirmDialog";
 import { Panel } from "@/components/ui/Panel";
-import { TextField } from "@/components/ui/TextField";
 import type { Reply } from "@/components/ui/form/reply";
 import { toast } from "@/components/ui/toast-store";
 import type { ProjectSettingsView } from "@/lib/project/load-settings";
+import { counted } from "./counted";
+import { PurgeDialog } from "./PurgeDialog";
 
 type Write = { project: string; writeId: string };
 export type ProjectEndActions = {
@@ -18,8 +18,6 @@ export type ProjectEndActions = {
 };
 
 type Props = { project: string; settings: ProjectSettingsView; actions: ProjectEndActions };
-
-const counted = (count: number, one: string, many: string) => `${count} ${count === 1 ? one : many}`;
 
 /** Putting the project away, bringing it back, and removing it for good. */
 export function ProjectEnd({ project, settings, actions }: Props) {
@@ -72,47 +70,24 @@ export function ProjectEnd({ project, settings, actions }: Props) {
         <Button kind="primary" onPress={() => void restore()}>
           Restore the project
         </Button>
-        <Purge project={project} settings={settings} purge={actions.purge} onGone={() => router.push("/projects")} />
+        <PurgeDialog
+          what="the project"
+          name={settings.name}
+          ask={`Type the name of the project: ${settings.name}`}
+          consequences={whatGoes(settings)}
+          purge={(asked) => actions.purge({ project, ...asked })}
+          onGone={() => router.push("/projects")}
+        />
       </div>
     </Panel>
   );
 }
 
-type PurgeProps = {
-  project: string;
-  settings: ProjectSettingsView;
-  purge: ProjectEndActions["purge"];
-  onGone: () => void;
-};
-
-function Purge({ project, settings, purge, onGone }: PurgeProps) {
-  const [typed, setTyped] = useState("");
-  const writeId = useRef(crypto.randomUUID());
-  const { holds } = settings;
-  return (
-    <ConfirmDialog
-      title={`Purge ${settings.name} for good?`}
-      trigger={<Button kind="danger">Purge the project</Button>}
-      consequences={[
-        `${counted(holds.boards, "board", "boards")} and ${counted(holds.units, "unit", "units")} go, with their procedures and travelers.`,
-        `${counted(holds.attempts, "attempt", "attempts")} with every reading go. They are kept nowhere else.`,
-        `${counted(holds.files, "file", "files")} and ${counted(holds.logEntries, "log entry", "log entries")} go.`,
-        `${counted(holds.members, "member loses", "members lose")} access.`,
-        "It cannot be undone.",
-      ]}
-      confirmLabel="Purge it for good"
-      onConfirm={async () => {
-        const reply = await purge({ project, writeId: writeId.current, confirmation: typed });
-        if (!reply.ok) return reply.error.fields?.confirmation ?? reply.error.message;
-        onGone();
-      }}
-    >
-      <TextField
-        label={`Type the name of the project: ${settings.name}`}
-        value={typed}
-        onChange={setTyped}
-        autoComplete="off"
-      />
-    </ConfirmDialog>
-  );
+function whatGoes({ holds }: ProjectSettingsView): string[] {
+  return [
+    `${counted(holds.boards, "board")} and ${counted(holds.units, "unit")} go, with their procedures and travelers.`,
+    `${counted(holds.attempts, "attempt")} with every reading go. They are kept nowhere else.`,
+    `${counted(holds.files, "file")} and ${counted(holds.logEntries, "log entry", "log entries")} go.`,
+    `${counted(holds.members, "member loses", "members lose")} access.`,
+  ];
 }

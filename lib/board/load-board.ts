@@ -1,13 +1,17 @@
 import { and, asc, desc, eq, inArray, isNull } from "drizzle-orm";
 import { database } from "@/db/client";
 import { findBoardByCode } from "@/db/queries/boards";
+import { findHoldings } from "@/db/queries/holdings";
 import { revisions, slotOccupancies, slots, units, type BoardKind } from "@/db/schema/boards";
 import { procedures } from "@/db/schema/procedures";
 import { checks, travelers } from "@/db/schema/travelers";
 import type { ProjectScope } from "@/lib/access/scope";
 import { STAGES } from "@/lib/procedure/stages";
 import type { RackUnit } from "@/lib/rack/rack-view";
+import type { Holdings } from "@/lib/unit/holdings";
 import { suggestSerial } from "@/lib/unit/suggest-serial";
+import type { CoveredPin } from "./covered-pins";
+import { loadCoveredPins } from "./load-covered-pins";
 
 export type RevisionView = {
   id: string;
@@ -26,6 +30,8 @@ export type BoardUnit = RackUnit & {
   position: number | null;
   /** Number of the procedure its traveler follows; null while it has none. */
   procedure: number | null;
+  /** What a purge would take; of an archived unit only. */
+  holds: Holdings | undefined;
 };
 
 export type BoardView = {
@@ -40,6 +46,8 @@ export type BoardView = {
   archived: boolean;
   revisions: RevisionView[];
   units: BoardUnit[];
+  /** Pins of the connector that checks of the newest issued procedure cover. */
+  covered: CoveredPin[];
   issued: { number: number; at: string; note: string } | null;
   hasDraft: boolean;
   nextSerial: string;
@@ -49,7 +57,7 @@ export async function loadBoard(scope: ProjectScope, code: string): Promise<Boar
   const db = database();
   const board = await findBoardByCode(db, scope, code.toUpperCase());
   if (!board) return undefined;
-  const [revisionRows, unitRows, checkRows, procedureRows] = await Promise.all([
+  const [revisionRows, unitRows, checkRows, procedureRows, covered] = await Promise.all([
     db.select().from(revisions).where(eq(revisions.boardId, board.id)).orderBy(desc(revisions.createdAt)),
     db
       .select({ unit: units, procedure: procedures.number, position: slots.position })
@@ -71,7 +79,10 @@ export async function loadBoard(scope: ProjectScope, code: string): Promise<Boar
       .from(procedures)
       .where(and(eq(procedures.boardId, board.id), inArray(procedures.state, ["draft", "issued"])))
       .orderBy(desc(procedures.number)),
+    loadCoveredPins(db, board),
   ]);
+  const archived = unitRows.flatMap(({ unit }) => (unit.archivedAt ? [unit.id] : []));
+  const holdings = await findHoldings(db, scope, archived);
   const issued = procedureRows.find((row) => row.state === "issued");
   const { id, name, summary, kind, connectorType, connectorReference, version } = board;
   const rackBoard = {
@@ -107,6 +118,7 @@ export async function loadBoard(scope: ProjectScope, code: string): Promise<Boar
         archived: unit.archivedAt !== null,
         position,
         procedure,
+        holds: holdings.find((holds) => holds.unitId === unit.id),
         board: rackBoard,
         stages: STAGES.map(({ id: stage }) => ({
           stage,
@@ -120,6 +132,7 @@ export async function loadBoard(scope: ProjectScope, code: string): Promise<Boar
         marked: null,
       };
     }),
+    covered,
     issued: issued ? { number: issued.number, at: issued.at?.toISOString() ?? "", note: issued.note } : null,
     hasDraft: procedureRows.some((row) => row.state === "draft"),
     nextSerial: suggestSerial(

@@ -8,7 +8,7 @@ import { refuse, reject, type Answer } from "@/lib/actions/answer";
 import { lockStructure } from "@/lib/check/lock-states";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
-import { addHoldings } from "@/lib/unit/add-holdings";
+import { addHoldings } from "@/lib/unit/holdings";
 import { removeUnits } from "@/lib/unit/remove-units";
 import type { PurgeBoardInput } from "./schema";
 

@@ -6,7 +6,7 @@ import { lockStructure } from "@/lib/check/lock-states";
 import { database } from "@/db/client";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
-import { addHoldings } from "./add-holdings";
+import { addHoldings } from "./holdings";
 import { removeUnits } from "./remove-units";
 import type { PurgeUnitInput } from "./schema";
 

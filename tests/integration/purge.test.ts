@@ -63,9 +63,12 @@ describe("purging a unit", () => {
     expect(await db.select().from(attempts).where(eq(attempts.unitId, given.psu.id))).toHaveLength(1);
   });
 
-  it("takes its checks, attempts and files, says so in the log, and takes nothing of its sister", async () => {
+  it("takes its checks, attempts and files, as was shown before, says so in the log, and takes nothing of its sister", async () => {
     const given = await machine();
-    expect(await must(purgeUnit(given.maintainer, await archivedUnit(given)))).toEqual({ serial: "PSU-01" });
+    const input = await archivedUnit(given);
+    const shown = (await loadBoard(given.maintainer, "PSU"))?.units.find((unit) => unit.serial === "PSU-01")?.holds;
+    expect(shown).toMatchObject({ checks: 2, attempts: 1, files: 1, waitsOfOtherUnits: 1 });
+    expect(await must(purgeUnit(given.maintainer, input))).toEqual({ serial: "PSU-01" });
     expect(await db.select().from(checks).where(eq(checks.unitId, given.psu.id))).toEqual([]);
     expect(await db.select().from(attempts).where(eq(attempts.unitId, given.psu.id))).toEqual([]);
     // Without a row nobody can ask for the file any more, and the sweep deletes its object.

@@ -4,8 +4,8 @@ import { BoardPlace } from "@/components/board/BoardPlace";
 import { can } from "@/lib/access/permissions";
 import { definePage } from "@/lib/actions/define-page";
 import { loadBoard } from "@/lib/board/load-board";
-import { archiveBoard, createRevision, editBoard, releaseRevision, restoreBoard } from "../actions";
-import { archiveUnit, createUnit, editUnit, restoreUnit } from "../unit-actions";
+import { archiveBoard, createRevision, editBoard, purgeBoard, releaseRevision, restoreBoard } from "../actions";
+import { archiveUnit, createUnit, editUnit, purgeUnit, restoreUnit } from "../unit-actions";
 
 export async function generateMetadata({ params }: { params: Promise<{ board: string }> }): Promise<Metadata> {
   return { title: (await params).board };
@@ -27,10 +27,17 @@ export default definePage({
           editBoard: open && can(scope.role, "board.edit"),
           editUnits: open && can(scope.role, "unit.edit"),
           editProcedure: open && can(scope.role, "procedure.edit"),
+          purge: open && can(scope.role, "board.purge"),
         }}
-        boardActs={{ edit: editBoard, archive: archiveBoard, restore: restoreBoard }}
+        boardActs={{ edit: editBoard, archive: archiveBoard, restore: restoreBoard, purge: purgeBoard }}
         revisionActs={{ create: createRevision, release: releaseRevision }}
-        unitActs={{ create: createUnit, edit: editUnit, archive: archiveUnit, restore: restoreUnit }}
+        unitActs={{
+          create: createUnit,
+          edit: editUnit,
+          archive: archiveUnit,
+          restore: restoreUnit,
+          purge: purgeUnit,
+        }}
       />
     );
   },
