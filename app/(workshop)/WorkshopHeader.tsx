@@ -7,7 +7,7 @@ import { asTheme, THEME_COOKIE } from "@/components/ui/theme";
 import { OwnMenu } from "@/components/workshop/OwnMenu";
 import { SavedThemeSwitch } from "@/components/workshop/SavedThemeSwitch";
 import { currentViewer } from "@/lib/auth/current-viewer";
-import { signOut } from "./actions";
+import { setTheme, signOut } from "./actions";
 
 type Props = { crumbs?: readonly Crumb[]; search?: ReactNode; nav?: ReactNode };
 
@@ -21,7 +21,7 @@ export async function WorkshopHeader({ crumbs, search, nav }: Props) {
       {...(crumbs ? { crumbs } : {})}
       search={search}
       nav={nav}
-      theme={<SavedThemeSwitch key={theme} theme={theme} />}
+      theme={<SavedThemeSwitch key={theme} theme={theme} {...(viewer ? { save: setTheme } : {})} />}
       account={
         viewer ? (
           <OwnMenu name={viewer.name} email={viewer.email} signOut={signOut} />

@@ -1,6 +1,7 @@
 "use server";
 
-import { nothingInput } from "@/lib/account/schema";
+import { nothingInput, setThemeInput } from "@/lib/account/schema";
+import { setTheme as set } from "@/lib/account/set-theme";
 import { ok } from "@/lib/actions/answer";
 import { defineAction } from "@/lib/actions/define-action";
 import { signOut as endSession } from "@/lib/auth/auth";
@@ -15,3 +16,5 @@ export const signOut = defineAction({
     return ok(null);
   },
 });
+
+export const setTheme = defineAction({ name: "set-theme", permission: "own", input: setThemeInput, run: set });

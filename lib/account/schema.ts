@@ -60,11 +60,16 @@ export type ResetTyped = z.input<typeof resetInput>;
 export const confirmInput = z.object({ token, password: givenPassword });
 export type ConfirmInput = z.output<typeof confirmInput>;
 
+const theme = z.enum(["system", "light", "dark"], { message: "Choose how Boardwake looks." });
+
+export const setThemeInput = z.object({ writeId, theme });
+export type SetThemeInput = z.output<typeof setThemeInput>;
+
 export const profileInput = z.object({
   writeId,
   name: personName,
   timeZone,
-  theme: z.enum(["system", "light", "dark"], { message: "Choose how Boardwake looks." }),
+  theme,
   speakAloud: z.boolean(),
   mailOnReopen: z.boolean(),
 });

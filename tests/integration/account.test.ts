@@ -10,6 +10,7 @@ import { lookAtLink } from "@/lib/account/look-at-link";
 import { requestReset } from "@/lib/account/request-reset";
 import { resetPassword } from "@/lib/account/reset-password";
 import { endAllSessions, endSession, loadSessions } from "@/lib/account/sessions";
+import { setTheme } from "@/lib/account/set-theme";
 import { signUp } from "@/lib/account/sign-up";
 import type * as EnvModule from "@/lib/env";
 import {
@@ -24,6 +25,7 @@ import {
   writeId,
 } from "../support/accounts";
 import { useDatabase } from "../support/database";
+import { makeViewer } from "../support/people";
 
 const settings = vi.hoisted(() => ({ signUp: "open" }));
 vi.mock("@/lib/env", async (original) => {
@@ -255,4 +257,10 @@ describe("sessions", () => {
     expect(await endAllSessions(scope)).toEqual({ ok: true, value: { ended: 2 } });
     expect(await Promise.all(both.map((session) => session.isOpen()))).toEqual([false, false]);
   });
+});
+
+it("keeps the colours chosen in the header for the person's other devices", async () => {
+  const viewer = await makeViewer();
+  await setTheme({ viewer }, { writeId: writeId(), theme: "dark" });
+  expect((await findUserByEmail(database(), viewer.email))?.theme).toBe("dark");
 });

@@ -35,5 +35,5 @@ export const accountRows: Record<string, Rows> = {
     endSession: { permission: "own" },
     signOutEverywhere: { permission: "own" },
   },
-  "app/(workshop)/actions.ts": { signOut: { permission: "public" } },
+  "app/(workshop)/actions.ts": { signOut: { permission: "public" }, setTheme: { permission: "own" } },
 };
