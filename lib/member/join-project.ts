@@ -24,7 +24,8 @@ export async function joinProject(tx: Transaction, { projectId, userId, role, zo
   await recordEvent(tx, { projectId, actorId: userId, subjectId: userId }, "member.joined", { role });
 }
 
-async function subscribe(tx: Transaction, { projectId, userId, role, zone }: Joining): Promise<void> {
+/** Everybody's subscription, also of those for whom it is off at first. */
+export async function subscribe(tx: Transaction, { projectId, userId, role, zone }: Joining): Promise<void> {
   const enabled = role === "collaborator";
   const nextDueAt = nextDue({ ...DEFAULT_DIGEST, zone }, new Date());
   const made = await tx

@@ -2,11 +2,12 @@ import { randomUUID } from "node:crypto";
 import { eq } from "drizzle-orm";
 import { describe, expect, test } from "vitest";
 import { events } from "@/db/schema/events";
-import { memberships, projects } from "@/db/schema/projects";
+import { digestSubscriptions, memberships, projects } from "@/db/schema/projects";
 import { attempts, checks } from "@/db/schema/travelers";
 import { grant } from "@/lib/access/grant";
 import { recordAttempt } from "@/lib/attempt/record-attempt";
 import { recordAttemptInput } from "@/lib/attempt/schema";
+import { loadSubscriptions } from "@/lib/digest/load-subscriptions";
 import { archiveProject } from "@/lib/project/archive-project";
 import { createProject } from "@/lib/project/create-project";
 import { editProject } from "@/lib/project/edit-project";
@@ -37,6 +38,15 @@ describe("setting a project up", () => {
     if (!first.ok || !second.ok) throw new Error("not created");
     expect(second.value.slug).toBe(`${first.value.slug}-2`);
     expect((await scopeFor(viewer, first.value)).role).toBe("maintainer");
+  });
+
+  test("whoever does it can have the weekly e-mail, which is off at first as for any maintainer", async () => {
+    const viewer = await makeViewer();
+    const made = await createProject({ viewer }, { ...given, writeId: randomUUID() });
+    if (!made.ok) throw new Error("not created");
+    const kept = await db.select().from(digestSubscriptions).where(eq(digestSubscriptions.userId, viewer.userId));
+    expect(one(kept)).toMatchObject({ enabled: false, weekday: 7, hour: 18, zone: viewer.timeZone });
+    expect(await loadSubscriptions({ viewer })).toMatchObject([{ project: made.value.slug, enabled: false }]);
   });
 
   test("a double click makes one project", async () => {
