@@ -16,19 +16,21 @@ type Props = {
 
 /** Limits as people write them; beside the field stands what was understood, or what is not clear yet. */
 export function LimitsField({ label, unit, typed, onTyped, error, whenEmpty, isLabelHidden }: Props) {
+  const said = understood(typed, unit);
   return (
     <QuantityField
       label={label}
       value={typed}
       onChange={onTyped}
+      // While one types the sentence is a hint; once it is refused the same sentence is the error, said once.
       error={error}
       maxLength={80}
       inputMode="text"
       placeholder={whenEmpty ?? "4.75 … 5.25 V"}
       isLabelHidden={isLabelHidden ?? false}
       description={
-        understood(typed, unit) ??
-        (whenEmpty || isLabelHidden ? undefined : "4.75 … 5.25 V, 5 V ± 5 %, < 0.5 Ω, > 1 MΩ")
+        (said === error ? undefined : said) ??
+        (error || whenEmpty || isLabelHidden ? undefined : "4.75 … 5.25 V, 5 V ± 5 %, < 0.5 Ω, > 1 MΩ")
       }
     />
   );
