@@ -24,6 +24,7 @@ async function makeWeek() {
   ];
   await must(send(builder, passed.id, { record: { conforms: true } }));
   await must(send(builder, failed.id, { record: { typed: "4.61" } }));
+  await dateBack(card);
   return { ...card, failed };
 }
 
@@ -103,4 +104,17 @@ async function makeDue(project: { id: string }, email: string): Promise<void> {
   const due = { nextDueAt: new Date(), createdAt: weekAgo };
   await database().update(digestSubscriptions).set(due).where(eq(digestSubscriptions.id, id));
   await database().execute(sql`select graphile_worker.add_job('find-due-digests', '{}'::json)`);
+}
+
+/** Two days ago: a digest tells what has settled. History is final, but for whoever says that this is no history. */
+async function dateBack(project: { id: string }): Promise<void> {
+  await database().transaction(async (tx) => {
+    await tx.execute(sql`select set_config('boardwake.purge', 'on', true)`);
+    await tx.execute(
+      sql`update events set created_at = created_at - interval '2 days' where project_id = ${project.id}`,
+    );
+    await tx.execute(sql`
+      update attempts set recorded_at = recorded_at - interval '2 days', performed_at = performed_at - interval '2 days'
+      where project_id = ${project.id}`);
+  });
 }
