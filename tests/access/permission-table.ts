@@ -32,7 +32,6 @@ export const MAY: Record<Permission, readonly Role[]> = {
   "digest.preview": maintainers,
   "project.archive": maintainers,
   "board.purge": maintainers,
-  "board.purge": maintainers,
   // own digest; leaving
   "digest.own": everyone,
   "membership.leave": everyone,

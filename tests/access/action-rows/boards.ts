@@ -46,14 +46,6 @@ export const boardRows: Record<string, Rows> = {
         return { boardId: machine.board.id, confirmation: "TIM" };
       },
     },
-    purgeBoard: {
-      permission: "board.purge",
-      input: async (machine) => {
-        const { scope, write } = asMaintainer(machine);
-        await must(archiveBoard(scope, { ...write, boardId: machine.board.id }));
-        return { boardId: machine.board.id, confirmation: "TIM" };
-      },
-    },
     createRevision: { permission: "board.edit", input: ({ board }) => ({ boardId: board.id, notes: "Wider tracks." }) },
     releaseRevision: { permission: "board.edit", input: ({ board }) => ({ revisionId: board.revisionId }) },
   },
@@ -105,14 +97,6 @@ export const boardRows: Record<string, Rows> = {
         const unitId = await makeBareUnit(machine, "TIM-03");
         await must(archiveUnit(scope, { ...write, unitId }));
         return { unitId };
-      },
-    },
-    purgeUnit: {
-      permission: "board.purge",
-      input: async (machine) => {
-        const { scope, write } = asMaintainer(machine);
-        await must(archiveUnit(scope, { ...write, unitId: machine.unit.id }));
-        return { unitId: machine.unit.id, confirmation: "TIM-01" };
       },
     },
     purgeUnit: {

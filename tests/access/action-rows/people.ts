@@ -22,9 +22,6 @@ export const peopleRows: Record<string, Rows> = {
   "app/(workshop)/projects/[project]/digest/actions.ts": {
     sendToMe: { permission: "digest.preview", input: () => ({}) },
   },
-  "app/(workshop)/projects/[project]/digest/actions.ts": {
-    sendToMe: { permission: "digest.preview", input: () => ({}) },
-  },
   "app/(workshop)/projects/[project]/people/actions.ts": {
     invite: { permission: "member.manage", input: () => ({ email: `${randomUUID()}@example.org`, role: "builder" }) },
     resendInvitation: { permission: "member.manage", input: invited },
