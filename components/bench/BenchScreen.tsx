@@ -5,12 +5,10 @@ import type { BenchProps } from "./bench-props";
 import { BenchSheets, type OpenSheet } from "./BenchSheets";
 import { BenchTop } from "./BenchTop";
 import { CheckColumn } from "./CheckColumn";
-import { EntryPanel } from "./EntryPanel";
-import { EvidenceStrip } from "./EvidenceStrip";
 import { FileInputs } from "./FileInputs";
 import { keepOffline } from "./keep-offline";
-import { Pad } from "./PadSlot";
-import { clearFiles } from "./queue/file-shelf";
+import { NothingHere } from "./NothingHere";
+import { RecordSection } from "./RecordSection";
 import { acceptFor, kindsWanted, takeFiles } from "./take-files";
 import { UndoBar } from "./UndoBar";
 import { useBench } from "./use-bench";
@@ -99,33 +97,14 @@ export function BenchScreen(props: BenchProps) {
             onSheet={setSheet}
             onFile={may.attach ? () => chooser.current?.click() : undefined}
           />
-          <section
-            aria-label="Record"
-            className="border-rule bg-sheet flex max-h-[calc(100dvh-6.5rem)] shrink-0 flex-col gap-2 border-t px-4 pt-3 pb-[max(0.75rem,env(safe-area-inset-bottom))] lg:self-start lg:border-t-0 lg:pt-6"
-          >
-            <EvidenceStrip
-              files={recording.files}
-              smallHref={(id) => `/api/projects/${project.slug}/files/${id}?size=small`}
-              onRemove={(file) => void clearFiles(file.checkId, [file.uploadId])}
-            />
-            <Pad value={pad}>
-              <EntryPanel
-                kind={kind}
-                spec={current.spec}
-                checkId={current.id}
-                recording={recording}
-                rule={project.rule}
-                blocked={current.blockers.length > 0}
-                may={may}
-                padShown={pad.isOpen}
-                onPad={() => (pad.isOpen ? setPadFor(undefined) : pad.open())}
-                onRecord={(entry) => void record(entry)}
-                onPhoto={() => camera.current?.click()}
-                onFile={() => chooser.current?.click()}
-                onNote={() => setSheet("note")}
-              />
-            </Pad>
-          </section>
+          <RecordSection
+            {...{ props, recording, current, kind, pad }}
+            onPad={() => (pad.isOpen ? setPadFor(undefined) : pad.open())}
+            onRecord={(entry) => void record(entry)}
+            onPhoto={() => camera.current?.click()}
+            onFile={() => chooser.current?.click()}
+            onNote={() => setSheet("note")}
+          />
         </div>
       )}
       {recording.slip.slip && (
@@ -144,20 +123,5 @@ export function BenchScreen(props: BenchProps) {
         onRecord={(entry) => void record(entry)}
       />
     </div>
-  );
-}
-
-function NothingHere({ known, unitHref }: { known: boolean; unitHref: string }) {
-  return (
-    <main className="mx-auto grid max-w-prose gap-3 p-6 text-lg">
-      <p>
-        {known
-          ? "This page is older than the check: it does not know this kind. Reload it when there is a network."
-          : "This unit has no traveler yet. A maintainer issues a procedure for its board, and its checks appear here."}
-      </p>
-      <a className="link" href={unitHref}>
-        To the unit
-      </a>
-    </main>
   );
 }

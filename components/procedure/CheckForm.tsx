@@ -5,18 +5,17 @@ import { Button } from "@/components/ui/Button";
 import { Checkbox } from "@/components/ui/Checkbox";
 import { DialogActions } from "@/components/ui/DialogActions";
 import { Notice } from "@/components/ui/Notice";
-import { RadioGroup } from "@/components/ui/RadioGroup";
 import { Select } from "@/components/ui/Select";
 import { TextArea } from "@/components/ui/TextArea";
 import { TextField } from "@/components/ui/TextField";
 import type { Reply } from "@/components/ui/form/reply";
-import { CHECK_KINDS } from "@/lib/check-kinds/list";
-import { SpecForm } from "@/lib/check-kinds/spec-forms";
 import type { CheckRow } from "@/lib/procedure/check-row";
 import type { CheckFields } from "@/lib/procedure/schema";
 import { STAGES } from "@/lib/procedure/stages";
 import { CheckPreview } from "./CheckPreview";
 import { fieldsOf, problemsOf, type CheckDraft } from "./check-draft";
+import { CoversFields } from "./CoversFields";
+import { KindFields } from "./KindFields";
 import { NeedsField } from "./NeedsField";
 import { TheirCheck } from "./TheirCheck";
 
@@ -42,11 +41,6 @@ export function CheckForm({ initial, own, checks, save, onDone, onCancel }: Prop
     value: draft[name],
     onChange: (value: string) => set({ [name]: value }),
     error: problem(name),
-  });
-  const covered = (name: "signals" | "pins" | "rails" | "blocks") => ({
-    value: draft[name],
-    onChange: (value: string) => set({ [name]: value }),
-    error: problem(`covers.${name}`) ?? firstUnder(problems, `check.covers.${name}.`),
   });
 
   async function submit(event: FormEvent<HTMLFormElement>) {
@@ -94,41 +88,14 @@ export function CheckForm({ initial, own, checks, save, onDone, onCancel }: Prop
           description="What can hurt people or parts in this step. Stands beside it on the bench."
           {...text("caution")}
         />
-        <RadioGroup
-          label="Kind of check"
-          value={draft.kind}
-          onChange={(id) => {
-            const next = CHECK_KINDS.find((one) => one.name === id);
-            if (next && next.name !== draft.kind) set({ kind: next.name, typed: next.emptyTyped });
-          }}
-          options={CHECK_KINDS.map(({ name, label, description }) => ({ id: name, label, description }))}
-        />
-        <div className="rounded-md border border-rule bg-raised/60 p-4">
-          <SpecForm
-            kind={draft.kind}
-            value={draft.typed}
-            onChange={(typed) => set({ typed })}
-            errors={under(problems, "check.typed.")}
-          />
-        </div>
+        <KindFields draft={draft} problems={problems} onChange={set} />
         <Checkbox
           label="Hold point"
           description="Nothing after it can be recorded until it holds, or a maintainer lifts it for one unit."
           value={draft.holdPoint}
           onChange={(holdPoint) => set({ holdPoint })}
         />
-        <fieldset className="flex flex-col gap-3">
-          <legend className="mb-1 text-sm font-semibold">What it proves</legend>
-          <p className="text-sm text-ink-soft">
-            Separated by commas. A rework that touches one of these puts the check in doubt; pins light up on the bench.
-          </p>
-          <div className="grid gap-3 sm:grid-cols-2">
-            <TextField label="Signals" mono placeholder="CLK, PH7" {...covered("signals")} />
-            <TextField label="Pins" mono placeholder="J1 a4, J1 c4" {...covered("pins")} />
-            <TextField label="Rails" mono placeholder="+5 V, GND" {...covered("rails")} />
-            <TextField label="Blocks" mono placeholder="divider" {...covered("blocks")} />
-          </div>
-        </fieldset>
+        <CoversFields draft={draft} problems={problems} onChange={set} />
         <NeedsField
           value={draft.needs}
           onChange={(needs) => set({ needs })}
@@ -158,14 +125,3 @@ export function CheckForm({ initial, own, checks, save, onDone, onCancel }: Prop
 
 /** Of one identity, so that it scrolls when the sentence appears and not at every key press after. */
 const intoView = (node: HTMLElement | null) => node?.scrollIntoView({ block: "center" });
-
-/** Problems under a path, with the path cut off: what the kind's own form expects. */
-function under(problems: Record<string, string>, path: string): Record<string, string> {
-  return Object.fromEntries(
-    Object.entries(problems)
-      .filter(([name]) => name.startsWith(path))
-      .map(([name, sentence]) => [name.slice(path.length), sentence]),
-  );
-}
-
-const firstUnder = (problems: Record<string, string>, path: string) => Object.values(under(problems, path))[0];
