@@ -11,6 +11,7 @@ import { vitestStage } from "./test/vitest-stage";
  * npm test                          everything
  * npm test -- unit integration      only these stages
  * npm test -- integration fakes     a stage, and of it only files whose path contains the word
+ * npm test -- access                the permission table, in the two stages that hold the program to it
  */
 const alone = [lint, types, vitestStage("unit"), vitestStage("standards"), format, unused];
 const withServices = ["integration", "build", "browser"];
@@ -19,6 +20,7 @@ const known = [...alone.map(({ name }) => name), ...withServices];
 const words = process.argv.slice(2);
 const chosen = words.filter((word) => known.includes(word));
 const filters = words.filter((word) => !known.includes(word));
+if (chosen.length === 0 && filters.includes("access")) chosen.push("integration", "browser");
 const isWanted = (name: string) => chosen.length === 0 || chosen.includes(name);
 
 async function runWithServices(): Promise<Finished[]> {
