@@ -77,7 +77,7 @@ function Expectation({
   return (
     <dl className="border-rule bg-raised divide-rule flex flex-wrap divide-x rounded-md border">
       {shown.map(({ name, value }) => (
-        <div key={name} className="min-w-32 flex-1 px-4 py-2.5">
+        <div key={name} className="min-w-24 flex-auto px-4 py-2.5">
           <dt className="text-ink-soft text-sm">{name}</dt>
           <dd className={measured ? "mono text-xl font-semibold" : "text-lg"}>{value}</dd>
         </div>

@@ -1,5 +1,16 @@
 import { sql } from "drizzle-orm";
-import { boolean, index, integer, pgTable, primaryKey, smallint, text, unique, uniqueIndex, uuid } from "drizzle-orm/pg-core";
+import {
+  boolean,
+  index,
+  integer,
+  pgTable,
+  primaryKey,
+  smallint,
+  text,
+  unique,
+  uniqueIndex,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { archivedAt, createdAt, id, instant } from "./columns";
 import { users } from "./people";
 

@@ -8,6 +8,7 @@ import type { z } from "zod";
 import { Button } from "../Button";
 import type { ButtonKind } from "../button-style";
 import { Notice } from "../Notice";
+import { useIsReady } from "../use-is-ready";
 import type { Reply } from "./reply";
 import { useFormSubmit } from "./useFormSubmit";
 
@@ -43,12 +44,14 @@ export function Form<Values extends FieldValues, Value>(props: FormProps<Values,
     shouldFocusError: true,
   });
   const { submit, isPending } = useFormSubmit(form, props);
+  const isReady = useIsReady();
   const failure = form.formState.errors.root?.message;
   const { children } = props;
   return (
     <FormProvider {...form}>
       <form
         noValidate
+        method="post"
         aria-label={props.label}
         onSubmit={(event) => void submit(event)}
         className={clsx("flex flex-col gap-4.5", props.className)}
@@ -57,7 +60,7 @@ export function Form<Values extends FieldValues, Value>(props: FormProps<Values,
         {failure && <Notice kind="error">{failure}</Notice>}
         <div className="flex flex-col-reverse gap-2 *:w-full sm:flex-row sm:justify-end sm:*:w-auto">
           {props.actions}
-          <Button type="submit" kind={props.submitKind ?? "primary"} isPending={isPending}>
+          <Button type="submit" kind={props.submitKind ?? "primary"} isPending={isPending} isDisabled={!isReady}>
             {props.submitLabel}
           </Button>
         </div>
