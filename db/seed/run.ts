@@ -80,9 +80,14 @@ async function join(db: Database, viewer: Viewer, role: "builder" | "collaborato
 async function subscribe(db: Database, viewers: Viewer[], now: Date): Promise<void> {
   const due = { weekday: 7, hour: 18, zone: PROJECT.timeZone };
   const id = await projectId(db);
-  await db
-    .insert(digestSubscriptions)
-    .values(viewers.map(({ userId }) => ({ projectId: id, userId, ...due, nextDueAt: nextDue(due, now) })));
+  const chosen = { ...due, enabled: true, nextDueAt: nextDue(due, now) };
+  for (const { userId } of viewers) {
+    // Whoever set up the project has one already, switched off.
+    await db
+      .insert(digestSubscriptions)
+      .values({ projectId: id, userId, ...chosen })
+      .onConflictDoUpdate({ target: [digestSubscriptions.projectId, digestSubscriptions.userId], set: chosen });
+  }
 }
 
 async function castFor(db: Database, people: { maud: Viewer; bram: Viewer }): Promise<Cast> {
