@@ -65,7 +65,7 @@ export function CheckDetail({ check, board, isRetired, frame }: Props) {
         <span className="mono font-semibold">{check.expectation}</span>
       </p>
       <PinDrawing pins={check.covers.pins} board={board} />
-      <CheckHistory check={check} frame={frame} />
+      <CheckHistory check={check} isRetired={isRetired} frame={frame} />
       {check.evidence.length > 0 && (
         <section>
           <h3 className="mb-2 text-base">Evidence without an attempt</h3>

@@ -5,16 +5,18 @@ import { AttemptEntry } from "./AttemptEntry";
 import { historyOf, type HistoryEntry } from "./history-of";
 import type { TravelerFrame } from "./traveler-acts";
 
-type Props = { check: CheckView; frame: TravelerFrame };
+type Props = { check: CheckView; isRetired: boolean; frame: TravelerFrame };
 
-export function CheckHistory({ check, frame }: Props) {
+export function CheckHistory({ check, isRetired, frame }: Props) {
   const entries = historyOf(check);
   return (
     <section aria-label="History">
       <h3 className="text-base">History</h3>
       {entries.length === 0 && (
         <p className="text-ink-soft mt-1 text-sm">
-          Nobody has carried it out yet. What is recorded at the bench stands here for good.
+          {isRetired
+            ? "Nobody carried it out."
+            : "Nobody has carried it out yet. What is recorded at the bench stands here for good."}
         </p>
       )}
       <ol className="mt-2 grid gap-3">
@@ -43,7 +45,7 @@ function keyOf(entry: HistoryEntry): string {
   }
 }
 
-function Entry({ entry, check, frame }: Props & { entry: HistoryEntry }) {
+function Entry({ entry, check, frame }: Omit<Props, "isRetired"> & { entry: HistoryEntry }) {
   switch (entry.kind) {
     case "attempt":
       return <AttemptEntry attempt={entry.attempt} check={check} frame={frame} />;

@@ -9,6 +9,7 @@ import { DialogActions } from "@/components/ui/DialogActions";
 import { reach } from "@/components/ui/form/reply";
 import { Notice } from "@/components/ui/Notice";
 import { toast } from "@/components/ui/toast-store";
+import { counted } from "@/components/workshop/counted";
 import type { MoveView } from "@/lib/traveler/load-move";
 import type { Difference } from "@/lib/traveler/compare-versions";
 import type { TravelerActs } from "./traveler-acts";
@@ -49,10 +50,7 @@ function MoveForm({ project, move, act, onDone }: Props & { onDone: () => void }
 
   return (
     <div className="grid gap-4">
-      <p className="text-ink-soft">
-        {difference.kept.length} keep their attempts. {difference.changed.length} ask for something else now and start
-        afresh; {difference.dropped.length} are no longer asked for. What was recorded for those stays as history.
-      </p>
+      <p className="text-ink-soft">{whatFollows(difference)}</p>
       <Group title="Start afresh" checks={difference.changed} />
       <Group title="New" checks={difference.added} />
       <Group title="No longer asked for" checks={difference.dropped} />
@@ -66,6 +64,20 @@ function MoveForm({ project, move, act, onDone }: Props & { onDone: () => void }
       </DialogActions>
     </div>
   );
+}
+
+/** One sentence for each thing that happens, and none for what does not. */
+function whatFollows({ kept, changed, dropped }: MoveView["difference"]): string {
+  const leaves = changed.length + dropped.length > 0;
+  return [
+    kept.length > 0 && `${counted(kept.length, "check keeps its attempts", "checks keep their attempts")}.`,
+    changed.length > 0 &&
+      `${counted(changed.length, "asks for something else now and starts afresh", "ask for something else now and start afresh")}.`,
+    dropped.length > 0 && `${counted(dropped.length, "is no longer asked for", "are no longer asked for")}.`,
+    leaves && "What was recorded for those stays as history.",
+  ]
+    .filter(Boolean)
+    .join(" ");
 }
 
 type Line = Difference["added"][number] & Partial<Pick<Difference["changed"][number], "edits">>;

@@ -1,3 +1,5 @@
+import { counted } from "@/components/workshop/counted";
+import { Disclosure } from "@/components/workshop/Disclosure";
 import type { CheckView } from "@/lib/traveler/traveler-view";
 import { CheckRow } from "./CheckRow";
 import type { TravelerFrame } from "./traveler-acts";
@@ -13,22 +15,24 @@ type Props = {
 export function RetiredChecks({ checks, openId, onOpen, frame }: Props) {
   if (checks.length === 0) return null;
   return (
-    <details className="mt-5" open={checks.some((check) => check.id === openId)}>
-      <summary className="text-ink-soft min-h-10 py-2 font-semibold">
-        {checks.length === 1 ? "One check" : `${checks.length} checks`} of earlier procedure versions
-      </summary>
-      <ul className="border-rule bg-sheet mt-1 rounded-lg border">
-        {checks.map((check) => (
-          <CheckRow
-            key={check.id}
-            check={check}
-            isOpen={check.id === openId}
-            onOpen={onOpen}
-            zone={frame.zone}
-            rule={frame.rule}
-          />
-        ))}
-      </ul>
-    </details>
+    <div className="mt-4">
+      <Disclosure
+        summary={`${counted(checks.length, "check")} of earlier procedure versions`}
+        isOpen={checks.some((check) => check.id === openId)}
+      >
+        <ul className="border-rule bg-sheet rounded-lg border">
+          {checks.map((check) => (
+            <CheckRow
+              key={check.id}
+              check={check}
+              isOpen={check.id === openId}
+              onOpen={onOpen}
+              zone={frame.zone}
+              rule={frame.rule}
+            />
+          ))}
+        </ul>
+      </Disclosure>
+    </div>
   );
 }
