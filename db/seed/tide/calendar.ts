@@ -26,6 +26,8 @@ const DATED = [
   ["boards", "created_at"],
   ["revisions", "created_at"],
   ["memberships", "created_at"],
+  ["procedures", "issued_at"],
+  ["slot_occupancies", "placed_at"],
 ] as const;
 
 /** One thing that happens in the story, and when. */
