@@ -6,12 +6,14 @@ import { StateGlyph } from "@/components/ui/glyphs/StateGlyph";
 import { Panel } from "@/components/ui/Panel";
 import type { NextCheck } from "@/lib/check/next-checks";
 import type { BenchUnit, BenchView } from "@/lib/traveler/load-bench";
+import type { Stage } from "@/db/schema/procedures";
 import { STAGES, stageName } from "@/lib/procedure/stages";
 
 type Props = { project: string; bench: BenchView };
 
 /** Which unit to lay on the bench: what is next over the whole machine first, then every unit with what waits on it. */
 export function BenchPicker({ project, bench }: Props) {
+  const room = STAGES.map(({ id }) => Math.max(0, ...bench.units.map((unit) => statesOf(unit, id).length)));
   const free = bench.units.filter((unit) => unit.next).length;
   return (
     <Page title="Bench" lede={ledeOf(bench, free)}>
@@ -40,7 +42,7 @@ export function BenchPicker({ project, bench }: Props) {
           <Panel title="Units" note={`${bench.units.length}`} padding="none">
             <ul>
               {bench.units.map((unit) => (
-                <UnitLine key={unit.serial} project={project} unit={unit} />
+                <UnitLine key={unit.serial} project={project} unit={unit} room={room} />
               ))}
             </ul>
           </Panel>
@@ -84,36 +86,45 @@ function NextLine({ project, check, isFirst }: { project: string; check: NextChe
   );
 }
 
-function UnitLine({ project, unit }: { project: string; unit: BenchUnit }) {
-  const groups = STAGES.flatMap(({ id: stage, short }) => {
-    const states = unit.checks.filter((check) => check.stage === stage).map((check) => check.state);
-    return states.length > 0 ? [{ name: short, states }] : [];
-  });
+const statesOf = (unit: BenchUnit, stage: Stage) =>
+  unit.checks.filter((check) => check.stage === stage).map((check) => check.state);
+
+function UnitLine({ project, unit, room }: { project: string; unit: BenchUnit; room: readonly number[] }) {
+  const groups = STAGES.map(({ id, short }) => ({ name: short, states: statesOf(unit, id) }));
+  const hasChecks = unit.checks.length > 0;
   return (
     <li className="border-rule border-t">
       <Link
         href={benchHref(project, unit.serial)}
         prefetch={false}
-        className="hover:bg-copper-ground block px-4 py-3 sm:px-5"
+        className="hover:bg-copper-ground grid items-center gap-x-6 gap-y-2 px-4 py-3 sm:px-5 lg:grid-cols-[24rem_minmax(0,1fr)]"
       >
-        <span className="flex flex-wrap items-baseline gap-x-3">
-          <span className="mono text-lg font-semibold">{unit.serial}</span>
-          <span>
-            {unit.board}, rev {unit.letter}
-            {unit.slot !== null && `, slot ${unit.slot}`}
+        <span className="min-w-0">
+          <span className="flex flex-wrap items-baseline gap-x-3">
+            <span className="mono text-lg font-semibold">{unit.serial}</span>
+            <span>
+              {unit.board}, rev {unit.letter}
+              {unit.slot !== null && `, slot ${unit.slot}`}
+            </span>
+          </span>
+          <span className="text-ink-soft block text-sm">
+            {unit.next
+              ? `Next: ${unit.next.title}`
+              : hasChecks
+                ? "Nothing to do now: everything holds or waits."
+                : "No traveler yet: its board has no issued procedure."}
           </span>
         </span>
-        <span className="text-ink-soft block text-sm">
-          {unit.next
-            ? `Next: ${unit.next.title}`
-            : groups.length === 0
-              ? "No traveler yet: its board has no issued procedure."
-              : "Nothing to do now: everything holds or waits."}
-        </span>
-        {groups.length > 0 && (
-          <div className="mt-2">
-            <StageStrip groups={groups} layout="flow" />
-          </div>
+        {hasChecks && (
+          <>
+            {/* Side by side the strips of all units stand in columns; below one another each takes the room it needs. */}
+            <div className="hidden lg:block">
+              <StageStrip groups={groups} room={room} />
+            </div>
+            <div className="lg:hidden">
+              <StageStrip groups={groups.filter((group) => group.states.length > 0)} layout="flow" />
+            </div>
+          </>
         )}
       </Link>
     </li>

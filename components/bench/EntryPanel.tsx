@@ -11,7 +11,7 @@ type Props = {
   recording: Recording;
   rule: "simple" | "guarded";
   blocked: boolean;
-  may: { record: boolean; attach: boolean };
+  may: { attach: boolean };
   padShown: boolean;
   onPad: () => void;
   onRecord: (entry?: unknown) => void;
@@ -37,7 +37,6 @@ export function EntryPanel({
   onNote,
 }: Props) {
   const { BenchForm, stated } = kind;
-  const disabled = blocked || !may.record;
   const required = kind.requires(spec);
   const there = required
     ? recording.files.filter((file) => file.refusal === "" && required.kinds.includes(file.kind)).length
@@ -45,9 +44,6 @@ export function EntryPanel({
   return (
     <div className="flex min-h-0 flex-col gap-2.5">
       <div className="grid min-h-0 gap-2.5 overflow-y-auto p-0.5 -m-0.5">
-        {!may.record && (
-          <p className="text-ink-soft text-sm">You can look at this traveler. Builders and maintainers record.</p>
-        )}
         {!blocked && (
           <BenchForm
             key={checkId}
@@ -56,7 +52,7 @@ export function EntryPanel({
             onDraft={recording.setEntry}
             judged={recording.judged}
             onSubmit={(entry) => onRecord(entry)}
-            busy={disabled}
+            busy={blocked}
             rule={rule}
           />
         )}
@@ -88,7 +84,7 @@ export function EntryPanel({
           <>
             <BenchButton
               kind="passed"
-              disabled={disabled}
+              disabled={blocked}
               onClick={() => onRecord(stated(true))}
               aria-keyshortcuts="Space"
             >
@@ -96,7 +92,7 @@ export function EntryPanel({
             </BenchButton>
             <BenchButton
               kind="failed"
-              disabled={disabled}
+              disabled={blocked}
               onClick={() => onRecord(stated(false))}
               aria-keyshortcuts="x"
               className="text-base sm:text-lg"
@@ -108,7 +104,7 @@ export function EntryPanel({
           <>
             <BenchButton
               kind="primary"
-              disabled={disabled || !recording.judged?.ok}
+              disabled={blocked || !recording.judged?.ok}
               onClick={() => onRecord()}
               aria-keyshortcuts="Enter"
               className="lg:col-span-2"

@@ -20,22 +20,27 @@ export function RecordSection({ props: { project, may }, current, pad, ...entry 
       aria-label="Record"
       className="border-rule bg-sheet flex max-h-[calc(100dvh-6.5rem)] shrink-0 flex-col gap-2 border-t px-4 pt-3 pb-[max(0.75rem,env(safe-area-inset-bottom))] lg:self-start lg:border-t-0 lg:pt-6"
     >
+      {!may.record && (
+        <p className="text-ink-soft text-sm">You can look at this traveler. Builders and maintainers record.</p>
+      )}
       <EvidenceStrip
         files={entry.recording.files}
         smallHref={(id) => `/api/projects/${project.slug}/files/${id}?size=small`}
         onRemove={(file) => void clearFiles(file.checkId, [file.uploadId])}
       />
-      <Pad value={pad}>
-        <EntryPanel
-          {...entry}
-          spec={current.spec}
-          checkId={current.id}
-          rule={project.rule}
-          blocked={current.blockers.length > 0}
-          may={may}
-          padShown={pad.isOpen}
-        />
-      </Pad>
+      {may.record && (
+        <Pad value={pad}>
+          <EntryPanel
+            {...entry}
+            spec={current.spec}
+            checkId={current.id}
+            rule={project.rule}
+            blocked={current.blockers.length > 0}
+            may={may}
+            padShown={pad.isOpen}
+          />
+        </Pad>
+      )}
     </section>
   );
 }

@@ -44,7 +44,11 @@ export function stripWords(group: StripGroup): string {
 export function StageStrip({ groups, room, marked, layout = "fill", className }: StageStripProps) {
   return (
     <ul
-      className={clsx(layout === "fill" ? "flex flex-wrap sm:grid" : "flex flex-wrap", "gap-x-3 gap-y-2.5", className)}
+      className={clsx(
+        "flex flex-wrap gap-y-2.5",
+        layout === "fill" ? "gap-x-3 sm:grid" : "gap-x-2 sm:gap-x-3",
+        className,
+      )}
       style={
         layout === "fill"
           ? {
@@ -71,7 +75,7 @@ function StripColumn({ group, marked }: { group: StripGroup; marked: number | un
   const mood = trouble ?? (held === group.states.length && held > 0 ? "passed" : "untested");
   const emphasis = trouble ? clsx(STATE_TEXT[trouble], "font-semibold") : "text-ink-soft";
   return (
-    <li className={clsx("flex min-w-0 flex-col gap-1.5 border-l-2 pl-2 leading-none", RULES[mood])}>
+    <li className={clsx("flex min-w-0 flex-col gap-1.5 border-l-2 pl-1.5 leading-none sm:pl-2", RULES[mood])}>
       <span className="sr-only">{stripWords(group)}</span>
       <span aria-hidden="true" className={clsx("text-2xs leading-none", emphasis)}>
         {group.name}
