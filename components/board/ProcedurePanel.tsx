@@ -32,7 +32,11 @@ export function ProcedurePanel({ project, zone, board, canEdit }: Props) {
       <div className="mt-3 flex flex-wrap gap-2">
         {(board.issued || board.hasDraft || canEdit) && (
           <ButtonLink href={href} kind={board.issued ? "plain" : "primary"}>
-            {board.hasDraft && canEdit ? "Go on with the draft" : board.issued ? "Look at it" : "Write the procedure"}
+            {board.hasDraft && canEdit
+              ? "Go on with the draft"
+              : board.issued
+                ? "Look at the procedure"
+                : "Write the procedure"}
           </ButtonLink>
         )}
       </div>

@@ -5,7 +5,7 @@ export function RangeTable({ name, ranges }: { name: string; ranges: readonly St
   return (
     // Scrolled by keys as well where the screen is narrow.
     <div className="overflow-x-auto" role="group" aria-label={`Ranges of ${name}`} tabIndex={0}>
-      <table aria-label={`Ranges of ${name}`} className="w-full max-w-2xl border-collapse text-left text-[0.9375rem]">
+      <table aria-label={`Ranges of ${name}`} className="w-full border-collapse text-left text-[0.9375rem]">
         <thead>
           <tr className="text-sm text-ink-soft">
             <th className="py-1.5 pr-4 font-semibold">Up to</th>

@@ -11,7 +11,7 @@ export function WhatItMeans({ ranges }: { ranges: readonly StatedRange[] }) {
       <p className="mt-1">
         It shows <Figure>{example.reading}</Figure>. By its maker it may be out by{" "}
         <Figure>{example.limitOfError}</Figure>, which is an expanded uncertainty of{" "}
-        <Figure>{example.uncertainty}</Figure> (k = 2).
+        <Figure>{example.uncertainty}</Figure> <span className="whitespace-nowrap">(k = 2)</span>.
       </p>
       <p className="mt-1">
         Limits of ± 5 % are <Figure>{example.limits}</Figure>.{" "}

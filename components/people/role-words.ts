@@ -12,7 +12,7 @@ export const ROLE_WORDS: Record<RoleName, { name: string; may: string }> = {
   },
   collaborator: {
     name: "Collaborator",
-    may: "Sees everything, comments, and gets the weekly e-mail. Changes nothing.",
+    may: "Sees everything and gets the weekly e-mail. Changes nothing.",
   },
 };
 
