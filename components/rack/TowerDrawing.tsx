@@ -107,12 +107,7 @@ function SlotRow({ slot, project, isNext, canPlace, height, room, stop }: RowPro
                 <span className="font-semibold">{unit.serial}</span>
                 <span className="text-xs text-ink-soft">rev {unit.revision}</span>
               </span>
-              <span className="hidden @3xl:block">
-                <CardStages unit={unit} room={room} />
-              </span>
-              <span className="@3xl:hidden">
-                <CardStages unit={unit} layout="flow" />
-              </span>
+              <CardStages unit={unit} room={room} />
             </span>
           </CardLink>
         ) : (

@@ -18,7 +18,7 @@ export async function benchDigests(env: Record<string, string>, sql: postgres.Sq
   const growth = many.statements / few.statements;
   return [
     {
-      work: `weekly digests, ${PROJECTS} projects, 10 × the subscribers: statements`,
+      work: `weekly digests, ${PROJECTS} projects, 10 × the subscribers: transactions`,
       ours: String(many.statements),
       floor: String(few.statements),
       ratio: times(growth),
