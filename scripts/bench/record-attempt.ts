@@ -4,7 +4,7 @@ import { fetchOk, timeConcurrently } from "./measure";
 import { milliseconds, times, type Row } from "./row";
 
 const CLIENTS = 50;
-const EACH = 12;
+const EACH = 30;
 
 /** Recording over HTTP, signed in, against the same server's empty route plus the same rows in plain SQL. */
 export async function benchRecordAttempt(app: string, cookieName: string, sql: postgres.Sql): Promise<Row[]> {
