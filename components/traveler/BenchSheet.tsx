@@ -30,13 +30,13 @@ export function BenchSheet({ project, traveler, zone, rule, back, codes, printed
       </div>
       {/* Paper is white and ink is black, whatever the theme of the screen. */}
       <div
-        className="overflow-x-auto border border-[#bbb] bg-[#fff] p-4 sm:p-[12mm] print:overflow-visible text-[#000] [--copper:#000] [--edge:#444] [--failed:#000] [--ink-faint:#333] [--ink-soft:#333] [--ink:#000] [--passed:#000] [--raised:#fff] [--rule-strong:#777] [--rule:#bbb] [--sheet:#fff] print:border-0 print:p-0"
+        className="relative overflow-x-auto border border-[#bbb] bg-[#fff] p-4 sm:p-[12mm] print:overflow-visible text-[#000] [--copper:#000] [--edge:#444] [--failed:#000] [--ink-faint:#333] [--ink-soft:#333] [--ink:#000] [--passed:#000] [--raised:#fff] [--rule-strong:#777] [--rule:#bbb] [--sheet:#fff] print:border-0 print:p-0"
         data-bench-sheet
         role="region"
         aria-label="The sheet"
         tabIndex={0}
       >
-        <table className="w-full border-collapse">
+        <table className="w-full min-w-[42rem] border-collapse print:min-w-0">
           <thead>
             <tr>
               <td colSpan={5} className="border-b-2 border-[#000] pb-2">
