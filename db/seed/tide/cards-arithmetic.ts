@@ -1,5 +1,5 @@
 import type { CheckLine } from "./check-line";
-import { firstPower, inspection, unpowered } from "./every-card";
+import { firstPower, inspection, railAt, unpowered, WARM_AND_QUIET } from "./every-card";
 
 export const CONSTITUENT: CheckLine[] = [
   ...inspection("U1 to U9", "U1 to U9 and C1 to C9"),
@@ -32,35 +32,8 @@ export const CONSTITUENT: CheckLine[] = [
     expect: { kind: "reading", quantity: "Resistance", limits: "< 2 Ω", expected: "0.3 Ω" },
   },
   firstPower("0.25 A", "60 mA … 190 mA", "120 mA"),
-  {
-    id: "rail",
-    stage: "power-on",
-    title: "+5 V at U1, U6 and U9, loaded",
-    instruction: "Phase clock running. Black probe on TP1, red probe on the supply pin of each package.",
-    rails: ["+5 V"],
-    needs: ["first-power"],
-    expect: {
-      kind: "table",
-      rows: [{ label: "+5 V", limits: "4.75 … 5.25 V", expected: "4.95 V" }],
-      columns: ["U1", "U6", "U9"],
-    },
-  },
-  {
-    id: "warm",
-    stage: "power-on",
-    title: "No part warmer than the hand bears after ten minutes",
-    instruction: "Back of a finger on every package in turn.",
-    caution: "A shorted part burns skin. Come near slowly and switch off if you feel heat before you touch.",
-    expect: { kind: "statement" },
-  },
-  {
-    id: "noise",
-    stage: "power-on",
-    title: "Noise on +5 V at U6",
-    instruction: "Scope with the ground spring at C6, full bandwidth, peak to peak.",
-    rails: ["+5 V"],
-    expect: { kind: "reading", quantity: "Noise", limits: "< 120 mV", expected: "60 mV" },
-  },
+  railAt(["U1", "U6", "U9"], "4.95 V", "Phase clock running. "),
+  ...WARM_AND_QUIET,
   {
     id: "reset",
     stage: "function",
@@ -290,34 +263,8 @@ export const SUMMING: CheckLine[] = [
     expect: { kind: "reading", quantity: "Resistance", limits: "< 2 Ω", expected: "0.3 Ω" },
   },
   firstPower("0.30 A", "80 mA … 240 mA", "150 mA"),
-  {
-    id: "rail",
-    stage: "power-on",
-    title: "+5 V at U1, U6 and U12",
-    instruction: "Black probe on TP1. Red probe on the supply pin of each package.",
-    rails: ["+5 V"],
-    expect: {
-      kind: "table",
-      rows: [{ label: "+5 V", limits: "4.75 … 5.25 V", expected: "5.00 V" }],
-      columns: ["U1", "U6", "U12"],
-    },
-  },
-  {
-    id: "warm",
-    stage: "power-on",
-    title: "No part warmer than the hand bears after ten minutes",
-    instruction: "Back of a finger on every package in turn.",
-    caution: "A shorted part burns skin. Come near slowly and switch off if you feel heat before you touch.",
-    expect: { kind: "statement" },
-  },
-  {
-    id: "noise",
-    stage: "power-on",
-    title: "Noise on +5 V at U6",
-    instruction: "Scope with the ground spring at C6, full bandwidth, peak to peak.",
-    rails: ["+5 V"],
-    expect: { kind: "reading", quantity: "Noise", limits: "< 120 mV" },
-  },
+  railAt(["U1", "U6", "U12"], "5.00 V", ""),
+  ...WARM_AND_QUIET,
   {
     id: "zero",
     stage: "function",

@@ -1,5 +1,5 @@
 import type { CheckLine } from "./check-line";
-import { firstPower, inspection, unpowered } from "./every-card";
+import { firstPower, inspection, railAt, unpowered } from "./every-card";
 
 export const SUPPLY: CheckLine[] = [
   ...inspection("the regulators and J1 to J3", "the bridge, C1 to C6 and D1 to D4"),
@@ -111,18 +111,7 @@ export const TIMEBASE: CheckLine[] = [
     expect: { kind: "reading", quantity: "Resistance", limits: "> 1 MΩ" },
   },
   firstPower("0.12 A", "15 mA … 70 mA", "38 mA"),
-  {
-    id: "rail",
-    stage: "power-on",
-    title: "+5 V at U1, U4 and U7",
-    instruction: "Black probe on TP1. Red probe on the supply pin of each package.",
-    rails: ["+5 V"],
-    expect: {
-      kind: "table",
-      rows: [{ label: "+5 V", limits: "4.75 … 5.25 V", expected: "5.00 V" }],
-      columns: ["U1", "U4", "U7"],
-    },
-  },
+  railAt(["U1", "U4", "U7"], "5.00 V", ""),
   {
     id: "duty",
     stage: "function",

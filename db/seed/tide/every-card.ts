@@ -93,3 +93,35 @@ export function firstPower(limitText: string, window: string, expected: string):
     expect: { kind: "reading", quantity: "Current", limits: window, expected },
   };
 }
+
+/** The rail at the packages furthest from each other. */
+export function railAt(packages: string[], expected: string, how: string): CheckLine {
+  return {
+    id: "rail",
+    stage: "power-on",
+    title: `+5 V at ${packages.slice(0, -1).join(", ")} and ${packages.at(-1)}`,
+    instruction: `${how}Black probe on TP1, red probe on the supply pin of each package.`,
+    rails: ["+5 V"],
+    expect: { kind: "table", rows: [{ label: "+5 V", limits: "4.75 … 5.25 V", expected }], columns: packages },
+  };
+}
+
+/** Two looks at a card under power that go together: is a part hot, is the rail quiet. */
+export const WARM_AND_QUIET: CheckLine[] = [
+  {
+    id: "warm",
+    stage: "power-on",
+    title: "No part warmer than the hand bears after ten minutes",
+    instruction: "Back of a finger on every package in turn.",
+    caution: "A shorted part burns skin. Come near slowly and switch off if you feel heat before you touch.",
+    expect: { kind: "statement" },
+  },
+  {
+    id: "noise",
+    stage: "power-on",
+    title: "Noise on +5 V at U6",
+    instruction: "Scope with the ground spring at C6, full bandwidth, peak to peak.",
+    rails: ["+5 V"],
+    expect: { kind: "reading", quantity: "Noise", limits: "< 120 mV", expected: "60 mV" },
+  },
+];
