@@ -1,5 +1,6 @@
 import { join } from "node:path";
 import { buildWhenChanged } from "./demo/build-when-changed";
+import { keepRunning } from "./demo/keep-running";
 import { printWelcome } from "./demo/print-welcome";
 import { prepareDatabase } from "./demo/seed-once";
 import { freePort } from "./processes/free-port";
@@ -26,10 +27,7 @@ try {
   startWorker({ supervisor, env });
   await startApp({ supervisor, env, port });
 
-  supervisor.onUnexpectedExit((child, reason) => {
-    console.error([`${reason}. Its last lines:`, ...child.lines.tail().slice(-20)].join("\n  "));
-    void supervisor.stopAll().then(() => process.exit(1));
-  });
+  keepRunning(supervisor);
   await printWelcome({ app: env.APP_URL, mail: urls.mailSink, logs: join(dataDir, "log") });
 } catch (error) {
   console.error(error instanceof Error ? error.message : error);

@@ -7,9 +7,11 @@ export type Supervisor = {
   start(options: ChildOptions): Child;
   /** Stops everything, newest first. Safe to call twice. */
   stopAll(): Promise<void>;
-  /** Called once when a child ends that nobody stopped. */
-  onUnexpectedExit(listener: (child: Child, reason: string) => void): void;
+  /** Called once when a child ends that nobody stopped. `again` starts the same once more, unless all is being stopped. */
+  onUnexpectedExit(listener: ExitListener): void;
 };
+
+type ExitListener = (child: Child, reason: string, again: () => Child | undefined) => void;
 
 type Options = { dataDir: string; quiet: boolean };
 
@@ -21,7 +23,7 @@ export async function createSupervisor({ dataDir, quiet }: Options): Promise<Sup
   if (ended.length > 0) console.log(`Ended what an earlier run left behind: ${ended.join(", ")}.`);
 
   const children: Child[] = [];
-  const listeners: ((child: Child, reason: string) => void)[] = [];
+  const listeners: ExitListener[] = [];
   let stopping: Promise<void> | undefined;
   const writeDown = () =>
     writePidFile(
@@ -33,21 +35,23 @@ export async function createSupervisor({ dataDir, quiet }: Options): Promise<Sup
   const killAll = () => children.forEach((child) => child.kill());
   process.once("exit", killAll);
 
-  return {
-    start(options) {
-      if (stopping) throw new Error("Everything is being stopped.");
-      const logFile = join(dataDir, "log", `${options.name}.log`);
-      const child = startChild({ quiet, logFile, ...options });
-      children.push(child);
+  function start(options: ChildOptions): Child {
+    if (stopping) throw new Error("Everything is being stopped.");
+    const logFile = join(dataDir, "log", `${options.name}.log`);
+    const child = startChild({ quiet, logFile, ...options });
+    children.push(child);
+    writeDown();
+    void child.exited.then(({ code, signal }) => {
+      if (stopping) return;
       writeDown();
-      void child.exited.then(({ code, signal }) => {
-        if (stopping) return;
-        writeDown();
-        const reason = `${child.name} ended by itself (${signal ?? `exit code ${code}`})`;
-        listeners.forEach((listener) => listener(child, reason));
-      });
-      return child;
-    },
+      const reason = `${child.name} ended by itself (${signal ?? `exit code ${code}`})`;
+      listeners.forEach((listener) => listener(child, reason, () => (stopping ? undefined : start(options))));
+    });
+    return child;
+  }
+
+  return {
+    start,
     stopAll() {
       stopping ??= (async () => {
         for (const child of [...children].reverse()) await child.stop();
