@@ -23,7 +23,7 @@ describe("runs of glyphs", () => {
     ]);
   });
 
-  it("break after five, so that a narrow strip can wrap", () => {
-    expect(glyphRuns(Array.from({ length: 12 }, () => "waiting" as const)).map((run) => run.count)).toEqual([5, 5, 2]);
+  it("break after six, so that a narrow strip can wrap", () => {
+    expect(glyphRuns(Array.from({ length: 14 }, () => "waiting" as const)).map((run) => run.count)).toEqual([6, 6, 2]);
   });
 });

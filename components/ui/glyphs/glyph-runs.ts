@@ -3,7 +3,7 @@ import type { GlyphState } from "./StateGlyph";
 export type GlyphRun = { start: number; state: GlyphState; count: number; isMarked: boolean };
 
 /** So many stay together on a line; a longer run may be broken between two pictures. */
-const LONGEST = 5;
+const LONGEST = 6;
 
 /** Neighbours of one state as one picture each: a rack of thousands of checks stays light. The marked one stands alone. */
 export function glyphRuns(states: readonly GlyphState[], marked?: number): GlyphRun[] {
