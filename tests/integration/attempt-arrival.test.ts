@@ -73,7 +73,7 @@ describe("two builders at once", () => {
     const [first, second] = a.arrival < b.arrival ? [a, b] : [b, a];
     expect(first.overtook).toBeNull();
     expect(second.overtook).toMatchObject({ by: second === b ? "Bram" : "Nils" });
-    expect(second.overtook?.summary.replace("\u2009", " ")).toBe(first === a ? "5.01 V" : "5.61 V");
+    expect(second.overtook?.summary.replace("\u202f", " ")).toBe(first === a ? "5.01 V" : "5.61 V");
     const kept = await db.select().from(attempts).where(eq(attempts.checkId, check.id)).orderBy(attempts.arrival);
     expect(kept.map((row) => row.id)).toEqual([first.attemptId, second.attemptId]);
     expect(await stateOf(given.unit, "5 V rail, no load")).toBe(second.state);

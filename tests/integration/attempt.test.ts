@@ -16,7 +16,7 @@ describe("recording an attempt", () => {
     const hold = await checkOf(given.unit, "5 V rail to ground");
     const answer = await must(send(given.builder, hold.id, { record: { typed: "1k24" } }));
     expect(answer).toMatchObject({ verdict: "conforms", from: "untested", state: "passed", overtook: null });
-    expect(answer.summary.replace("\u2009", " ")).toBe("1.24 kΩ");
+    expect(answer.summary.replace("\u202f", " ")).toBe("1.24 kΩ");
     expect(await statesOf(given.unit)).toBe("untested passed untested");
     const reading = one(await db.select().from(readings).where(eq(readings.attemptId, answer.attemptId)));
     expect(reading).toMatchObject({

@@ -84,7 +84,7 @@ describe("moving a traveler to a newer version", () => {
     ]);
     const changed = one(view?.difference.changed ?? []);
     expect(changed.title).toBe("Rails");
-    expect(changed.edits.map((edit) => `${edit.what}: ${edit.from} → ${edit.to}`.replaceAll("\u2009", " "))).toEqual([
+    expect(changed.edits.map((edit) => `${edit.what}: ${edit.from} → ${edit.to}`.replaceAll("\u202f", " "))).toEqual([
       "expectation: Reading with limits: 4.75 … 5.25 V → Reading with limits: 4.9 … 5.1 V",
     ]);
     expect(view?.difference.added.map((check) => check.title)).toEqual(["Count"]);
@@ -207,7 +207,7 @@ describe("the traveler as it is shown", () => {
     });
     expect(first?.reopenings[0]).toMatchObject({ reason: "Better light." });
     expect(rails?.holdLifts[0]).toMatchObject({ reason: "No supply today." });
-    expect(rails?.expectation.replaceAll("\u2009", " ")).toBe("4.75 … 5.25 V");
+    expect(rails?.expectation.replaceAll("\u202f", " ")).toBe("4.75 … 5.25 V");
     expect(clock?.blockers).toEqual([
       { checkId: look.id, serial: "CON-01", title: "Look", state: "reopened", why: "prerequisite" },
     ]);

@@ -51,7 +51,7 @@ describe("a reading on a limit", () => {
     expect(verdict("0.5 Ω", "< 0.5 Ω")).toBe("does-not-conform");
     expect(verdict("1 MΩ", "> 1 MΩ")).toBe("does-not-conform");
     const { sentences } = judge({ reading: reading("0.5 Ω"), limits: limits("< 0.5 Ω"), rule: "simple" });
-    expect(sentences[0]?.replaceAll("\u2009", " ")).toBe("500 mΩ is on the limit, and < 0.5 Ω leaves the limit out.");
+    expect(sentences[0]?.replaceAll("\u202f", " ")).toBe("500 mΩ is on the limit, and < 0.5 Ω leaves the limit out.");
   });
 
   it("is not judged by rounding: 0.1 + 0.2 is neither above 0.3 nor below it", () => {
@@ -139,7 +139,7 @@ describe("an overload", () => {
     expect(judge({ ...megohm, accuracy: { ...meter, range: 6e6 } }).verdict).toBe("conforms");
     const short = judge({ ...megohm, accuracy: { ...meter, range: 600e3 } });
     expect(short).toMatchObject({ verdict: "guard-band", tooCoarse: true });
-    expect(short.sentences[0]?.replaceAll("\u2009", " ")).toBe(
+    expect(short.sentences[0]?.replaceAll("\u202f", " ")).toBe(
       "The range in use ends at 600 kΩ, so an overload does not show that the value lies above 1 MΩ: repeat with a larger range.",
     );
     expect(judge({ ...megohm, rule: "simple", accuracy: { ...meter, range: 600e3 } }).verdict).toBe("conforms");
@@ -221,7 +221,7 @@ describe("an instrument is too coarse above a quarter of the tolerance", () => {
 describe("the sentences say what happened and what follows", () => {
   const said = (text: string, rule: DecisionRule, accuracy: Accuracy | undefined = meter) =>
     judge({ reading: reading(text), limits: limits("4.75 … 5.25 V"), rule, accuracy }).sentences.map((one) =>
-      one.replaceAll("\u2009", " "),
+      one.replaceAll("\u202f", " "),
     );
 
   it("when it conforms", () => {

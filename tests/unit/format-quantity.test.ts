@@ -4,7 +4,7 @@ import { formatQuantity, parseQuantity, UNITS, type Digits, type Unit } from "@/
 
 /** The written quantity with plain blanks, for reading here. */
 const write = (value: number, unit: Unit, options?: Digits) =>
-  formatQuantity({ value, unit }, options).replaceAll("\u2009", " ");
+  formatQuantity({ value, unit }, options).replaceAll("\u202f", " ");
 
 describe("a quantity is written with an engineering prefix", () => {
   it.each<[number, Unit, string]>([
@@ -92,7 +92,7 @@ describe("writing and reading agree", () => {
         (value, unit, options) => {
           const text = formatQuantity({ value, unit }, options);
           expect(text).not.toMatch(/NaN|undefined|-/);
-          expect(text).not.toMatch(/^−[0.]*(\u2009|$)/u);
+          expect(text).not.toMatch(/^−[0.]*(\u202f|$)/u);
           expect(text.length).toBeGreaterThan(0);
         },
       ),

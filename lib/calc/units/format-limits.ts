@@ -63,7 +63,7 @@ function withTolerance(nominal: number, { minus, plus }: { minus: Deviation; plu
 /** An amount takes the nominal value's prefix while two decimals are enough. */
 function deviation({ amount, of }: Deviation, unit: Unit, power: number): string {
   if (of === "percent") return `${number(amount, 0)}${unitText("%", 0)}`;
-  if (of === "ppm") return `${number(amount, 0)}\u2009ppm`;
+  if (of === "ppm") return `${number(amount, 0)}\u202fppm`;
   const same = decimalsOf(amount, power) <= 2 && !needsPowerOfTen(amount, power);
   return same ? `${number(amount, power)}${unitText(unit, power)}` : alone(amount, unit);
 }

@@ -1,8 +1,8 @@
 import { prefixSymbol } from "./prefixes";
 import { unitEntry, type Unit } from "./unit-list";
 
-/** Between a number and its unit: the thin space. */
-export const THIN = "\u2009";
+/** Between a number and its unit: a thin space at which no line ends (NARROW NO-BREAK SPACE). */
+export const THIN = "\u202f";
 const MINUS = "\u2212";
 
 /** Digits and power of ten of the leading digit, from the shortest decimal that names the double. */

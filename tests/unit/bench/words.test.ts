@@ -44,7 +44,7 @@ describe("reading aloud", () => {
   it("says limits and units in words", () => {
     expect(spoken("4.75 … 5.25 V")).toBe("4.75 to 5.25 volt");
     expect(spoken("< 0.5 Ω, 10 kΩ")).toBe("below 0.5 ohm, 10 kilohm");
-    expect(spoken("5\u2009V ± 5 %")).toBe("5 volt plus or minus 5 %");
+    expect(spoken("5\u202fV ± 5 %")).toBe("5 volt plus or minus 5 %");
   });
 });
 

@@ -79,9 +79,9 @@ describe("the worked example", () => {
       percentOfRange: 0,
     });
     // a = 0.025 V + 0.002 V = 27 mV; U = 2a/√3 = 31 mV
-    expect(example?.limitOfError).toBe("27\u2009mV");
-    expect(example?.uncertainty).toBe("31\u2009mV");
-    expect(example?.acceptance?.replaceAll("\u2009", " ")).toBe("4.781 V … 5.219 V");
+    expect(example?.limitOfError).toBe("27\u202fmV");
+    expect(example?.uncertainty).toBe("31\u202fmV");
+    expect(example?.acceptance?.replaceAll("\u202f", " ")).toBe("4.781 V … 5.219 V");
   });
 
   it("says when the range is too coarse for limits of ± 5 %, and when no reading could conform", () => {
