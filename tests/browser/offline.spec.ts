@@ -30,9 +30,8 @@ async function keptOffline(page: Page): Promise<void> {
     const pages = await caches.open("boardwake-bench-pages-1");
     const files = await caches.open("boardwake-bench-static-1");
     const needed = performance.getEntriesByType("resource").filter(({ name }) => name.includes("/_next/static/"));
-    return (
-      (await pages.keys()).length > 0 && (await files.keys()).length >= new Set(needed.map(({ name }) => name)).size
-    );
+    const isKept = (await pages.keys()).some(({ url }) => new URL(url).pathname === location.pathname);
+    return isKept && (await files.keys()).length >= new Set(needed.map(({ name }) => name)).size;
   });
 }
 

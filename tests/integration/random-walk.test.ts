@@ -133,13 +133,13 @@ describe("whatever people do, in whatever order", () => {
       "move",
     ];
 
-    for (let step = 0; step < 120; step += 1) {
+    for (let step = 0; step < 200; step += 1) {
       const name = pick(order) ?? "record";
       const answer = await acts[name]?.();
       if (answer?.ok) done.set(name, (done.get(name) ?? 0) + 1);
       expect(await recomputeAll(db, project.id), `after step ${step}, ${name}`).toEqual([]);
     }
-    expect(done.get("record")).toBeGreaterThan(10);
+    expect(done.get("record")).toBeGreaterThan(5);
     expect([...done.keys()].length).toBeGreaterThan(5);
   });
 });
