@@ -60,7 +60,7 @@ export function Form<Values extends FieldValues, Value>(props: FormProps<Values,
         {failure && <Notice kind="error">{failure}</Notice>}
         <div className="flex flex-col-reverse gap-2 *:w-full sm:flex-row sm:justify-end sm:*:w-auto">
           {props.actions}
-          <Button type="submit" kind={props.submitKind ?? "primary"} isPending={isPending} isDisabled={!isReady}>
+          <Button type={isReady ? "submit" : "button"} kind={props.submitKind ?? "primary"} isPending={isPending}>
             {props.submitLabel}
           </Button>
         </div>
