@@ -30,6 +30,13 @@ export type Family = {
   edgeS: number;
   /** Highest voltage an input bears; null: its own supply and no more. */
   inputMaxVolts: number | null;
+  /**
+   * Supplies at which the family may be used by these figures, V; familyAt moves them inside it and refuses outside.
+   * Left away: 4.5 to 5.5 V for figures given in that range, else a tenth up and down.
+   */
+  supply?: SupplyRange | undefined;
   /** Where the figures come from, and what is from memory. */
   source: string;
 };
+
+export type SupplyRange = { minVolts: number; maxVolts: number };

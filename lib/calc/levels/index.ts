@@ -1,0 +1,2 @@
+export { FAMILIES, findFamily } from "./families";
+export { type Family, type SupplyRange } from "./family";
