@@ -16,9 +16,9 @@ export type Place = {
   count?: number;
   /** What is counted, for a screen reader: "open". */
   countLabel?: string;
+  /** One of the few in the bar under the thumb; the rest are behind "More". */
+  underThumb?: boolean;
 };
-
-const ON_PHONE = 4;
 
 /** The places of a project: a line under the header, on a phone a bar under the thumb. */
 export function PlaceNav({ places }: { places: readonly Place[] }) {
@@ -52,8 +52,8 @@ function PlaceCount({ place }: { place: Place }) {
 }
 
 function PhoneBar({ places }: { places: readonly Place[] }) {
-  const first = places.slice(0, ON_PHONE);
-  const rest = places.slice(ON_PHONE);
+  const first = places.filter((place) => place.underThumb);
+  const rest = places.filter((place) => !place.underThumb);
   const isElsewhere = rest.some((place) => place.isCurrent);
   return (
     <nav

@@ -1,13 +1,16 @@
-import { and, eq } from "drizzle-orm";
+import { and, eq, getTableColumns } from "drizzle-orm";
 import type { Queryable } from "@/db/client";
 import { boards, revisions } from "@/db/schema/boards";
+import { edgeColumns } from "./connectors";
 
 /** What every query of a project needs; a ProjectScope is one. */
 type InProject = { projectId: string };
 
+const columns = { ...getTableColumns(boards), ...edgeColumns };
+
 export async function findBoard(db: Queryable, scope: InProject, boardId: string) {
   const [row] = await db
-    .select()
+    .select(columns)
     .from(boards)
     .where(and(eq(boards.projectId, scope.projectId), eq(boards.id, boardId)))
     .limit(1);
@@ -17,7 +20,7 @@ export async function findBoard(db: Queryable, scope: InProject, boardId: string
 /** The row stays locked until the transaction ends: changes of one board come one after another. */
 export async function lockBoard(db: Queryable, scope: InProject, boardId: string) {
   const [row] = await db
-    .select()
+    .select(columns)
     .from(boards)
     .where(and(eq(boards.projectId, scope.projectId), eq(boards.id, boardId)))
     .for("update");
@@ -26,7 +29,7 @@ export async function lockBoard(db: Queryable, scope: InProject, boardId: string
 
 export async function findBoardByCode(db: Queryable, scope: InProject, code: string) {
   const [row] = await db
-    .select()
+    .select(columns)
     .from(boards)
     .where(and(eq(boards.projectId, scope.projectId), eq(boards.code, code)))
     .limit(1);

@@ -5,6 +5,7 @@ import { events } from "@/db/schema/events";
 import { procedureChecks, procedures } from "@/db/schema/procedures";
 import { digestDeliveries, digestSubscriptions, projects } from "@/db/schema/projects";
 import { checkPrerequisites, checks, holdLifts } from "@/db/schema/travelers";
+import { edgeColumns } from "./connectors";
 
 type InProject = { projectId: string };
 
@@ -42,7 +43,7 @@ export async function findBoardsWithUnits(db: Queryable, scope: InProject) {
         name: boards.name,
         summary: boards.summary,
         kind: boards.kind,
-        connectorType: boards.connectorType,
+        connectorType: edgeColumns.connectorType,
         procedureNumber: newest,
       },
       unitId: units.id,

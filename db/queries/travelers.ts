@@ -3,6 +3,7 @@ import type { Queryable } from "@/db/client";
 import { boards, revisions, slotOccupancies, slots, units } from "@/db/schema/boards";
 import { procedureChecks, procedures, type Stage } from "@/db/schema/procedures";
 import { checks, travelers, type CheckState } from "@/db/schema/travelers";
+import { edgeColumns } from "./connectors";
 
 export async function findUnitIds(db: Queryable, projectId: string): Promise<string[]> {
   const rows = await db.select({ id: units.id }).from(units).where(eq(units.projectId, projectId));
@@ -27,8 +28,7 @@ export async function findUnitWithTraveler(db: Queryable, projectId: string, ser
         id: boards.id,
         code: boards.code,
         name: boards.name,
-        connectorType: boards.connectorType,
-        connectorReference: boards.connectorReference,
+        ...edgeColumns,
       },
       revision: { id: revisions.id, letter: revisions.letter },
       position: slots.position,

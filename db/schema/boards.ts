@@ -18,9 +18,6 @@ export const boards = pgTable(
     name: text("name").notNull(),
     summary: text("summary").notNull().default(""),
     kind: text("kind").$type<BoardKind>().notNull().default("card"),
-    /** Face of the edge connector, e.g. "din41612-b64"; see lib/calc/connector. Null: none drawn. */
-    connectorType: text("connector_type"),
-    connectorReference: text("connector_reference").notNull().default("J1"),
     version: integer("version").notNull().default(1),
     archivedAt: archivedAt(),
     createdAt: createdAt(),

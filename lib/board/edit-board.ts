@@ -7,6 +7,7 @@ import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
 import { rejectTakenCode } from "./create-board";
 import type { EditBoardInput } from "./schema";
+import { setEdgeConnector } from "./set-edge-connector";
 
 /** Serial numbers already given keep the code they were given with. */
 export async function editBoard(
@@ -23,14 +24,12 @@ export async function editBoard(
         details: { current: { code, name, summary, kind, connectorType, connectorReference, version } },
       });
     }
-    const { code, name, summary, kind, connectorType, connectorReference } = input;
+    const { code, name, summary, kind } = input;
     const same = code === current.code ? undefined : await findBoardByCode(tx, scope, code);
     if (same) rejectTakenCode(code, same.name, same.archivedAt !== null);
     const version = current.version + 1;
-    await tx
-      .update(boards)
-      .set({ code, name, summary, kind, connectorType, connectorReference, version })
-      .where(eq(boards.id, current.id));
+    await tx.update(boards).set({ code, name, summary, kind, version }).where(eq(boards.id, current.id));
+    await setEdgeConnector(tx, scope, current.id, input);
     await recordEvent(tx, { projectId, actorId: viewer.userId, subjectId: current.id }, "board.edited", { code, name });
     return { code, version };
   });

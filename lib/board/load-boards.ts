@@ -1,5 +1,6 @@
 import { and, asc, desc, eq, inArray, isNull, sql } from "drizzle-orm";
 import { database } from "@/db/client";
+import { edgeColumns } from "@/db/queries/connectors";
 import { boards, slotOccupancies, slots, units, type BoardKind } from "@/db/schema/boards";
 import type { ProjectScope } from "@/lib/access/scope";
 
@@ -51,7 +52,7 @@ export async function loadBoards(scope: ProjectScope): Promise<BoardsView> {
       name: boards.name,
       summary: boards.summary,
       kind: boards.kind,
-      connectorType: boards.connectorType,
+      connectorType: edgeColumns.connectorType,
       archivedAt: boards.archivedAt,
       // Written out, because a query of one table names its columns without the table.
       revision: sql<string>`coalesce((select letter from revisions where revisions.board_id = boards.id

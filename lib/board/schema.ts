@@ -16,7 +16,7 @@ const boardFields = {
   name: line(120, "Give the board a name."),
   summary: optionalLines(2000),
   kind: z.enum(["card", "backplane"], { message: "Choose card or backplane." }),
-  connectorType: z.enum(CONNECTOR_IDS, { message: "Choose a connector from the list." }).nullable(),
+  connectorType: z.enum([...CONNECTOR_IDS, "grid"], { message: "Choose a connector from the list." }).nullable(),
   connectorReference: line(20, "Name the connector as the board does, such as J1."),
 };
 

@@ -17,6 +17,10 @@ export const MAY: Record<Permission, readonly Role[]> = {
   // procedures, prerequisites, hold points
   "procedure.edit": maintainers,
   "prerequisite.edit": maintainers,
+  // pin map, blocks, parts, netlists; accepting a finding is a decision about the design
+  "wiring.edit": bench,
+  "parts.edit": bench,
+  "finding.accept": maintainers,
   // reopen, concession, lift a hold, void any
   "check.reopen": maintainers,
   "concession.grant": maintainers,
