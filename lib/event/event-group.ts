@@ -9,6 +9,7 @@ export const EVENT_GROUPS = [
   "reopenings",
   "evidence",
   "structure",
+  "plan",
   "people",
 ] as const;
 export type EventGroup = (typeof EVENT_GROUPS)[number];
@@ -20,6 +21,7 @@ export const GROUP_LABELS: Record<EventGroup, string> = {
   reopenings: "Reopened and conceded",
   evidence: "Evidence",
   structure: "Boards and units",
+  plan: "Wiring and parts",
   people: "People",
 };
 
@@ -42,6 +44,11 @@ const FAMILIES: Record<string, Listed> = {
   procedure: "structure",
   traveler: "structure",
   prerequisite: "structure",
+  finding: "plan",
+  signal: "plan",
+  family: "plan",
+  connector: "plan",
+  "pin-map": "plan",
   member: "people",
   invitation: "people",
 };

@@ -36,6 +36,7 @@ export function phrases(context: SentenceContext) {
         `version ${number} of the procedure of ${code}`,
         `${home}/boards/${encodeURIComponent(code)}/procedure/${number}`,
       ),
+    wiring: (text: string, path = "") => link(text, `${home}/wiring${path}`),
     unit,
     check,
     entry: (title: string) => link(`“${title}”`, context.subjectId ? `${home}/log/${context.subjectId}` : undefined),

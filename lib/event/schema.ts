@@ -64,6 +64,12 @@ export const eventPayloads = {
   "log.edited": z.object({ title: text }),
   "log.archived": z.object({ title: text }),
   "log.restored": z.object({ title: text }),
+  "finding.accepted": z.object({ title: text }).merge(reason),
+  "finding.acceptance-withdrawn": z.object({ title: text }).merge(reason),
+  "signal.saved": z.object({ name: text }),
+  "signal.removed": z.object({ name: text }),
+  "family.saved": z.object({ name: text }),
+  "family.removed": z.object({ name: text }),
 } as const satisfies Record<string, z.ZodType>;
 
 export type EventKind = keyof typeof eventPayloads;

@@ -196,6 +196,37 @@ export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
   "log.edited": ({ title }, { who, entry }) => [who, " edited ", entry(title), "."],
   "log.archived": ({ title }, { who, entry }) => [who, " archived ", entry(title), "."],
   "log.restored": ({ title }, { who, entry }) => [who, " restored ", entry(title), "."],
+  "finding.accepted": ({ title, reason }, { who, wiring }) => [
+    who,
+    " accepted the finding ",
+    wiring(`“${title}”`, "/findings"),
+    because(reason),
+  ],
+  "finding.acceptance-withdrawn": ({ title, reason }, { who, wiring }) => [
+    who,
+    " no longer accepts the finding ",
+    wiring(`“${title}”`, "/findings"),
+    because(reason),
+  ],
+  "signal.saved": ({ name }, { who, wiring }) => [who, " said more of the signal ", wiring(name, "/signals"), "."],
+  "signal.removed": ({ name }, { who, wiring }) => [
+    who,
+    " took away what was said of the signal ",
+    wiring(name, "/signals"),
+    ".",
+  ],
+  "family.saved": ({ name }, { who, wiring }) => [
+    who,
+    " kept own figures of the family ",
+    wiring(name, "/families"),
+    ".",
+  ],
+  "family.removed": ({ name }, { who, wiring }) => [
+    who,
+    " removed the own figures of the family ",
+    wiring(name, "/families"),
+    ".",
+  ],
 };
 
 type Gone = { checks: number; attempts: number; files: number; waits: number };
