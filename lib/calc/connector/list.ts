@@ -1,41 +1,40 @@
-import { header, twoPart, type Connector } from "./connector";
+import { CARD_EDGE } from "./card-edge";
+import type { Connector } from "./connector";
+import { gridFace, type ConnectorGrid } from "./grid";
+import { header, HEADER_POSITIONS, type HeaderId } from "./header";
+import { TWO_PART } from "./two-part";
 
-export const CONNECTOR_IDS = [
+export type ConnectorId = keyof typeof TWO_PART | keyof typeof CARD_EDGE | HeaderId;
+
+const HEADER_IDS = HEADER_POSITIONS.map((positions): HeaderId => `header-2x${positions}`);
+
+/** In the order in which they are offered. */
+export const CONNECTOR_IDS: readonly ConnectorId[] = [
   "din41612-b64",
   "din41612-c64",
   "din41612-c96",
-  "header-2x5",
-  "header-2x8",
-  "header-2x10",
-  "header-2x13",
-  "header-2x17",
-  "header-2x20",
-  "header-2x25",
-  "header-2x32",
-] as const;
+  "din41612-b32",
+  "din41612-c32",
+  "din41612-c48",
+  ...HEADER_IDS,
+  "edge-2x22",
+  "edge-2x31",
+];
 
-export type ConnectorId = (typeof CONNECTOR_IDS)[number];
+const CONNECTORS = new Map<string, Connector>(
+  [...Object.values(TWO_PART), ...HEADER_POSITIONS.map(header), ...Object.values(CARD_EDGE)].map((one) => [
+    one.id,
+    one,
+  ]),
+);
 
-const CONNECTORS: Record<ConnectorId, Connector> = {
-  "din41612-b64": twoPart("din41612-b64", "DIN 41612, type B, 64 pins (rows a and b)", ["a", "b"], 2),
-  "din41612-c64": twoPart("din41612-c64", "DIN 41612, type C, 64 pins (rows a and c)", ["a", "c"], 3),
-  "din41612-c96": twoPart("din41612-c96", "DIN 41612, type C, 96 pins (rows a, b and c)", ["a", "b", "c"], 3),
-  "header-2x5": header(5),
-  "header-2x8": header(8),
-  "header-2x10": header(10),
-  "header-2x13": header(13),
-  "header-2x17": header(17),
-  "header-2x20": header(20),
-  "header-2x25": header(25),
-  "header-2x32": header(32),
-};
+export const isConnectorId = (id: string): id is ConnectorId => CONNECTORS.has(id);
 
-export function isConnectorId(id: string): id is ConnectorId {
-  return Object.hasOwn(CONNECTORS, id);
-}
+export const findConnector = (id: string | null): Connector | undefined =>
+  id === null ? undefined : CONNECTORS.get(id);
 
-export function findConnector(id: string | null): Connector | undefined {
-  return id !== null && isConnectorId(id) ? CONNECTORS[id] : undefined;
-}
+/** The face of a connector as it is kept: one of the list, or "grid" with its rows; undefined when there is none. */
+export const faceOf = ({ type, grid }: { type: string; grid: ConnectorGrid | null }): Connector | undefined =>
+  type === "grid" ? (grid === null ? undefined : gridFace(grid)) : findConnector(type);
 
-export const connectorChoices = CONNECTOR_IDS.map((id) => ({ id, label: CONNECTORS[id].label }));
+export const connectorChoices = CONNECTOR_IDS.map((id) => ({ id, label: CONNECTORS.get(id)?.label ?? id }));

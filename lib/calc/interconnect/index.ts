@@ -1,0 +1,18 @@
+export { type Edit, type Finding, type PinAt, type Weight } from "./finding";
+export {
+  PIN_ROLES,
+  SIGNAL_CLASSES,
+  type BoardDesign,
+  type ConnectorAt,
+  type DesignConnector,
+  type DesignPin,
+  type Draw,
+  type Machine,
+  type Mating,
+  type PinRole,
+  type Placement,
+  type PlanConditions,
+  type Rail,
+  type SignalClass,
+  type SignalFacts,
+} from "./machine";
