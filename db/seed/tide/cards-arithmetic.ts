@@ -128,7 +128,7 @@ export const SINE: CheckLine[] = [
     stage: "continuity",
     title: "+5 V and ground at both empty sockets",
     instruction: "Pin 28 and pin 14 of U4 and U5 to J1 a2 and TP1, memories not fitted.",
-    rails: ["+5 V", "GND"],
+    rails: ["+5V", "GND"],
     expect: {
       kind: "table",
       rows: [
@@ -160,7 +160,7 @@ export const SINE: CheckLine[] = [
     stage: "power-on",
     title: "+5 V at the memory sockets",
     instruction: "Black probe on TP2. Red probe on pin 28 of U4, then U5.",
-    rails: ["+5 V"],
+    rails: ["+5V"],
     pins: ["J1 a2", "J1 b2", "J1 a32"],
     expect: { kind: "reading", quantity: "Voltage", limits: "4.75 … 5.25 V", expected: "5.00 V" },
   },
@@ -170,7 +170,7 @@ export const SINE: CheckLine[] = [
     title: "Current with both memories fitted",
     instruction: "Switch off, fit U4 and U5 with the notch to the edge, limit 0.30 A.",
     caution: "A memory fitted the wrong way round is destroyed at power-on. Compare the notch before you switch on.",
-    rails: ["+5 V"],
+    rails: ["+5V"],
     expect: { kind: "reading", quantity: "Current", limits: "90 mA … 260 mA", expected: "170 mA" },
   },
   {

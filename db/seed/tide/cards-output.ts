@@ -23,7 +23,7 @@ export const OUTPUT: CheckLine[] = [
     stage: "power-on",
     title: "The rails at the DAC and the amplifiers",
     instruction: "Black probe on TP1, analogue ground.",
-    rails: ["+5 V", "+12 V", "−12 V"],
+    rails: ["+5V", "+12V", "-12V"],
     expect: {
       kind: "table",
       rows: [
@@ -201,7 +201,7 @@ export const BACKPLANE: CheckLine[] = [
     stage: "continuity",
     title: "Rails against ground and each other",
     instruction: "No card in any slot.",
-    rails: ["+5 V", "+12 V", "−12 V"],
+    rails: ["+5V", "+12V", "-12V"],
     hold: true,
     expect: {
       kind: "table",
@@ -232,7 +232,7 @@ export const BACKPLANE: CheckLine[] = [
     stage: "continuity",
     title: "+5 V bar, slot 1 to slot 8",
     instruction: "a2 of slot 1 to b2 of slot 8.",
-    rails: ["+5 V"],
+    rails: ["+5V"],
     expect: { kind: "reading", quantity: "Resistance", limits: "< 0.2 Ω", expected: "0.05 Ω" },
   },
   {
@@ -250,20 +250,20 @@ export const BACKPLANE: CheckLine[] = [
     title: "Drop along the +5 V bar at 2 A",
     instruction: "Electronic load at slot 8, meter from a2 of slot 1 to a2 of slot 8.",
     caution: "The load resistors get hot enough to burn.",
-    rails: ["+5 V"],
+    rails: ["+5V"],
     expect: { kind: "reading", quantity: "Voltage", limits: "< 60 mV", expected: "25 mV" },
   },
   {
     id: "terminators",
     stage: "function",
     title: "Idle level of the terminated clock lines",
-    instruction: "PH1, PH2 and CLK at slot 8.",
-    signals: ["PH1", "PH2", "CLK"],
+    instruction: "PHI1, PHI2 and CLK at slot 8.",
+    signals: ["PHI1", "PHI2", "CLK"],
     expect: {
       kind: "table",
       rows: [
-        { label: "PH1", limits: "2.9 … 3.3 V" },
-        { label: "PH2", limits: "2.9 … 3.3 V" },
+        { label: "PHI1", limits: "2.9 … 3.3 V" },
+        { label: "PHI2", limits: "2.9 … 3.3 V" },
         { label: "CLK", limits: "2.9 … 3.3 V" },
       ],
       columns: ["slot 8"],

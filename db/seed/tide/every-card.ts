@@ -38,6 +38,9 @@ export function inspection(parts: string, polarised: string): CheckLine[] {
   ];
 }
 
+/** "−12 V" as the pin map writes it: -12V. */
+const netName = (rail: string) => rail.replace("−", "-").replace(" ", "");
+
 /** Unpowered: ground everywhere, no rail shorted, before anything gets power. */
 export function unpowered(rails: { name: string; pins: string[]; forward: string; reverse: string }[]): CheckLine[] {
   return [
@@ -61,8 +64,8 @@ export function unpowered(rails: { name: string; pins: string[]; forward: string
         instruction: `Black probe on TP1, red probe on ${rail.pins[0] ?? "the rail"}. Wait until the reading stands.`,
         caution: "Board unpowered and out of the rack.",
         pins: rail.pins,
-        signals: [rail.name],
-        rails: [rail.name],
+        signals: [netName(rail.name)],
+        rails: [netName(rail.name)],
         hold: true,
         expect: { kind: "reading", quantity: "Resistance", limits: rail.forward },
       },
@@ -72,8 +75,8 @@ export function unpowered(rails: { name: string; pins: string[]; forward: string
         title: `${rail.name} to ground, probes swapped`,
         instruction: `Red probe on TP1, black probe on ${rail.pins[0] ?? "the rail"}. A large difference between the directions is a reversed part.`,
         pins: rail.pins,
-        signals: [rail.name],
-        rails: [rail.name],
+        signals: [netName(rail.name)],
+        rails: [netName(rail.name)],
         expect: { kind: "reading", quantity: "Resistance", limits: rail.reverse },
       },
     ]),
@@ -88,7 +91,7 @@ export function firstPower(limitText: string, window: string, expected: string):
     title: `Current at first power, limit ${limitText}`,
     instruction: `Bench supply at 5.0 V, current limit ${limitText}, card on the extender, nothing else in the rack. Read the supply's ammeter after ten seconds.`,
     caution: FIRST_POWER,
-    rails: ["+5 V"],
+    rails: ["+5V"],
     hold: true,
     expect: { kind: "reading", quantity: "Current", limits: window, expected },
   };
@@ -101,7 +104,7 @@ export function railAt(packages: string[], expected: string, how: string): Check
     stage: "power-on",
     title: `+5 V at ${packages.slice(0, -1).join(", ")} and ${packages.at(-1)}`,
     instruction: `${how}Black probe on TP1, red probe on the supply pin of each package.`,
-    rails: ["+5 V"],
+    rails: ["+5V"],
     expect: { kind: "table", rows: [{ label: "+5 V", limits: "4.75 … 5.25 V", expected }], columns: packages },
   };
 }
@@ -121,7 +124,7 @@ export const WARM_AND_QUIET: CheckLine[] = [
     stage: "power-on",
     title: "Noise on +5 V at U6",
     instruction: "Scope with the ground spring at C6, full bandwidth, peak to peak.",
-    rails: ["+5 V"],
+    rails: ["+5V"],
     expect: { kind: "reading", quantity: "Noise", limits: "< 120 mV", expected: "60 mV" },
   },
 ];

@@ -28,7 +28,7 @@ const ripple = (t: number) => 0.5 * Math.abs(Math.sin(t * Math.PI * 10)) - 0.25 
 const DRAWINGS: Record<string, () => Promise<Buffer>> = {
   backplane: () => jpeg(backplanePicture()),
   panel: () => jpeg(panelPicture()),
-  "scope-clock": () => png(scopePicture([ringing(3)], "1 V/div   100 ns/div   PH1, slot 8")),
+  "scope-clock": () => png(scopePicture([ringing(3)], "1 V/div   100 ns/div   PHI1, slot 8")),
   "scope-carry": () =>
     png(
       scopePicture(
@@ -37,7 +37,9 @@ const DRAWINGS: Record<string, () => Promise<Buffer>> = {
       ),
     ),
   "scope-phases": () =>
-    png(scopePicture([square(5), (t) => ((t * 5 + 0.48) % 1 < 0.42 ? 0.8 : -0.8)], "2 V/div   200 ns/div   PH1, PH2")),
+    png(
+      scopePicture([square(5), (t) => ((t * 5 + 0.48) % 1 < 0.42 ? 0.8 : -0.8)], "2 V/div   200 ns/div   PHI1, PHI2"),
+    ),
   "scope-ripple": () => png(scopePicture([ripple], "10 mV/div   5 ms/div   +5 V, AC")),
 };
 

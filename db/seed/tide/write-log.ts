@@ -8,7 +8,7 @@ import { uploadPicture } from "./upload-picture";
 const CAPTIONS: Record<string, string> = {
   backplane: "Card side, row a to the left",
   "board-SUP": "SUP-01, the regulator that sits the wrong way round",
-  "scope-clock": "PH1 at slot 8",
+  "scope-clock": "PHI1 at slot 8",
   "board-CON": "CON-01 before the wires",
   panel: "Lamp test",
   "solder-CON": "Solder side with W1 to W3",
