@@ -49,6 +49,10 @@ const FAMILIES: Record<string, Listed> = {
   family: "plan",
   connector: "plan",
   "pin-map": "plan",
+  block: "plan",
+  part: "plan",
+  plan: "plan",
+  delay: "plan",
   member: "people",
   invitation: "people",
 };

@@ -37,6 +37,8 @@ export function phrases(context: SentenceContext) {
         `${home}/boards/${encodeURIComponent(code)}/procedure/${number}`,
       ),
     wiring: (text: string, path = "") => link(text, `${home}/wiring${path}`),
+    parts: (text: string, path = "") => link(text, `${home}/parts${path}`),
+    block: (name: string) => link(name, context.subjectId ? `${home}/parts/blocks/${context.subjectId}` : undefined),
     unit,
     check,
     entry: (title: string) => link(`“${title}”`, context.subjectId ? `${home}/log/${context.subjectId}` : undefined),

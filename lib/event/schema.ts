@@ -70,6 +70,22 @@ export const eventPayloads = {
   "signal.removed": z.object({ name: text }),
   "family.saved": z.object({ name: text }),
   "family.removed": z.object({ name: text }),
+  "block.created": z.object({ name: text }),
+  /** outdated: units built before, which the block no longer describes. */
+  "block.edited": z.object({ name: text, outdated: z.number() }),
+  "block.archived": z.object({ name: text }),
+  "block.restored": z.object({ name: text }),
+  "part.added": z.object({ number: text }),
+  "part.edited": z.object({ number: text }),
+  "part.stocked": z.object({ number: text, stock: z.number(), price: text }),
+  "part.archived": z.object({ number: text }),
+  "part.restored": z.object({ number: text }),
+  "plan.edited": z.object({ code: text, what: text }),
+  "plan.spares": z.object({ percent: z.number() }),
+  "delay.created": z.object({ name: text }),
+  "delay.edited": z.object({ name: text }),
+  "delay.archived": z.object({ name: text }),
+  "delay.restored": z.object({ name: text }),
 } as const satisfies Record<string, z.ZodType>;
 
 export type EventKind = keyof typeof eventPayloads;

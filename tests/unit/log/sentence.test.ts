@@ -92,6 +92,27 @@ const SAID: { [Kind in EventKind]: [EventPayload<Kind>, string] } = {
   "log.edited": [{ title: "It rings" }, "Mira edited “It rings”."],
   "log.archived": [{ title: "It rings" }, "Mira archived “It rings”."],
   "log.restored": [{ title: "It rings" }, "Mira restored “It rings”."],
+  "block.created": [{ name: "full adder" }, "Mira added the block full adder."],
+  "block.edited": [
+    { name: "full adder", outdated: 2 },
+    "Mira changed the block full adder; 2 units built before are not as it says.",
+  ],
+  "block.archived": [{ name: "full adder" }, "Mira archived the block full adder."],
+  "block.restored": [{ name: "full adder" }, "Mira restored the block full adder."],
+  "part.added": [{ number: "27C256" }, "Mira added the part 27C256."],
+  "part.edited": [{ number: "27C256" }, "Mira changed the part 27C256."],
+  "part.stocked": [
+    { number: "74HC283", stock: 12, price: "0.45 EUR" },
+    "Mira wrote down 74HC283: 12 in stock, 0.45 EUR each.",
+  ],
+  "part.archived": [{ number: "27C256" }, "Mira archived the part 27C256."],
+  "part.restored": [{ number: "27C256" }, "Mira restored the part 27C256."],
+  "plan.edited": [{ code: "SUM", what: "blocks and packing" }, "Mira changed the plan of SUM: blocks and packing."],
+  "plan.spares": [{ percent: 15 }, "Mira set the spares to order to 15 %."],
+  "delay.created": [{ name: "Ripple carry" }, "Mira added the delay path Ripple carry."],
+  "delay.edited": [{ name: "Ripple carry" }, "Mira changed the delay path Ripple carry."],
+  "delay.archived": [{ name: "Ripple carry" }, "Mira archived the delay path Ripple carry."],
+  "delay.restored": [{ name: "Ripple carry" }, "Mira restored the delay path Ripple carry."],
 };
 const KINDS = Object.entries(SAID);
 
