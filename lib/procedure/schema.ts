@@ -7,6 +7,7 @@ import { STARTER_IDS } from "./starters/starter-ids";
 
 const MOST_NAMES = 100;
 export const MOST_CHECKS = 300;
+export const MOST_CAUTION = 2000;
 
 const names = z
   .array(line(60, "Name it."))
@@ -23,7 +24,7 @@ export const checkFields = z.object({
   stage: z.enum(["inspection", "continuity", "power-on", "function", "integration"], { message: "Choose a stage." }),
   title: line(200, "Say in one line what is checked."),
   instruction: optionalLines(4000),
-  caution: optionalLines(2000),
+  caution: optionalLines(MOST_CAUTION),
   reference: optionalLine(200),
   holdPoint: z.boolean(),
   kind: checkKindName,

@@ -1,9 +1,9 @@
 import { lockBoard, findBoardByCode } from "@/db/queries/boards";
-import { findChecksOf, findProcedures, highestNumber } from "@/db/queries/procedures";
-import { procedureChecks, procedures } from "@/db/schema/procedures";
+import { findChecksOf, findProcedures } from "@/db/queries/procedures";
 import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
+import { beginDraft } from "./begin-draft";
 import { checkRow } from "./load-procedure";
 import type { StartDraftInput } from "./schema";
 import { STARTERS } from "./starters/list";
@@ -23,23 +23,13 @@ export async function startDraft(scope: ProjectScope, input: StartDraftInput): P
     }
     const newest = all.find((procedure) => procedure.state === "issued");
     if (input.from === "issued" && !newest) reject("conflict", `${board.name} has no issued version to begin from.`);
-    const number = (await highestNumber(tx, board.id)) + 1;
-    const [draft] = await tx
-      .insert(procedures)
-      .values({ boardId: board.id, number, createdBy: userId })
-      .returning({ id: procedures.id, version: procedures.version });
-    if (!draft) throw new Error("inserting a draft returned no row");
     const checks =
       input.from === "scratch"
         ? []
         : input.from === "issued"
           ? (newest ? await findChecksOf(tx, newest.id) : []).map(checkRow)
           : readStarter(STARTERS[input.from], () => crypto.randomUUID());
-    if (checks.length > 0) {
-      await tx
-        .insert(procedureChecks)
-        .values(checks.map((check, index) => ({ ...check, procedureId: draft.id, position: index + 1 })));
-    }
+    const draft = await beginDraft(tx, scope, { boardId: board.id, checks });
     return { version: draft.version };
   });
 }

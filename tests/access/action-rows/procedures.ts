@@ -42,5 +42,15 @@ export const procedureRows: Record<string, Rows> = {
     },
     discardDraft: { permission, input: draft },
     issueProcedure: { permission, input: async (machine) => ({ ...(await draft(machine)), note: "Tighter." }) },
+    offerToCheck: {
+      permission,
+      input: () => ({
+        board: "TIM",
+        draftVersion: null,
+        issuedNumber: 1,
+        target: { is: "new", check },
+        caution: { begins: "Set the bench supply", text: "Set the bench supply's limit to 0.35 A." },
+      }),
+    },
   },
 };

@@ -1,6 +1,8 @@
 "use server";
 
 import { defineAction } from "@/lib/actions/define-action";
+import { offerToCheck as offer } from "@/lib/offer/offer-to-check";
+import { offerToCheckInput } from "@/lib/offer/schema";
 import { deleteCheck as remove } from "@/lib/procedure/delete-check";
 import { discardDraft as discard } from "@/lib/procedure/discard-draft";
 import { issueProcedure as issue } from "@/lib/procedure/issue-procedure";
@@ -39,3 +41,5 @@ export const issueProcedure = defineAction({
   input: issueProcedureInput,
   run: issue,
 });
+
+export const offerToCheck = defineAction({ name: "offer-to-check", permission, input: offerToCheckInput, run: offer });
