@@ -92,6 +92,29 @@ const SAID: { [Kind in EventKind]: [EventPayload<Kind>, string] } = {
   "log.edited": [{ title: "It rings" }, "Mira edited “It rings”."],
   "log.archived": [{ title: "It rings" }, "Mira archived “It rings”."],
   "log.restored": [{ title: "It rings" }, "Mira restored “It rings”."],
+  "connector.added": [{ code: "CON", reference: "J2" }, "Mira added the connector CON J2."],
+  "connector.edited": [{ code: "CON", reference: "J2" }, "Mira changed the connector CON J2."],
+  "connector.removed": [
+    { code: "CON", reference: "J2", pins: 1 },
+    "Mira removed the connector CON J2 with 1 pin from the wiring.",
+  ],
+  "pin-map.edited": [{ code: "CON", reference: "J1", pins: 12 }, "Mira changed 12 pins of CON J1."],
+  "pin-map.copied": [
+    { code: "BP", reference: "J1", to: ["slot 2", "slot 3"], pins: 41 },
+    "Mira copied 41 pins of BP J1 to slot 2, slot 3.",
+  ],
+  "finding.accepted": [
+    { title: "FAULT_N has no pull-up", reason: "It sits on the front panel" },
+    "Mira accepted the finding “FAULT_N has no pull-up”: It sits on the front panel.",
+  ],
+  "finding.acceptance-withdrawn": [
+    { title: "FAULT_N has no pull-up", reason: "The panel is gone" },
+    "Mira no longer accepts the finding “FAULT_N has no pull-up”: The panel is gone.",
+  ],
+  "signal.saved": [{ name: "CLK" }, "Mira said more of the signal CLK."],
+  "signal.removed": [{ name: "CLK" }, "Mira took away what was said of the signal CLK."],
+  "family.saved": [{ name: "HC, maker B" }, "Mira kept own figures of the family HC, maker B."],
+  "family.removed": [{ name: "HC, maker B" }, "Mira removed the own figures of the family HC, maker B."],
   "block.created": [{ name: "full adder" }, "Mira added the block full adder."],
   "block.edited": [
     { name: "full adder", outdated: 2 },
