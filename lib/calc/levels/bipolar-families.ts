@@ -1,12 +1,10 @@
 import type { Family } from "./family";
+import { RAIL_10_PERCENT, REST_FROM_MEMORY } from "./shared-ratings";
 
 const RAIL_5_PERCENT = { minVolts: 4.75, maxVolts: 5.25 };
-const RAIL_10_PERCENT = { minVolts: 4.5, maxVolts: 5.5 };
 
 /** What all of them share: TTL thresholds, inputs that bear 7 V (absolute maximum, from memory). */
 const TTL = { technology: "bipolar", vihMin: 2.0, vilMax: 0.8, inputMaxVolts: 7 } as const;
-
-const MEMORY = "Leakage, capacitances, delay and edge from memory.";
 
 /** Bipolar families at their lowest supply, worst case 0 … 70 °C. */
 export const BIPOLAR_FAMILIES: Family[] = [
@@ -26,7 +24,7 @@ export const BIPOLAR_FAMILIES: Family[] = [
     tpdTypicalS: 9.5e-9,
     edgeS: 8e-9,
     supply: RAIL_5_PERCENT,
-    source: `Read in the SN74LS00 sheet (SDLS025B); other makers give 0.36 mA for the input's low current. Output 0.4 V at 4 mA. ${MEMORY}`,
+    source: `Read in the SN74LS00 sheet (SDLS025B); other makers give 0.36 mA for the input's low current. Output 0.4 V at 4 mA. ${REST_FROM_MEMORY}`,
   },
   {
     ...TTL,
@@ -44,7 +42,7 @@ export const BIPOLAR_FAMILIES: Family[] = [
     tpdTypicalS: 4e-9,
     edgeS: 5e-9,
     supply: RAIL_10_PERCENT,
-    source: `Read in the 74ALS04B and SN74ALS00A sheets; the high output is the supply less 2 V. ${MEMORY}`,
+    source: `Read in the 74ALS04B and SN74ALS00A sheets; the high output is the supply less 2 V. ${REST_FROM_MEMORY}`,
   },
   {
     ...TTL,
@@ -62,7 +60,7 @@ export const BIPOLAR_FAMILIES: Family[] = [
     tpdTypicalS: 3.5e-9,
     edgeS: 2.5e-9,
     supply: RAIL_10_PERCENT,
-    source: `Read in the 74F00 sheet, p. 3; the high output is 2.7 V at 5 V ± 5 %. ${MEMORY}`,
+    source: `Read in the 74F00 sheet, p. 3; the high output is 2.7 V at 5 V ± 5 %. ${REST_FROM_MEMORY}`,
   },
   {
     ...TTL,

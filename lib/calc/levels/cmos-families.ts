@@ -1,156 +1,75 @@
 import type { Family } from "./family";
+import { CMOS, CMOS_LEVELS, HC_OUTPUT, RAIL_10_PERCENT, REST_FROM_MEMORY } from "./shared-ratings";
 
-const RAIL_10_PERCENT = { minVolts: 4.5, maxVolts: 5.5 };
 const UP_TO_5_5 = { minVolts: 3, maxVolts: 5.5 };
-
-/** An input of plain CMOS: clamped to its supply; 1 µA over the whole temperature range. */
-const CMOS = { technology: "CMOS", iihA: 1e-6, iilA: 1e-6, inputMaxVolts: null } as const;
-/** Thresholds at 4.5 V: 0.7 and 0.3 of the supply, and those made for TTL outputs. */
-const CMOS_LEVELS = { volts: 4.5, vihMin: 3.15, vilMax: 1.35 } as const;
 const TTL_LEVELS = { volts: 4.5, vihMin: 2.0, vilMax: 0.8 } as const;
 
-const MEMORY = "Leakage, capacitances, delay and edge from memory.";
+const AC_OUTPUT = { vohMin: 3.76, iohA: 24e-3, volMax: 0.44, iolA: 24e-3, iozA: 5e-6, inputPf: 4.5, outputPf: 15 };
+const AHC_OUTPUT = { vohMin: 3.8, iohA: 8e-3, volMax: 0.44, iolA: 8e-3, iozA: 2.5e-6, inputPf: 3, outputPf: 4 };
 
-const hcOutput = { vohMin: 3.84, iohA: 4e-3, volMax: 0.33, iolA: 4e-3, iozA: 5e-6, inputPf: 3.5, outputPf: 10 };
-const acOutput = { vohMin: 3.76, iohA: 24e-3, volMax: 0.44, iolA: 24e-3, iozA: 5e-6, inputPf: 4.5, outputPf: 15 };
-const ahcOutput = { vohMin: 3.8, iohA: 8e-3, volMax: 0.44, iolA: 8e-3, iozA: 2.5e-6, inputPf: 3, outputPf: 4 };
-
-/** CMOS families, worst case −40 … 85 °C, at 4.5 V unless said. */
+/** HC, AC, AHC and their kin with TTL thresholds at 4.5 V, worst case −40 … 85 °C. */
 export const CMOS_FAMILIES: Family[] = [
   {
     ...CMOS,
     ...CMOS_LEVELS,
-    ...hcOutput,
+    ...HC_OUTPUT,
     name: "HC",
     tpdTypicalS: 7e-9,
     edgeS: 7e-9,
     supply: { minVolts: 3, maxVolts: 6 },
-    source: `Read in the MC74HC08A (p. 3) and MM74HC86 (p. 3) sheets, delay at 5 V and 15 pF in the Philips HC00's; 4.4 V and 0.1 V at 20 µA. Leakage, capacitances and edge from memory.`,
+    source:
+      "Read in the MC74HC08A (p. 3) and MM74HC86 (p. 3) sheets, delay at 5 V and 15 pF in the Philips HC00's; 4.4 V and 0.1 V at 20 µA. Leakage, capacitances and edge from memory.",
   },
   {
     ...CMOS,
     ...TTL_LEVELS,
-    ...hcOutput,
+    ...HC_OUTPUT,
     name: "HCT",
     tpdTypicalS: 10e-9,
     edgeS: 7e-9,
     supply: RAIL_10_PERCENT,
-    source: `Read in the CD74HCT08 and MM74HCT00 sheets. ${MEMORY}`,
+    source: `Read in the CD74HCT08 and MM74HCT00 sheets. ${REST_FROM_MEMORY}`,
   },
   {
     ...CMOS,
     ...CMOS_LEVELS,
-    ...acOutput,
+    ...AC_OUTPUT,
     name: "AC",
     tpdTypicalS: 5e-9,
     edgeS: 2e-9,
     supply: UP_TO_5_5,
-    source: `Read in the 74AC and MC74AC32 sheets. ${MEMORY}`,
+    source: `Read in the 74AC and MC74AC32 sheets. ${REST_FROM_MEMORY}`,
   },
   {
     ...CMOS,
     ...TTL_LEVELS,
-    ...acOutput,
+    ...AC_OUTPUT,
     name: "ACT",
     tpdTypicalS: 5e-9,
     edgeS: 2e-9,
     supply: RAIL_10_PERCENT,
-    source: `Read in the SN74ACT00 (SCAS523D) and MC74ACT00 sheets. ${MEMORY}`,
+    source: `Read in the SN74ACT00 (SCAS523D) and MC74ACT00 sheets. ${REST_FROM_MEMORY}`,
   },
   {
     ...CMOS,
     ...CMOS_LEVELS,
-    ...ahcOutput,
+    ...AHC_OUTPUT,
     name: "AHC",
     tpdTypicalS: 3.5e-9,
     edgeS: 3e-9,
     inputMaxVolts: 5.5,
     supply: UP_TO_5_5,
-    source: `Read in the 74AHC04 sheet, table 6; its thresholds at 4.5 V are 0.7 and 0.3 of the supply, computed. ${MEMORY} Inputs bear 5.5 V, from memory.`,
+    source: `Read in the 74AHC04 sheet, table 6; its thresholds at 4.5 V are 0.7 and 0.3 of the supply, computed. ${REST_FROM_MEMORY} Inputs bear 5.5 V, from memory.`,
   },
   {
     ...CMOS,
     ...TTL_LEVELS,
-    ...ahcOutput,
+    ...AHC_OUTPUT,
     name: "AHCT",
     tpdTypicalS: 3.5e-9,
     edgeS: 3e-9,
     inputMaxVolts: 5.5,
     supply: RAIL_10_PERCENT,
-    source: `Read in the 74AHCT04 sheet, table 6. ${MEMORY} Inputs bear 5.5 V, from memory.`,
-  },
-  {
-    ...CMOS,
-    ...CMOS_LEVELS,
-    name: "LVC",
-    vohMin: 3.8,
-    iohA: 24e-3,
-    volMax: 0.55,
-    iolA: 24e-3,
-    iihA: 5e-6,
-    iilA: 5e-6,
-    iozA: 10e-6,
-    inputPf: 4,
-    outputPf: 6,
-    tpdTypicalS: 2e-9,
-    edgeS: 2e-9,
-    inputMaxVolts: 5.5,
-    supply: RAIL_10_PERCENT,
-    source: `Read in the HD74LVC04 sheet, p. 3, for 4.5 to 5.5 V. ${MEMORY} Inputs bear 5.5 V, from memory.`,
-  },
-  {
-    ...CMOS,
-    name: "LVC 3.3 V",
-    volts: 3,
-    vihMin: 2.0,
-    vilMax: 0.8,
-    vohMin: 2.2,
-    iohA: 24e-3,
-    volMax: 0.55,
-    iolA: 24e-3,
-    iihA: 5e-6,
-    iilA: 5e-6,
-    iozA: 10e-6,
-    inputPf: 4,
-    outputPf: 6,
-    tpdTypicalS: 2.5e-9,
-    edgeS: 2e-9,
-    inputMaxVolts: 5.5,
-    supply: { minVolts: 3, maxVolts: 3.6 },
-    source: "All from memory: no data sheet was opened for this supply.",
-  },
-  {
-    ...CMOS,
-    ...hcOutput,
-    name: "HCU",
-    volts: 4.5,
-    vihMin: 3.6,
-    vilMax: 0.8,
-    vohMin: 4.0,
-    iohA: 20e-6,
-    volMax: 0.5,
-    iolA: 20e-6,
-    tpdTypicalS: 5e-9,
-    edgeS: 7e-9,
-    supply: { minVolts: 3, maxVolts: 6 },
-    source: `Read in the MM74HCU04 sheet, p. 4: an unbuffered inverter; its output is given at 20 µA only. ${MEMORY}`,
-  },
-  {
-    ...CMOS,
-    name: "4000B",
-    volts: 5,
-    vihMin: 3.5,
-    vilMax: 1.5,
-    vohMin: 4.6,
-    iohA: 0.36e-3,
-    volMax: 0.4,
-    iolA: 0.36e-3,
-    iozA: 12e-6,
-    inputPf: 7.5,
-    outputPf: 10,
-    tpdTypicalS: 55e-9,
-    edgeS: 60e-9,
-    supply: { minVolts: 4.5, maxVolts: 15 },
-    source: "All from memory: no data sheet of this family (HEF4000B, CD4000B) was opened.",
+    source: `Read in the 74AHCT04 sheet, table 6. ${REST_FROM_MEMORY} Inputs bear 5.5 V, from memory.`,
   },
 ];

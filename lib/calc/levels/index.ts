@@ -1,2 +1,11 @@
 export { FAMILIES, findFamily } from "./families";
 export { type Family, type SupplyRange } from "./family";
+export { familyAt, hasTtlThresholds, supplyRange } from "./family-at";
+export { fanOut, type FanOut } from "./fan-out";
+export { loadedEdge, type LoadedEdge } from "./loaded-edge";
+export { loading, type Burden, type Group, type LevelLoad, type Loading } from "./loading";
+export { margins, type Margins } from "./margins";
+export { marginsOverSupply, type Supplies } from "./margins-over-supply";
+export { netLoad, type NetLoad, type NetParts } from "./net-load";
+export { inputStress, type InputStress } from "./over-voltage";
+export { pairWarnings, type PairWarning } from "./pair-warnings";
