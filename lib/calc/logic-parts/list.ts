@@ -26,4 +26,7 @@ export const partFor = (gateFunction: string, own: readonly LogicPart[] = []): L
   partsFor(gateFunction, own)[0];
 
 /** "2-input NAND" for nand2: what people read beside a count of gates. */
-export const gateFunctionName = (gateFunction: string): string => GATE_FUNCTION_NAMES[gateFunction] ?? gateFunction;
+export function gateFunctionName(gateFunction: string): string {
+  const name = Object.hasOwn(GATE_FUNCTION_NAMES, gateFunction) ? GATE_FUNCTION_NAMES[gateFunction] : undefined;
+  return name ?? gateFunction;
+}

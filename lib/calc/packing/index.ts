@@ -1,4 +1,7 @@
+export { choosePackages } from "./choose-packages";
 export { type BlockDesign, type GateCount, type PackingInput, type PackingMode, type PackingProblem } from "./design";
+export { findCycle } from "./find-cycle";
+export { pack, type PackingResult } from "./pack";
 export {
   type Decoupling,
   type PackageLine,
@@ -7,3 +10,4 @@ export {
   type PlacedPackage,
   type SpareGate,
 } from "./packing";
+export { groupSpares } from "./tie-spares";

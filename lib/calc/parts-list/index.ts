@@ -1,3 +1,4 @@
+export { listParts, type PartsListResult } from "./list-parts";
 export {
   type PartsList,
   type PartsListInput,

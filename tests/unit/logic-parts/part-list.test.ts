@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { findPart, gateFunctionName, LOGIC_PARTS, partFor, partsFor } from "@/lib/calc/logic-parts";
+import { findPart, gateFunctionName, LOGIC_PARTS, partFor, partLabel, partsFor } from "@/lib/calc/logic-parts";
 
 const byNumber = LOGIC_PARTS.map((part) => [part.number, part] as const);
 
@@ -58,10 +58,19 @@ test("the usual part for a function is the first listed, the project's own goes 
   expect(partFor("nand2", [{ ...first, ...own }])?.number).toBe("1G00");
   expect(partFor("teapot")).toBeUndefined();
   expect(gateFunctionName("teapot")).toBe("teapot");
+  expect(gateFunctionName("constructor")).toBe("constructor");
 });
 
 test("bus drivers end in three states, wired gates in open drains", () => {
   for (const number of ["125", "240", "244", "245", "257", "374", "541", "573", "595"])
     expect(findPart(number)?.output).toBe("three-state");
   for (const number of ["03", "05", "06", "07"]) expect(findPart(number)?.output).toBe("open-drain");
+});
+
+test("a part is ordered by series, family and number; a name of the project's own stays as it is", () => {
+  expect(partLabel({ number: "283" }, "HC")).toBe("74HC283");
+  expect(partLabel({ number: "74" }, "LS")).toBe("74LS74");
+  expect(partLabel({ number: "74HC4078" }, "HCT")).toBe("74HC4078");
+  expect(partLabel({ number: "7400" }, "HC")).toBe("7400");
+  expect(partLabel({ number: "QUAD-7" }, "HC")).toBe("QUAD-7");
 });
