@@ -28,6 +28,14 @@ export async function findEdgeConnector(db: Queryable, scope: InProject, boardId
   return first;
 }
 
+export async function findConnector(db: Queryable, scope: InProject, connectorId: string) {
+  const [row] = await db
+    .select()
+    .from(connectors)
+    .where(and(eq(connectors.projectId, scope.projectId), eq(connectors.id, connectorId)));
+  return row;
+}
+
 /** The row stays locked until the transaction ends: changes of one pin map come one after another. */
 export async function lockConnector(db: Queryable, scope: InProject, connectorId: string) {
   const [row] = await db

@@ -14,6 +14,15 @@ export async function lockSlot(db: Queryable, scope: InProject, slotId: string) 
   return row;
 }
 
+export async function findSlot(db: Queryable, scope: InProject, slotId: string) {
+  const [row] = await db
+    .select()
+    .from(slots)
+    .where(and(eq(slots.projectId, scope.projectId), eq(slots.id, slotId), isNull(slots.archivedAt)))
+    .limit(1);
+  return row;
+}
+
 export async function findSlotAt(db: Queryable, scope: InProject, position: number) {
   const [row] = await db
     .select({ id: slots.id })

@@ -36,6 +36,8 @@ export function phrases(context: SentenceContext) {
         `version ${number} of the procedure of ${code}`,
         `${home}/boards/${encodeURIComponent(code)}/procedure/${number}`,
       ),
+    pinMap: (code: string, reference: string) =>
+      link(`${code} ${reference}`, `${home}/wiring?connector=${encodeURIComponent(`${code}.${reference}`)}`),
     wiring: (text: string, path = "") => link(text, `${home}/wiring${path}`),
     parts: (text: string, path = "") => link(text, `${home}/parts${path}`),
     block: (name: string) => link(name, context.subjectId ? `${home}/parts/blocks/${context.subjectId}` : undefined),

@@ -64,6 +64,12 @@ export const eventPayloads = {
   "log.edited": z.object({ title: text }),
   "log.archived": z.object({ title: text }),
   "log.restored": z.object({ title: text }),
+  "connector.added": z.object({ code: text, reference: text }),
+  "connector.edited": z.object({ code: text, reference: text }),
+  "connector.removed": z.object({ code: text, reference: text, pins: z.number() }),
+  "pin-map.edited": z.object({ code: text, reference: text, pins: z.number() }),
+  /** to: where the pins went, in words. */
+  "pin-map.copied": z.object({ code: text, reference: text, to: z.array(text), pins: z.number() }),
   "finding.accepted": z.object({ title: text }).merge(reason),
   "finding.acceptance-withdrawn": z.object({ title: text }).merge(reason),
   "signal.saved": z.object({ name: text }),

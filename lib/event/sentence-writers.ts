@@ -196,6 +196,36 @@ export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
   "log.edited": ({ title }, { who, entry }) => [who, " edited ", entry(title), "."],
   "log.archived": ({ title }, { who, entry }) => [who, " archived ", entry(title), "."],
   "log.restored": ({ title }, { who, entry }) => [who, " restored ", entry(title), "."],
+  "connector.added": ({ code, reference }, { who, pinMap }) => [
+    who,
+    " added the connector ",
+    pinMap(code, reference),
+    ".",
+  ],
+  "connector.edited": ({ code, reference }, { who, pinMap }) => [
+    who,
+    " changed the connector ",
+    pinMap(code, reference),
+    ".",
+  ],
+  "connector.removed": ({ code, reference, pins }, { who, wiring }) => [
+    who,
+    ` removed the connector ${code} ${reference} with ${count(pins, "pin")} from `,
+    wiring("the wiring"),
+    ".",
+  ],
+  "pin-map.edited": ({ code, reference, pins }, { who, pinMap }) => [
+    who,
+    ` changed ${count(pins, "pin")} of `,
+    pinMap(code, reference),
+    ".",
+  ],
+  "pin-map.copied": ({ code, reference, to, pins }, { who, pinMap }) => [
+    who,
+    ` copied ${count(pins, "pin")} of `,
+    pinMap(code, reference),
+    ` to ${to.join(", ")}.`,
+  ],
   "finding.accepted": ({ title, reason }, { who, wiring }) => [
     who,
     " accepted the finding ",
