@@ -4,6 +4,7 @@ import { DigestBoards } from "./parts/DigestBoards";
 import { DigestEntries } from "./parts/DigestEntries";
 import { DigestItems, More } from "./parts/DigestItems";
 import { DigestPassed } from "./parts/DigestPassed";
+import { DigestWiring } from "./parts/DigestWiring";
 import { PartHeading } from "./parts/Heading";
 import { light } from "./parts/palette";
 import { Sheet } from "./parts/Sheet";
@@ -14,7 +15,7 @@ export const digestSubject = ({ projectName, headline }: DigestMailProps): strin
 /** The week of one project: how the boards stand, what happened, what is open and what comes next. */
 export function DigestMail(props: DigestMailProps) {
   const { projectName, projectLink, logLink, period, summary, standing, isQuiet } = props;
-  const { boards, passed, failed, decided, entries, also, open, next } = props;
+  const { boards, passed, failed, decided, entries, also, open, next, wiring } = props;
   return (
     <Sheet preheader={`${summary} ${standing}`} footer={<Footer {...props} />}>
       <Title>{projectName}</Title>
@@ -48,6 +49,7 @@ export function DigestMail(props: DigestMailProps) {
           <More count={also.more} link={logLink} />
           {open.items.length > 0 && <PartHeading>Open failures</PartHeading>}
           <DigestItems list={open} moreLink={projectLink} />
+          {wiring && <DigestWiring wiring={wiring} />}
         </>
       )}
       {next.items.length > 0 && <PartHeading>Next on the bench</PartHeading>}

@@ -12,7 +12,7 @@ const WORDS: Record<Mark, string> = {
 /** The digest as plain text: written for reading, not what is left of a page when its markup is taken away. */
 export function digestText(props: DigestMailProps): string {
   const { projectName, period, summary, standing, projectLink, logLink, isQuiet } = props;
-  const { boards, failed, decided, passed, entries, also, open, next } = props;
+  const { boards, failed, decided, passed, entries, also, open, next, wiring } = props;
   const head = [projectName, period, "", summary, standing];
   const first = { items: next.items.slice(0, 1), more: 0 };
   const body = isQuiet
@@ -29,6 +29,7 @@ export function digestText(props: DigestMailProps): string {
           ...more(also.more, logLink),
         ]),
         ...section("Open failures", items(open, projectLink)),
+        ...section("In the wiring", wiring ? wiringText(wiring) : []),
         ...section("Next on the bench", items(next, projectLink)),
       ];
   return [...head, ...body, ...footer(props)].join("\n");
@@ -71,6 +72,13 @@ const entryText = ({ title, by, excerpt, pictures, link }: DigestMailProps["entr
   `${title} (${by})`,
   ...(excerpt === "" ? [] : [`  ${excerpt}`]),
   ...pictures.map((picture) => `  [Picture: ${picture.caption}]`),
+  `  ${link}`,
+];
+
+const wiringText = ({ sentence, fresh, more: rest, link }: NonNullable<DigestMailProps["wiring"]>) => [
+  sentence,
+  ...fresh.map((title) => `  New: ${title}`),
+  ...(rest === 0 ? [] : [`  and ${rest} more`]),
   `  ${link}`,
 ];
 

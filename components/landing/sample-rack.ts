@@ -69,6 +69,7 @@ const board = (line: Pick<Line, "code" | "name" | "detail">, kind: RackBoard["ki
   kind,
   connectorType: "din41612-c64",
   procedureNumber: 1,
+  toMend: 0,
 });
 
 function unit(line: Line, kind?: RackBoard["kind"]): RackUnit {

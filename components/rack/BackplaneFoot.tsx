@@ -3,6 +3,7 @@ import type { RackView } from "@/lib/rack/rack-view";
 import { CardLink } from "./CardLink";
 import { CardStages } from "./CardStages";
 import { boardAddress, unitAddress } from "./rack-addresses";
+import { ToMend } from "./ToMend";
 
 type Props = {
   backplane: RackView["backplane"];
@@ -32,6 +33,7 @@ export function BackplaneFoot({ backplane, project, room, isStanding = false }: 
         <span className="mono flex flex-wrap gap-x-2.5 text-sm leading-tight @3xl:flex-col">
           <span className="font-semibold">{unit?.serial ?? board.code}</span>
           <span className="text-xs text-ink-soft">{unit ? `rev ${unit.revision}` : "no unit yet"}</span>
+          <ToMend board={board} />
         </span>
         {unit && (
           <>

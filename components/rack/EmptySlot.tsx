@@ -3,6 +3,7 @@ import { CardLink } from "./CardLink";
 import { EdgeConnector } from "./EdgeConnector";
 import { slotAddress } from "./rack-addresses";
 import type { useSlotWalk } from "./slot-walk";
+import { ToMend } from "./ToMend";
 
 type Props = {
   slot: RackSlot;
@@ -28,6 +29,7 @@ export function EmptySlot({ slot, project, canPlace, stop }: Props) {
         <span>
           {wanted} {canPlace ? "Put a unit in." : "Its pins stay open."}
         </span>
+        <ToMend board={slot.board} className="mono" />
       </span>
     </CardLink>
   );

@@ -3,6 +3,7 @@ import { Panel } from "@/components/ui/Panel";
 import type { RackUnit } from "@/lib/rack/rack-view";
 import { CardStages } from "./CardStages";
 import { unitAddress } from "./rack-addresses";
+import { ToMend } from "./ToMend";
 
 /** Units that lie on the shelf or on the bench instead of in a slot. */
 export function LooseUnits({ units, project }: { units: readonly RackUnit[]; project: string }) {
@@ -22,6 +23,7 @@ export function LooseUnits({ units, project }: { units: readonly RackUnit[]; pro
               <span className="mono flex flex-wrap gap-x-2.5 text-sm leading-tight @3xl:flex-col">
                 <span className="font-semibold">{unit.serial}</span>
                 <span className="text-xs text-ink-soft">rev {unit.revision}</span>
+                <ToMend board={unit.board} />
               </span>
               <span className="hidden @3xl:block">
                 <CardStages unit={unit} />

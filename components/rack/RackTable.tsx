@@ -5,11 +5,12 @@ import { Panel } from "@/components/ui/Panel";
 import { Table } from "@/components/ui/Table";
 import type { TableColumn } from "@/components/ui/table-column";
 import { STAGES } from "@/lib/procedure/stages";
-import type { RackSlot, RackUnit, RackView } from "@/lib/rack/rack-view";
+import type { RackBoard, RackSlot, RackUnit, RackView } from "@/lib/rack/rack-view";
 import { CardStages } from "./CardStages";
 import { slotAddress, unitAddress } from "./rack-addresses";
+import { ToMend } from "./ToMend";
 
-type Row = { key: string; slot: RackSlot | null; unit: RackUnit | null; name: string };
+type Row = { key: string; slot: RackSlot | null; unit: RackUnit | null; board: RackBoard | null; name: string };
 
 const held = (unit: RackUnit | null, index: number) => {
   const states = unit?.stages[index]?.states ?? [];
@@ -23,12 +24,11 @@ export function RackTable({ rack, project }: { rack: RackView; project: string }
       key: slot.id,
       slot,
       unit: slot.unit,
+      board: slot.unit?.board ?? slot.board,
       name: slot.unit?.board.name ?? (slot.board ? `empty, wired for ${slot.board.name}` : "empty"),
     })),
-    ...(rack.backplane
-      ? [{ key: "backplane", slot: null, unit: rack.backplane.unit, name: rack.backplane.board.name }]
-      : []),
-    ...rack.loose.map((unit) => ({ key: unit.id, slot: null, unit, name: unit.board.name })),
+    ...(rack.backplane ? [{ key: "backplane", slot: null, ...rack.backplane, name: rack.backplane.board.name }] : []),
+    ...rack.loose.map((unit) => ({ key: unit.id, slot: null, unit, board: unit.board, name: unit.board.name })),
   ];
   return (
     <Panel className="@container">
@@ -109,6 +109,14 @@ function columnsFor(project: string): TableColumn<Row>[] {
         return count > 0 ? <span className="font-semibold text-doubtful">{count}</span> : "";
       },
     },
+    {
+      id: "mend",
+      header: "To mend",
+      mono: true,
+      align: "end",
+      sortBy: (row) => row.board?.toMend,
+      cell: (row) => (row.board?.toMend ? <span className="font-semibold text-failed">{row.board.toMend}</span> : ""),
+    },
   ];
 }
 
@@ -138,6 +146,7 @@ function PhoneRow({ row, project }: { row: Row; project: string }) {
         <span className="mono text-xs text-ink-soft">
           {row.unit ? `${row.unit.serial} rev ${row.unit.revision}` : ""}
         </span>
+        <ToMend board={row.board} className="mono" />
       </p>
       {row.unit && <CardStages unit={row.unit} layout="flow" />}
     </div>

@@ -8,6 +8,7 @@ import { CardStages } from "./CardStages";
 import { EdgeConnector } from "./EdgeConnector";
 import { slotAddress, unitAddress } from "./rack-addresses";
 import { useSlotWalk } from "./slot-walk";
+import { ToMend } from "./ToMend";
 
 type Props = { rack: RackView; project: string; nextSerial: string | undefined; className?: string };
 
@@ -81,6 +82,7 @@ function StandingCard({ slot, project, isNext, stop }: CardProps) {
         <span>
           <span className="block font-semibold">empty slot</span>
           {slot.board ? `Wired for ${slot.board.name}.` : "Takes any card."}
+          <ToMend board={slot.board} className="mono mt-1 block" />
         </span>
         <span className="-mb-3.5 flex justify-center">
           <EdgeConnector type={slot.board?.connectorType ?? null} across isEmpty />
@@ -108,6 +110,7 @@ function StandingCard({ slot, project, isNext, stop }: CardProps) {
         </span>
         <span className="mono text-xs font-semibold leading-tight">{unit.serial}</span>
         <span className="mono text-2xs leading-tight text-ink-soft">rev {unit.revision}</span>
+        <ToMend board={unit.board} className="mono" />
       </span>
       <span className="flex-1">
         <CardStages unit={unit} layout="flow" className="flex-col [&>li]:w-full" />

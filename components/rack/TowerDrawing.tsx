@@ -9,6 +9,7 @@ import { EdgeConnector } from "./EdgeConnector";
 import { EmptySlot } from "./EmptySlot";
 import { unitAddress } from "./rack-addresses";
 import { useSlotWalk } from "./slot-walk";
+import { ToMend } from "./ToMend";
 
 type Props = {
   rack: Pick<RackView, "slots" | "backplane">;
@@ -106,6 +107,7 @@ function SlotRow({ slot, project, isNext, canPlace, height, room, stop }: RowPro
               <span className="mono flex flex-wrap gap-x-2.5 text-sm leading-tight @3xl:flex-col">
                 <span className="font-semibold">{unit.serial}</span>
                 <span className="text-xs text-ink-soft">rev {unit.revision}</span>
+                <ToMend board={unit.board} />
               </span>
               <CardStages unit={unit} room={room} />
             </span>

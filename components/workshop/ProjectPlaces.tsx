@@ -4,7 +4,7 @@ import { usePathname } from "next/navigation";
 import { PlaceNav, type Place } from "@/components/shell/PlaceNav";
 import type { PlaceMarkName } from "@/components/shell/PlaceMark";
 
-type Props = { project: string; failing: number; doubtful: number; canEdit: boolean };
+type Props = { project: string; failing: number; doubtful: number; toMend: number; canEdit: boolean };
 
 /** A unit's pages belong to the bench: that is where one is with it. */
 const PLACES: readonly { path: string; label: string; mark: PlaceMarkName; also?: string; underThumb?: true }[] = [
@@ -19,7 +19,7 @@ const PLACES: readonly { path: string; label: string; mark: PlaceMarkName; also?
   { path: "settings", label: "Settings", mark: "settings" },
 ];
 
-export function ProjectPlaces({ project, failing, doubtful, canEdit }: Props) {
+export function ProjectPlaces({ project, failing, doubtful, toMend, canEdit }: Props) {
   const pathname = usePathname();
   const base = `/projects/${project}/`;
   const current = pathname.startsWith(base) ? pathname.slice(base.length).split("/")[0] : "";
@@ -33,6 +33,7 @@ export function ProjectPlaces({ project, failing, doubtful, canEdit }: Props) {
       ...(path === "bench"
         ? { count: failing + doubtful, countLabel: `(${failing} failing, ${doubtful} in doubt)` }
         : {}),
+      ...(path === "wiring" ? { count: toMend, countLabel: "(findings to mend)" } : {}),
     }),
   );
   return <PlaceNav places={places} />;

@@ -5,9 +5,14 @@ import { events } from "@/db/schema/events";
 import { procedureChecks, procedures } from "@/db/schema/procedures";
 import { digestDeliveries, digestSubscriptions, projects } from "@/db/schema/projects";
 import { checkPrerequisites, checks, holdLifts } from "@/db/schema/travelers";
+import { ruleFindings } from "@/db/schema/wiring";
 import { edgeColumns } from "./connectors";
 
 type InProject = { projectId: string };
+
+/** Open findings of the wiring that must be mended; written out so that it stands inside any query with projects. */
+const mustFindings = sql<number>`(select count(*) from ${ruleFindings} found
+  where found.project_id = ${projects.id} and found.state = 'open' and found.weight = 'must')`.mapWith(Number);
 
 /** The project with its slots, one row a slot (one row with nulls when there is none), and who sits in them. */
 export async function findSlotsOfProject(db: Queryable, scope: InProject) {
@@ -16,6 +21,7 @@ export async function findSlotsOfProject(db: Queryable, scope: InProject) {
       name: projects.name,
       summary: projects.summary,
       layout: projects.layout,
+      toMend: mustFindings,
       slotId: slots.id,
       position: slots.position,
       label: slots.label,
@@ -45,6 +51,9 @@ export async function findBoardsWithUnits(db: Queryable, scope: InProject) {
         kind: boards.kind,
         connectorType: edgeColumns.connectorType,
         procedureNumber: newest,
+        toMend: sql<number>`(select count(*) from ${ruleFindings} found
+          where found.project_id = ${boards.projectId} and found.state = 'open' and found.weight = 'must'
+            and jsonb_exists(found.boards, ${boards.code}))`.mapWith(Number),
       },
       unitId: units.id,
       serial: units.serial,
@@ -83,12 +92,16 @@ export async function findRackChecks(db: Queryable, scope: InProject) {
 
 export type RackCheck = Awaited<ReturnType<typeof findRackChecks>>[number];
 
-/** How many checks of the units in work fail, and how many wait to be repeated. */
+/** How many checks of the units in work fail or wait to be repeated, and what must be mended in the wiring. */
 export async function countOpenChecks(db: Queryable, scope: InProject) {
   const [row] = await db
     .select({
       failing: sql<number>`count(*) filter (where ${checks.state} = 'failed')`.mapWith(Number),
       doubtful: sql<number>`count(*) filter (where ${checks.state} in ('doubtful', 'reopened'))`.mapWith(Number),
+      toMend: sql<number>`(select count(*) from ${ruleFindings} found
+        where found.project_id = ${scope.projectId} and found.state = 'open' and found.weight = 'must')`.mapWith(
+        Number,
+      ),
     })
     .from(checks)
     .innerJoin(units, and(eq(units.id, checks.unitId), isNull(units.archivedAt)))
@@ -99,7 +112,7 @@ export async function countOpenChecks(db: Queryable, scope: InProject) {
         inArray(checks.state, ["failed", "doubtful", "reopened"]),
       ),
     );
-  return row ?? { failing: 0, doubtful: 0 };
+  return row ?? { failing: 0, doubtful: 0, toMend: 0 };
 }
 
 /** What happened since the viewer's last digest, or since Sunday 00:00 in the project's zone. */

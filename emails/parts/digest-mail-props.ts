@@ -44,6 +44,16 @@ export type EntryLine = {
   pictures: DigestPicture[];
 };
 
+/** Open findings of the rule check over the whole machine. */
+export type FindingsLine = {
+  /** "3 findings are open in the wiring: 2 must be mended, 1 should be. 1 is new." */
+  sentence: string;
+  link: string;
+  /** Titles of what is new since the last mail. */
+  fresh: string[];
+  more: number;
+};
+
 export type DigestMailProps = {
   projectName: string;
   projectLink: string;
@@ -66,6 +76,8 @@ export type DigestMailProps = {
   also: { sentences: { text: string; link: string }[]; more: number };
   open: DigestList;
   next: DigestList;
+  /** Null when nothing is open. */
+  wiring: FindingsLine | null;
   settingsLink: string;
   /** A page with a button; the mail reader's own button uses the header. */
   unsubscribeLink: string;

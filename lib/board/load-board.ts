@@ -93,6 +93,8 @@ export async function loadBoard(scope: ProjectScope, code: string): Promise<Boar
     kind,
     connectorType,
     procedureNumber: issued?.number ?? null,
+    // The page of a board shows its units' checks; its wiring has a place of its own.
+    toMend: 0,
   };
   return {
     ...{ id, code: board.code, name, summary, kind, connectorType, connectorReference, version },

@@ -6,6 +6,7 @@ import {
   findProjectToMail,
   type DigestEvent,
 } from "@/db/queries/digest-week";
+import { findOpenFindings } from "@/db/queries/findings";
 import { findBoardsWithUnits, findRackChecks, findSlotsOfProject } from "@/db/queries/rack";
 
 /** More than any week has; a script that records without end does not fill the worker's memory. */
@@ -21,7 +22,7 @@ export type EntryRow = Awaited<ReturnType<typeof findEntriesBetween>>[number];
 export async function loadProjectWeek(projectId: string, span: Span) {
   const db = database();
   const scope = { projectId };
-  const [project, slots, boards, checks, events, entries, failures] = await Promise.all([
+  const [project, slots, boards, checks, events, entries, failures, findings] = await Promise.all([
     findProjectToMail(db, scope),
     findSlotsOfProject(db, scope),
     findBoardsWithUnits(db, scope),
@@ -29,9 +30,10 @@ export async function loadProjectWeek(projectId: string, span: Span) {
     findEventsBetween(db, scope, span, MOST_EVENTS),
     findEntriesBetween(db, scope, span),
     findOpenFailures(db, scope),
+    findOpenFindings(db, scope),
   ]);
   if (!project) return undefined;
-  return { project, slots, boards, checks, events, entries, failures };
+  return { project, slots, boards, checks, events, entries, failures, findings };
 }
 
 export type ProjectWeek = NonNullable<Awaited<ReturnType<typeof loadProjectWeek>>>;

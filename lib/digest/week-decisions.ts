@@ -45,6 +45,8 @@ const ALSO = [
   "traveler.started",
   "traveler.moved",
   "member.joined",
+  "finding.accepted",
+  "finding.acceptance-withdrawn",
 ];
 
 /** Other steps of the project, each as the log's own sentence. */

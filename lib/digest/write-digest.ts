@@ -10,6 +10,7 @@ import { nextItems, openItems, standingSentence } from "./standing-lists";
 import { summarise } from "./summary";
 import { attemptsOf, cut, failedItems, passedLines } from "./week-attempts";
 import { alsoSentences, decidedItems } from "./week-decisions";
+import { wiringLines } from "./wiring-lines";
 
 const MOST_ENTRIES = 4;
 const MOST_PICTURES = 3;
@@ -25,6 +26,7 @@ export async function writeDigest(week: ProjectWeek, span: Span, zone: string, p
   const attempts = attemptsOf(events);
   const decided = decidedItems(events, reader);
   const also = alsoSentences(events, reader);
+  const wiring = wiringLines(week, span);
   const written = await entryLines(entries, reader, pictures);
   const home = `/projects/${encodeURIComponent(slug)}`;
   return {
@@ -32,7 +34,7 @@ export async function writeDigest(week: ProjectWeek, span: Span, zone: string, p
     projectLink: appLink(`${home}/rack`),
     logLink: appLink(`${home}/log`),
     period: `${writeDay(span.since, zone)} to ${writeDay(span.until, zone)}`,
-    ...summarise({ attempts, events }, written.total, also.sentences.length),
+    ...summarise({ attempts, events }, written.total, also.sentences.length + (wiring?.fresh.length ?? 0)),
     standing: standingSentence(week),
     boards: boardLines(week),
     passed: passedLines(attempts, reader),
@@ -42,6 +44,7 @@ export async function writeDigest(week: ProjectWeek, span: Span, zone: string, p
     also,
     open: openItems(week, zone),
     next: nextItems(week),
+    wiring,
     settingsLink: appLink("/settings/digest"),
     inline: written.inline,
   };

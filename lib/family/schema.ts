@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { parseQuantity } from "@/lib/calc/units";
-import { line, optionalLine } from "@/lib/form/text";
+import { line } from "@/lib/form/text";
 import { writeId } from "@/lib/form/write-id";
 import { FIGURE_NAMES, figureOf, writeFigure, type FigureName } from "./figure-list";
 

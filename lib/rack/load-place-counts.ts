@@ -2,9 +2,12 @@ import { database } from "@/db/client";
 import { countOpenChecks } from "@/db/queries/rack";
 import type { ProjectScope } from "@/lib/access/scope";
 
-export type PlaceCounts = { failing: number; doubtful: number };
+export type PlaceCounts = { failing: number; doubtful: number; toMend: number };
 
-/** The figures beside the places in the header. Doubtful includes reopened: both wait to be repeated. */
+/**
+ * The figures beside the places in the header. Doubtful includes reopened: both wait to be repeated. To mend are the
+ * open findings of the wiring that must be mended.
+ */
 export async function loadPlaceCounts(scope: ProjectScope): Promise<PlaceCounts> {
   return countOpenChecks(database(), scope);
 }

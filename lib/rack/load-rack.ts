@@ -68,6 +68,7 @@ export async function loadRack(scope: ProjectScope): Promise<RackView> {
     boards: [...boards.values()],
     next,
     since: sinceView(happened),
+    toMend: project?.toMend ?? 0,
     total: sum((unit) => unit.total),
     holding: sum((unit) => unit.holding),
     failing: sum((unit) => unit.failing),

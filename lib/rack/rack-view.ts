@@ -14,6 +14,8 @@ export type RackBoard = {
   connectorType: string | null;
   /** Number of the newest issued procedure; null while there is none. */
   procedureNumber: number | null;
+  /** Open findings of the wiring that name this board and must be mended. */
+  toMend: number;
 };
 
 export type RackUnit = {
@@ -77,6 +79,8 @@ export type RackView = {
   boards: RackBoard[];
   next: RackStep[];
   since: SinceView;
+  /** Open findings of the wiring that must be mended, each counted once however many boards it names. */
+  toMend: number;
   total: number;
   holding: number;
   failing: number;

@@ -34,6 +34,12 @@ const fullest: DigestMailProps = {
   headline: "8 checks passed",
   summary: "8 checks passed: 7 for the first time, 1 on repeat.",
   standing: "118 of 180 checks hold.",
+  wiring: {
+    sentence: "9 findings are open in the wiring: 6 must be mended, 2 should be, 1 is worth a look. 5 are new.",
+    link: `${HOME}/wiring/findings`,
+    fresh: [LONG, LONG + " again", LONG + " and again", LONG + " once more"],
+    more: 1,
+  },
   isQuiet: false,
   boards: Array.from({ length: 40 }, (_, index) => ({
     serial: `CON-${index}`,
