@@ -9,6 +9,7 @@ import {
   findRails,
   findSignals,
 } from "@/db/queries/machine";
+import { loadUntiedSpares } from "@/lib/board-plan/load-untied-spares";
 import { faceOf } from "@/lib/calc/connector";
 import {
   PIN_ROLES,
@@ -23,9 +24,9 @@ import { matingsOf, placementsOf } from "./placements";
 
 type InProject = { projectId: string };
 
-/** The whole machine as the calculations see it. Eight queries, whatever its size. */
+/** The whole machine as the calculations see it. Fifteen queries, whatever its size. */
 export async function loadMachine(db: Queryable, scope: InProject): Promise<Machine> {
-  const [boards, slots, connectors, pins, signals, rails, own, conditions] = await Promise.all([
+  const [boards, slots, connectors, pins, signals, rails, own, conditions, untied] = await Promise.all([
     findMachineBoards(db, scope),
     findMachineSlots(db, scope),
     findMachineConnectors(db, scope),
@@ -34,6 +35,7 @@ export async function loadMachine(db: Queryable, scope: InProject): Promise<Mach
     findRails(db, scope),
     findOwnFamilies(db, scope),
     findConditions(db, scope),
+    loadUntiedSpares(db, scope),
   ]);
   const byConnector = new Map<string, DesignPin[]>();
   for (const pin of pins) {
@@ -54,7 +56,7 @@ export async function loadMachine(db: Queryable, scope: InProject): Promise<Mach
         const { id, reference } = connector;
         return face ? [{ id, reference, face, pins: byConnector.get(id) ?? [] }] : [];
       }),
-    untiedSpares: [],
+    untiedSpares: untied.get(board.code) ?? [],
   }));
   const { ambientC, logicVolts, logicRail, pinCapacitancePf } = conditions;
   return {
