@@ -96,11 +96,10 @@ async function keepVisit(page, assets) {
   );
 }
 
-/** Puts it last and lets the oldest go. What was kept goes only when the new copy is here whole: the network may drop midway. */
+/** Puts it last and lets the oldest go. The new copy takes the old one's place whole and in one step: the network may drop midway. */
 async function put(cache, key, response, most) {
   const { status, statusText, headers } = response;
   const whole = new Response(await response.arrayBuffer(), { status, statusText, headers });
-  await cache.delete(key);
   await cache.put(key, whole);
   const keys = await cache.keys();
   await Promise.all(keys.slice(0, Math.max(0, keys.length - most)).map((old) => cache.delete(old)));
