@@ -1,11 +1,13 @@
+export { delayWindow, type DelayWindow } from "./delay-window";
+export { highestClock, type ClockInput, type ClockLimit } from "./highest-clock";
 export {
-  type ClockInput,
-  type ClockLimit,
+  type DelayCondition,
   type DelayPath,
-  type DelayProblem,
   type DelayStep,
-  type DelayWindow,
   type Derating,
   type PathDelay,
   type StepDelay,
 } from "./path";
+export { pathDelay } from "./path-delay";
+export { rippleCarrySteps } from "./ripple-carry";
+export { stepOfPart } from "./step-of-part";

@@ -1,3 +1,5 @@
+import type { Family } from "../levels";
+
 /** One kind of part in a chain, so many times. Null: no figure. */
 export type DelayStep = {
   name: string;
@@ -7,36 +9,39 @@ export type DelayStep = {
   maxS: number | null;
 };
 
-/** Load and supply at which a step's figures hold, and at which it works; null: as the data sheet says. */
+/** Supply and load at which a figure holds or a part works. */
+export type DelayCondition = { volts: number; loadPf: number };
+
+/** How the data sheet's conditions and the board's differ; the same for all steps of a path. */
 export type Derating = {
-  technology: "CMOS" | "bipolar";
-  /** The data sheet's, V and pF. */
-  statedVolts: number;
-  statedPf: number;
-  /** What the board has. */
-  volts: number;
-  loadPf: number;
-  /** Resistance of the output while it switches, Ω: about VOL / IOL of the family. */
-  outputOhm: number;
+  family: Family;
+  /** Of the typical delays: often 5 V, 15 pF. */
+  typicalAt: DelayCondition;
+  /** Of the lowest and highest delays: often 4.5 V, 50 pF. */
+  limitsAt: DelayCondition;
+  board: DelayCondition;
 };
 
 export type DelayPath = {
   steps: DelayStep[];
+  /** Null: the figures are taken as they are. */
   derating: Derating | null;
   /**
    * Where a step has no lowest (highest) delay: null leaves the sum open; a number takes this share of the typical one.
-   * Common practice, no source: ¼ for the lowest, 2 for the highest.
+   * Common practice, no source: a quarter for the lowest, twice for the highest.
    */
   unknownMinShare: number | null;
   unknownMaxShare: number | null;
 };
 
-export type StepDelay = DelayStep & {
-  /** For all pieces of the step, derated; null where unknown and no share is given. */
-  sumMinS: number | null;
-  sumTypicalS: number;
-  sumMaxS: number | null;
-  /** True where the figure comes from a share of the typical delay and not from a data sheet. */
+export type StepDelay = {
+  name: string;
+  count: number;
+  /** For all pieces of the step at the board's load and supply; null where unknown and no share is given. */
+  minS: number | null;
+  typicalS: number;
+  maxS: number | null;
+  /** True where the figure is a share of the typical delay and not a data sheet's. */
   minAssumed: boolean;
   maxAssumed: boolean;
 };
@@ -47,33 +52,8 @@ export type PathDelay = {
   typicalS: number;
   /** Every part at its slowest at once. */
   worstCaseS: number | null;
-  /** Parts vary independently: typical + √Σ(max − typical)². Not a bound. */
+  /** Parts vary independently: typical + √Σ(max − typical)². Likely, not a bound. */
   rootSumSquareS: number | null;
   /** What was derated, assumed or left open. */
   notes: string[];
-};
-
-export type DelayProblem = { row: string; message: string };
-
-/** What a capture of the delay may show, s. Null: open on this side. */
-export type DelayWindow = { lowerS: number | null; expectedS: number; upperS: number | null; rule: string };
-
-export type ClockInput = {
-  /** The path between two registers. */
-  path: PathDelay;
-  clockToOutputMaxS: number;
-  setupS: number;
-  /** By how much the receiving clock may come early. */
-  skewS: number;
-  /** For the hold check; null: not asked for or not known. */
-  hold: { clockToOutputMinS: number | null; holdS: number } | null;
-};
-
-export type ClockLimit = {
-  /** The sum that the period must not fall below, s; null while the path has no highest delay. */
-  periodS: number | null;
-  highestHz: number | null;
-  /** Time by which the data outlast the hold time, s; null: not known. Below zero: they change too early. */
-  holdSlackS: number | null;
-  sentences: string[];
 };
