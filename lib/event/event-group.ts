@@ -52,6 +52,8 @@ const FAMILIES: Record<string, Listed> = {
   block: "plan",
   part: "plan",
   plan: "plan",
+  rail: "plan",
+  power: "plan",
   delay: "plan",
   member: "people",
   invitation: "people",

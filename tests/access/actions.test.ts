@@ -11,6 +11,8 @@ import { accountRows } from "./action-rows/account";
 import { boardRows } from "./action-rows/boards";
 import { evidenceRows } from "./action-rows/evidence";
 import { peopleRows } from "./action-rows/people";
+import { pinMapRows } from "./action-rows/pin-maps";
+import { powerRows } from "./action-rows/power";
 import { procedureRows } from "./action-rows/procedures";
 import type { ProjectRow, Row, Rows } from "./action-rows/row";
 import { travelerRows } from "./action-rows/travelers";
@@ -26,6 +28,8 @@ const table: Record<string, Rows> = {
   ...boardRows,
   ...evidenceRows,
   ...peopleRows,
+  ...pinMapRows,
+  ...powerRows,
   ...procedureRows,
   ...travelerRows,
 };
