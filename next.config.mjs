@@ -5,6 +5,8 @@ const config = {
   poweredByHeader: false,
   // The development server would write what actions are called with into its log: passwords too.
   logging: { serverFunctions: false },
+  // A pin map of 10,000 rows with long notes is taken in one change.
+  experimental: { serverActions: { bodySizeLimit: "5mb" } },
   // Native code and worker threads that a bundler would break.
   serverExternalPackages: ["sharp", "@node-rs/argon2", "graphile-worker", "pino", "rate-limiter-flexible"],
 };

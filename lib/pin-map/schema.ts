@@ -37,6 +37,17 @@ export const savePinMapInput = z.object({
 });
 export type SavePinMapInput = z.output<typeof savePinMapInput>;
 
+/** Several connectors at once, from a file: all of them or none. */
+export const takePinMapsInput = z.object({
+  project: z.string(),
+  writeId,
+  connectors: z
+    .array(savePinMapInput.pick({ connectorId: true, version: true, pins: true }))
+    .min(1, "There is nothing to take.")
+    .max(500, "At most 500 connectors are taken at once."),
+});
+export type TakePinMapsInput = z.output<typeof takePinMapsInput>;
+
 export const copyPinMapInput = z.object({
   project: z.string(),
   writeId,

@@ -42,6 +42,11 @@ export const routes: Record<string, RouteRow> = {
     // The row is there, its object is not: the store is asked, so the permission was granted.
     status: 410,
   },
+  "GET app/api/projects/[project]/pin-map/route.ts": {
+    permission: "project.see",
+    ask: (place) => ({ path: of(place, "/pin-map") }),
+    status: 200,
+  },
   "GET app/api/projects/[project]/search/route.ts": {
     permission: "project.see",
     ask: (place) => ({ path: of(place, "/search?q=clock") }),
