@@ -28,7 +28,11 @@ type CountedRow = { count: string };
 type AlsoCheck<Row> = (rows: readonly Row[], say: (index: number, field: string, message: string) => void) => void;
 
 /** Rows with a count each; what is wrong is said beside the row and names it: "Row 2: 1.5 is no whole number." */
-export const countedRows = <Row extends CountedRow>(row: z.ZodType<Row>, most: number, alsoCheck?: AlsoCheck<Row>) =>
+export const countedRows = <Row extends CountedRow>(
+  row: z.ZodType<Row, Row>,
+  most: number,
+  alsoCheck?: AlsoCheck<Row>,
+) =>
   z
     .array(row)
     .max(most, `At most ${most} rows fit here.`)

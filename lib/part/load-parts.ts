@@ -3,10 +3,9 @@ import { findConditions } from "@/db/queries/machine";
 import { findParts } from "@/db/queries/parts";
 import type { ProjectScope } from "@/lib/access/scope";
 import type { LogicPart } from "@/lib/calc/logic-parts";
-import { formatQuantity } from "@/lib/calc/units";
 import { logicShape } from "./own-logic";
-import { writeGateLines, writePins } from "./pin-lines";
 import { priceText } from "./price";
+import { typeLogic } from "./type-logic";
 import type { TypedLogic } from "./typed-logic";
 
 export type PartLine = {
@@ -35,40 +34,9 @@ export async function loadParts(scope: ProjectScope): Promise<PartsView> {
         price: priceText(priceCents),
         archived: archivedAt !== null,
         logic: read,
-        typedLogic: read && typed(read),
+        typedLogic: read && typeLogic(read),
       };
     },
   );
   return { parts, currency };
-}
-
-const write = (value: number | null, unit: "A" | "F" | "s") =>
-  value === null ? "" : formatQuantity({ value, unit }, {}).replace("\u202f", " ");
-
-function typed(part: LogicPart): TypedLogic {
-  const { name, gateFunction, output, source } = part;
-  return {
-    ...{ name, gateFunction, output, source },
-    pins: String(part.pins),
-    gatesPerPackage: String(part.gatesPerPackage),
-    inputsPerGate: String(part.inputsPerGate),
-    outputsPerGate: String(part.outputsPerGate),
-    bitsPerGate: String(part.bitsPerGate),
-    gates: writeGateLines(part.pinout),
-    sharedInputs: writePins(part.sharedInputs),
-    sharedOutputs: writePins(part.sharedOutputs),
-    unconnectedPins: writePins(part.unconnectedPins),
-    powerPins: writePins(part.powerPins),
-    groundPins: writePins(part.groundPins),
-    inputPf: write(part.inputPf / 1e12, "F"),
-    figures: Object.entries(part.perFamily).map(([family, figures]) => ({
-      family,
-      staticA: write(figures.staticA, "A"),
-      cpdPf: write(figures.cpdPf === null ? null : figures.cpdPf / 1e12, "F"),
-      cpdPer: figures.cpdPer,
-      tpdTypicalS: write(figures.tpdTypicalS, "s"),
-      tpdMaxS: write(figures.tpdMaxS, "s"),
-      note: figures.note,
-    })),
-  };
 }

@@ -1,0 +1,156 @@
+"use client";
+
+import Link from "next/link";
+import { useAct } from "@/components/board/use-act";
+import { Page } from "@/components/shell/Page";
+import { Button } from "@/components/ui/Button";
+import { ButtonLink } from "@/components/ui/ButtonLink";
+import { EmptyState } from "@/components/ui/EmptyState";
+import { Panel } from "@/components/ui/Panel";
+import { Table } from "@/components/ui/Table";
+import type { TableColumn } from "@/components/ui/table-column";
+import { counted } from "@/components/workshop/counted";
+import { Disclosure } from "@/components/workshop/Disclosure";
+import type { BlockLine } from "@/lib/block/load-blocks";
+import { BlockDrawing } from "./BlockDrawing";
+import type { BlockActs } from "./parts-acts";
+
+type Props = { project: string; blocks: readonly BlockLine[]; canEdit: boolean; restore: BlockActs["restore"] };
+
+export function BlocksPlace({ project, blocks, canEdit, restore }: Props) {
+  const { act } = useAct();
+  const inWork = blocks.filter((block) => !block.archived);
+  const archived = blocks.filter((block) => block.archived);
+  const add = (
+    <ButtonLink kind="primary" href={`/projects/${project}/parts/blocks/new`}>
+      Add a block
+    </ButtonLink>
+  );
+  return (
+    <Page
+      title="Blocks"
+      lede="Sub-circuits that are used again and again. A block counts its gates and the blocks inside it; boards count blocks."
+      actions={canEdit && inWork.length > 0 && add}
+    >
+      <div className="flex flex-col gap-6">
+        {inWork.length === 0 ? (
+          <EmptyState title="No blocks yet" drawing={<BlockDrawing />} action={canEdit && add}>
+            <p>
+              Begin with the smallest thing you build more than once, such as a full adder: two XOR, two AND, one OR.
+              Then put four of them into an adder. Boards that use blocks get their packages, spare gates and capacitors
+              counted.
+            </p>
+          </EmptyState>
+        ) : (
+          <Panel>
+            <Table<BlockLine>
+              label="Blocks"
+              columns={columnsFor(project)}
+              rows={inWork}
+              rowKey={(block) => block.id}
+              {...(inWork.length > 8 ? { search: "Find a block" } : {})}
+              phone={(block) => <PhoneBlock project={project} block={block} />}
+              empty={null}
+            />
+          </Panel>
+        )}
+        {archived.length > 0 && (
+          <Disclosure summary={counted(archived.length, "archived block")}>
+            <ul className="flex flex-col gap-2">
+              {archived.map(({ id, name }) => (
+                <li key={id} className="flex flex-wrap items-center gap-x-4 gap-y-1">
+                  <Link href={`/projects/${project}/parts/blocks/${id}`} className="link">
+                    {name}
+                  </Link>
+                  {canEdit && (
+                    <Button
+                      size="sm"
+                      aria-label={`Restore ${name}`}
+                      onPress={() =>
+                        void act(
+                          () => restore({ project, writeId: crypto.randomUUID(), block: id }),
+                          () => `${name} is back.`,
+                        )
+                      }
+                    >
+                      Restore
+                    </Button>
+                  )}
+                </li>
+              ))}
+            </ul>
+          </Disclosure>
+        )}
+      </div>
+    </Page>
+  );
+}
+
+const gateCount = ({ allGates }: BlockLine) => allGates.reduce((sum, { count }) => sum + count, 0);
+
+const columnsFor = (project: string): TableColumn<BlockLine>[] => [
+  {
+    id: "name",
+    header: "Block",
+    isRowHeader: true,
+    sortBy: (block) => block.name,
+    cell: (block) => (
+      <span className="flex flex-col">
+        <BlockLink project={project} block={block} />
+        {block.summary && <span className="line-clamp-1 text-sm font-normal text-ink-soft">{block.summary}</span>}
+      </span>
+    ),
+  },
+  {
+    id: "holds",
+    header: "Holds",
+    searchIn: (block) => contentsText(block),
+    cell: (block) => <span className="text-sm text-ink-soft">{contentsText(block) || "nothing yet"}</span>,
+  },
+  { id: "gates", header: "Gates in all", align: "end", mono: true, sortBy: gateCount, cell: gateCount },
+  {
+    id: "boards",
+    header: "On boards",
+    searchIn: (block) => block.boards.map(({ code }) => code).join(" "),
+    cell: (block) => <Boards project={project} block={block} />,
+  },
+];
+
+const contentsText = ({ gates, children }: BlockLine) =>
+  [...gates, ...children].map(({ count, name }) => `${count} × ${name}`).join(", ");
+
+const BlockLink = ({ project, block }: { project: string; block: BlockLine }) => (
+  <Link href={`/projects/${project}/parts/blocks/${block.id}`} className="link w-fit">
+    {block.name}
+  </Link>
+);
+
+function Boards({ project, block }: { project: string; block: BlockLine }) {
+  if (block.boards.length === 0) return <span className="text-sm text-ink-soft">none</span>;
+  return (
+    <span className="flex flex-wrap gap-x-3 gap-y-0.5 text-sm">
+      {block.boards.map(({ code, count }) => (
+        <Link
+          key={code}
+          href={`/projects/${project}/parts/boards/${code}`}
+          className="whitespace-nowrap hover:text-copper"
+        >
+          <span className="mono">{code}</span> <span className="text-ink-soft">× {count}</span>
+        </Link>
+      ))}
+    </span>
+  );
+}
+
+function PhoneBlock({ project, block }: { project: string; block: BlockLine }) {
+  return (
+    <div className="flex flex-col gap-1 border-b border-rule pb-2.5">
+      <span className="flex items-baseline justify-between gap-3">
+        <BlockLink project={project} block={block} />
+        <span className="mono shrink-0 text-sm">{counted(gateCount(block), "gate")}</span>
+      </span>
+      <p className="text-sm text-ink-soft">{contentsText(block) || "nothing yet"}</p>
+      <Boards project={project} block={block} />
+    </div>
+  );
+}

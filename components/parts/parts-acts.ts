@@ -1,0 +1,19 @@
+import type { z } from "zod";
+import type { Reply } from "@/components/ui/form/reply";
+import type { changePartInput, savePartInput } from "@/lib/part/schema";
+import type { changeBlockInput, saveBlockInput } from "@/lib/block/schema";
+
+type Act<Schema extends z.ZodType, Value> = (input: z.input<Schema>) => Promise<Reply<Value>>;
+
+/** What the pages of Parts can do; the pages hand in their server actions. */
+export type BlockActs = {
+  save: Act<typeof saveBlockInput, { id: string; version: number; outdated: string[]; tiesReopened: string[] }>;
+  archive: Act<typeof changeBlockInput, { name: string }>;
+  restore: Act<typeof changeBlockInput, { name: string }>;
+};
+
+export type PartActs = {
+  save: Act<typeof savePartInput, { number: string; version: number }>;
+  archive: Act<typeof changePartInput, { number: string }>;
+  restore: Act<typeof changePartInput, { number: string }>;
+};
