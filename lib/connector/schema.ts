@@ -22,7 +22,7 @@ const fields = {
   reference,
   type: z
     .string({ message: "Choose the connector's face." })
-    .refine((id) => id === "grid" || isConnectorId(id), "Choose a face from the list, or one of your own."),
+    .refine((id): boolean => id === "grid" || isConnectorId(id), "Choose a face from the list, or one of your own."),
   /** With type "grid" only. */
   grid: grid.nullable(),
   /** On the backplane: the slot that it makes. */

@@ -29,6 +29,8 @@ export async function copyPinMap(
     const { connector: source, board } = await lockWithBoard(tx, scope, input.connectorId);
     const { id, version, reference } = source;
     const { code } = board;
+    if (board.kind !== "backplane")
+      reject("invalid", `${code} is a card. Pin maps are copied between slots of the backplane.`);
     if (version !== input.version) await rejectStale(tx, scope, { id, version, name: `${code} ${reference}` });
     const rows = (await findPinsOf(tx, id)).map(({ id: _id, connectorId: _own, ...row }) => row);
     const to: string[] = [];

@@ -1,5 +1,6 @@
 import { PIN_ROLES, type PinRole } from "@/lib/calc/interconnect";
 import { formatQuantity, parseQuantity } from "@/lib/calc/units";
+import { busNames } from "./bus-range";
 import type { PinColumn } from "./pin-columns";
 import { readRole } from "./pin-role";
 
@@ -33,6 +34,12 @@ function readSignal(text: string): ReadCell<string> {
   const strange = [...text].find((letter) => !SIGNAL_CHARACTER.test(letter));
   if (strange !== undefined) {
     return wrong(`“${strange}” cannot stand in a signal. Use letters, digits and + - _ / . # ~ ! * & $ : or brackets.`);
+  }
+  const bus = busNames(text);
+  if (bus && bus.length > 1) {
+    return wrong(
+      `${text} names ${bus.length} signals, and a pin carries one. Type it over ${bus.length} selected pins.`,
+    );
   }
   return plainLine(text, MOST_SIGNAL);
 }
