@@ -49,9 +49,9 @@ describe("a contact", () => {
     );
   });
 
-  it("holds exactly its limit: 2.8 A on two contacts at 50 °C", () => {
-    expect(judgeContacts({ currentA: 2.8, contacts: 2, contactOhm: 0.02 }, 50)).toMatchObject({
-      value: { holds: true, contactsNeeded: 2 },
+  it("holds exactly its limit: 4.2 A on three contacts at 50 °C", () => {
+    expect(judgeContacts({ currentA: 4.2, contacts: 3, contactOhm: 0.02 }, 50)).toMatchObject({
+      value: { holds: true, contactsNeeded: 3 },
     });
   });
 

@@ -219,6 +219,12 @@ describe("the load of an output", () => {
     );
   });
 
+  it("is counted in whole nanoamperes: 0.3 mA drives three inputs of 0.1 mA, though the computer divides to 2.9999", () => {
+    expect(0.3e-3 / 0.1e-3).toBeLessThan(3);
+    expect(fanOut({ ...family("LS"), iohA: 0.3e-3 }, { ...family("LS"), iihA: 0.1e-3 }).high).toBe(3);
+    expect(fanOut({ ...family("LS"), iolA: 2.4e-3 }, family("LS")).low).toBe(6);
+  });
+
   it("has no limit where inputs take no current", () => {
     const ideal = { ...family("HC"), name: "ideal", iihA: 0, iilA: 0 };
     expect(fanOut(family("HC"), ideal)).toMatchObject({ loads: null, binds: "nothing" });
@@ -268,6 +274,14 @@ describe("the capacitance of a net", () => {
     expect(found.ok && plain(found.value.sentence)).toBe(
       "An HC output with 150 pF has an edge of about 21 ns and a gate delay of about 11 ns.",
     );
+  });
+
+  it("is taken as 15 pF at least, since below that the edge is the output's own", () => {
+    expect(loadedEdge(family("HC"), 3)).toMatchObject({ ok: true, value: { edgeS: expect.closeTo(2.1e-9, 15) } });
+    const lightest = loadedEdge(family("HC"), 15);
+    const bit = loadedEdge(family("HC"), 20);
+    expect(lightest.ok && lightest.value.edgeS).toBeCloseTo(2.1e-9, 15);
+    expect(bit.ok && bit.value.edgeS).toBeCloseTo(2.8e-9, 15);
   });
 
   it("never makes an edge quicker or a gate earlier by growing", () => {
