@@ -1,7 +1,7 @@
 import { and, asc, eq, sql } from "drizzle-orm";
 import type { Queryable } from "@/db/client";
 import { users } from "@/db/schema/people";
-import { ruleFindings } from "@/db/schema/wiring";
+import { connectors, pins, ruleFindings } from "@/db/schema/wiring";
 
 type InProject = { projectId: string };
 
@@ -29,6 +29,17 @@ export async function findFindings(db: Queryable, scope: InProject) {
       sql`${ruleFindings.finding} ->> 'title'`,
       asc(ruleFindings.key),
     );
+}
+
+/** Without a single pin the rule check has nothing to look at. */
+export async function hasAnyPin(db: Queryable, scope: InProject): Promise<boolean> {
+  const rows = await db
+    .select({ id: pins.id })
+    .from(pins)
+    .innerJoin(connectors, eq(connectors.id, pins.connectorId))
+    .where(eq(connectors.projectId, scope.projectId))
+    .limit(1);
+  return rows.length > 0;
 }
 
 /** The row stays locked until the transaction ends, so that a run of the rule check waits for the decision. */

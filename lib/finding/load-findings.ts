@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { database } from "@/db/client";
-import { findFindings } from "@/db/queries/findings";
+import { findFindings, hasAnyPin } from "@/db/queries/findings";
 import type { ProjectScope } from "@/lib/access/scope";
 import type { PinAt, Weight } from "@/lib/calc/interconnect";
 
@@ -40,10 +40,11 @@ const stored = z.object({
   ),
 });
 
-/** Every finding of the last run of the rule check, the weightiest first. One query. */
-export async function loadFindings(scope: ProjectScope): Promise<FindingView[]> {
-  const rows = await findFindings(database(), scope);
-  return rows.map((row) => ({
+/** Every finding of the last run of the rule check, the weightiest first, and whether there was anything to check. */
+export async function loadFindings(scope: ProjectScope): Promise<{ findings: FindingView[]; hasPins: boolean }> {
+  const db = database();
+  const [rows, hasPins] = await Promise.all([findFindings(db, scope), hasAnyPin(db, scope)]);
+  const findings = rows.map((row) => ({
     ...stored.parse(row.finding),
     key: row.key,
     rule: row.rule,
@@ -54,4 +55,5 @@ export async function loadFindings(scope: ProjectScope): Promise<FindingView[]> 
         ? { by: row.acceptedBy ?? "Somebody", at: row.acceptedAt.toISOString(), reason: row.reason }
         : null,
   }));
+  return { findings, hasPins };
 }
