@@ -1,4 +1,8 @@
+export { applyEdits } from "./apply-edits";
+export { assembleNets } from "./assemble-nets";
+export { checkMachine, checkRules, type MachineCheck } from "./check";
 export { type Edit, type Finding, type PinAt, type Weight } from "./finding";
+export { netsByPin, pinKey } from "./look-up-net";
 export {
   PIN_ROLES,
   SIGNAL_CLASSES,
@@ -16,3 +20,4 @@ export {
   type SignalClass,
   type SignalFacts,
 } from "./machine";
+export { type Net, type NetPin } from "./net";
