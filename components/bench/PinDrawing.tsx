@@ -1,5 +1,5 @@
 import { ConnectorFace } from "@/components/ui/glyphs/ConnectorFace";
-import { findConnector, findPin, pinAt } from "@/lib/calc/connector";
+import { findConnector, findPin } from "@/lib/calc/connector";
 
 export type BoardFace = { connectorType: string | null; connectorReference: string };
 
@@ -14,9 +14,7 @@ export function PinDrawing({ pins, board }: { pins: readonly string[]; board: Bo
   return (
     <figure className="border-rule grid-paper rounded-md border px-3 py-2">
       <ConnectorFace
-        rows={connector.rows.map((row) => row.name)}
-        positions={connector.positions}
-        pinName={(row, position) => pinAt(connector, row, position)}
+        face={connector}
         lit={new Set(lit.map((pin) => pin.name))}
         label={`Connector ${board.connectorReference}`}
         className="w-full"

@@ -4,7 +4,7 @@ import { useState, type KeyboardEvent } from "react";
 import { ConnectorFace } from "@/components/ui/glyphs/ConnectorFace";
 import { Panel } from "@/components/ui/Panel";
 import type { BoardView } from "@/lib/board/load-board";
-import { findConnector, pinAt } from "@/lib/calc/connector";
+import { findConnector } from "@/lib/calc/connector";
 
 type Props = { board: Pick<BoardView, "connectorType" | "connectorReference" | "covered" | "issued"> };
 
@@ -40,11 +40,9 @@ export function ConnectorPanel({ board }: Props) {
           className="grid-paper w-fit max-w-full rounded-md border border-rule px-3 py-2"
         >
           <ConnectorFace
-            rows={connector.rows.map((row) => row.name)}
-            positions={connector.positions}
-            pinName={(row, position) => pinAt(connector, row, position)}
+            face={connector}
             lit={new Set(covered.map(({ pin }) => pin))}
-            {...(one ? { marked: one.pin } : {})}
+            marked={one?.pin}
             onPin={setShown}
             label={`Connector ${reference}`}
           />

@@ -1,46 +1,87 @@
+import clsx from "clsx";
+import type { PinRole } from "@/lib/calc/interconnect";
+import { patternId, PIN_LOOKS } from "./pin-look";
+
 type PinProps = {
   x: number;
   y: number;
-  /** The pitch: how much room a pin has to itself. */
+  /** Distance to the nearest pin: how much room a pin has to itself. */
   room: number;
+  isLying: boolean;
   isLit: boolean;
   isMarked: boolean;
-  isLying: boolean;
-  onPoint?: () => void;
+  /** Fills the pin by what it does; without one it is bare. */
+  role?: PinRole | undefined;
+  /** Under which the drawing defined its patterns. */
+  patterns: string;
+  onPoint?: (() => void) | undefined;
+  onPick?: (() => void) | undefined;
 };
 
-export function ConnectorPin({ x, y, room, isLit, isMarked, isLying, onPoint }: PinProps) {
-  const [width, height] = isLying ? [5, 7] : [7, 5];
-  if (!isLit) {
-    return (
-      <rect
-        x={x - width / 2}
-        y={y - height / 2}
-        width={width}
-        height={height}
-        rx="0.75"
-        className="fill-sheet stroke-edge"
-        strokeWidth="0.75"
-      />
-    );
-  }
-  const ring = isMarked ? 3.5 : 2;
+export function ConnectorPin({ x, y, room, isLying, isLit, isMarked, role, patterns, onPoint, onPick }: PinProps) {
+  const [width, height] = isLying ? [room * 0.6, room * 0.8] : [room * 0.8, room * 0.6];
+  const box = (more: number) => ({
+    x: x - width / 2 - more,
+    y: y - height / 2 - more,
+    width: width + 2 * more,
+    height: height + 2 * more,
+    rx: room * 0.08 + more,
+  });
+  const isBare = role === undefined;
   return (
-    <g className="fill-copper stroke-copper" onPointerEnter={onPoint} onPointerDown={onPoint}>
-      <rect x={x - width / 2 - 0.5} y={y - height / 2 - 0.5} width={width + 1} height={height + 1} rx="1" />
-      <rect
-        x={x - width / 2 - ring}
-        y={y - height / 2 - ring}
-        width={width + 2 * ring}
-        height={height + 2 * ring}
-        rx={ring}
-        fill="none"
-        strokeWidth={isMarked ? 1.75 : 0.75}
-      />
+    <g onPointerEnter={onPoint} onPointerDown={onPick ?? onPoint} className={onPick && "cursor-pointer"}>
+      {isMarked && <rect {...box(room * 0.17)} className="fill-copper-ground" />}
+      {isBare ? (
+        <rect
+          {...box(isLit ? room * 0.04 : 0)}
+          className={isLit ? "fill-copper stroke-copper" : "fill-sheet stroke-edge"}
+          strokeWidth={room * 0.07}
+        />
+      ) : (
+        <RolePin role={role} box={box(0)} at={{ x, y, room }} patterns={patterns} />
+      )}
+      {(isMarked || (isLit && !isBare)) && (
+        <rect
+          {...box(room * (isMarked ? 0.17 : 0.13))}
+          fill="none"
+          className="stroke-copper"
+          strokeWidth={room * (isMarked ? 0.17 : 0.09)}
+        />
+      )}
       {/* The whole pitch is sensitive: a pin is small under a finger. */}
-      {onPoint && (
+      {(onPoint ?? onPick) && (
         <rect x={x - room / 2} y={y - room / 2} width={room} height={room} fill="transparent" stroke="none" />
       )}
+    </g>
+  );
+}
+
+type Box = { x: number; y: number; width: number; height: number; rx: number };
+type RolePinProps = { role: PinRole; box: Box; at: { x: number; y: number; room: number }; patterns: string };
+
+function RolePin({ role, box, at, patterns }: RolePinProps) {
+  const { letter, hue, isSolid, pattern } = PIN_LOOKS[role];
+  return (
+    <g className={hue}>
+      <rect
+        {...box}
+        className={isSolid ? "fill-current stroke-current" : "fill-raised stroke-current"}
+        strokeWidth={at.room * 0.06}
+      />
+      {pattern !== undefined && <rect {...box} fill={`url(#${patternId(patterns, role)})`} />}
+      <text
+        x={at.x}
+        y={at.y + at.room * 0.19}
+        textAnchor="middle"
+        fontSize={at.room * 0.54}
+        className={clsx("mono font-semibold", isSolid ? "fill-paper" : "fill-ink stroke-raised")}
+        strokeWidth={at.room * 0.16}
+        strokeLinejoin="round"
+        paintOrder="stroke"
+        style={{ fontSizeAdjust: "none" }}
+      >
+        {letter}
+      </text>
     </g>
   );
 }
