@@ -1,5 +1,9 @@
-export { type BoardPower, type CurrentWindow, type DrawLine, type PowerProblem, type RailDraw } from "./budget";
+export { backplaneRail } from "./backplane-drop";
+export { boardPower } from "./board-power";
+export { type BoardPower, type DrawLine, type RailDraw } from "./budget";
+export { currentWindows, type CurrentWindow } from "./current-window";
 export {
+  type BoardPowerInput,
   type FixedItem,
   type LedItem,
   type PackageItem,
@@ -15,6 +19,11 @@ export {
   type ContactLoad,
   type MachinePower,
   type MachinePowerInput,
+  type MachineRail,
+  type PoweredPlacement,
   type SlotDrop,
   type SupplyMargin,
 } from "./machine-budget";
+export { machinePower } from "./machine-power";
+export { packageItem, type PackagePlan } from "./package-item";
+export { switchingPower, ttlInputCurrent, type Switching } from "./switching-power";

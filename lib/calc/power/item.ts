@@ -14,11 +14,11 @@ export type PackageItem = {
   /** Of one package at rest. Typical is what flows without a clock. */
   staticA: Spread | null;
   cpdPf: number | null;
-  /** Gates or bits of one package that switch; 1 where Cpd is stated per package. */
+  /** Gates or bits of one package that switch, on average; 1 where Cpd is stated per package. */
   switching: number;
   /** How often such an input changes to and fro. */
   inputHz: Spread;
-  /** Outputs of one package that switch, each into loadPf, each at outputHz (half of the input's for a divide by two). */
+  /** Outputs of one package that switch, on average, each into loadPf, each at outputHz (half of the input's for a divide by two). */
   outputs: number;
   outputHz: Spread;
   loadPf: number;
@@ -77,11 +77,21 @@ export type FixedItem = {
 
 export type PowerItem = PackageItem | LedItem | PullUpItem | RegulatorItem | FixedItem;
 
-/** Current of the whole board from a rail, typed in or measured; stands instead of the computed one. */
+/** Current from a rail, typed in or measured. */
 export type TypedDraw = { rail: string; typicalA: number; worstA: number };
 
 export type RailSupply = {
   name: string;
   volts: number;
   tolerancePercent: number;
+};
+
+export type BoardPowerInput = {
+  items: PowerItem[];
+  /** The machine's rails; those that regulators of the board make need not be among them. */
+  rails: RailSupply[];
+  /** For the whole board from a rail: stands instead of the computed sum, which is shown beside it. */
+  typed: TypedDraw[];
+  /** What other boards take from rails that this board makes. */
+  elsewhere: TypedDraw[];
 };

@@ -1,42 +1,43 @@
-import { type Spread } from "./item";
+import { type RailSupply, type Spread } from "./item";
 
-export type Contacts = { supply: number; ground: number };
-
-export type MachinePowerInput = {
-  rails: {
-    name: string;
-    volts: number;
-    tolerancePercent: number;
-    /** What the supply gives at most, A; null while nobody knows. */
-    capacityA: number | null;
-  }[];
-  placements: {
-    id: string;
-    label: string;
-    board: string;
-    slot: number | null;
-    draws: { rail: string; typicalA: number; worstA: number }[];
-    heatW: Spread | null;
-    /** Contacts of the board for each rail and for ground. */
-    contacts: { rail: string; count: number }[];
-    groundContacts: number;
-  }[];
-  /** Of the air at the connectors, °C. */
-  ambientC: number;
-  /** Along each rail, from the source outwards; see `backplaneDrop`. Rails that are missing are not computed. */
-  backplane: BackplaneRail[];
+export type PoweredPlacement = {
+  id: string;
+  label: string;
+  board: string;
+  slot: number | null;
+  /** From rails that come to it through its connector; see `boardPower`. */
+  draws: { rail: string; typicalA: number; worstA: number }[];
+  heatW: Spread | null;
+  /** Contacts of its connectors by rail, and for ground; null: the pin map is not known. */
+  contacts: { rails: { rail: string; count: number }[]; ground: number } | null;
 };
 
-/** One rail of the backplane as a line from its source. */
+export type MachineRail = RailSupply & {
+  /** What the supply gives at most, A; null while nobody knows. */
+  capacityA: number | null;
+  /** The placement that feeds the rail into the machine; null: wired to the backplane itself. */
+  sourcePlacement: string | null;
+};
+
+/** One rail of the backplane as a conductor along the slots. */
 export type BackplaneRail = {
   rail: string;
-  /** Ω between one slot and the next, there and back. */
+  /** Between two neighbouring slots, Ω. */
   supplyOhm: number;
   groundOhm: number;
   /** Of one contact, Ω. */
   contactOhm: number;
-  /** Slots in the order of the line; the source feeds the first. */
-  slots: number[];
+  /** Where the rail is fed. 0 feeds before slot 1. */
+  sourceSlot: number;
+};
+
+export type MachinePowerInput = {
+  rails: MachineRail[];
+  placements: PoweredPlacement[];
+  /** Of the air at the connectors, °C. */
+  ambientC: number;
+  /** Rails that are missing here get no drop. */
+  backplane: BackplaneRail[];
 };
 
 export type SupplyMargin = {
@@ -57,7 +58,9 @@ export type ContactLoad = {
   rail: string;
   contacts: number;
   worstA: number;
-  perContactA: number;
+  /** Null without a contact. */
+  perContactA: number | null;
+  /** What one contact bears at the ambient temperature. */
   ratedA: number;
   verdict: "fits" | "too much" | "no contact";
   sentence: string;
@@ -67,9 +70,10 @@ export type SlotDrop = {
   rail: string;
   slot: number;
   placement: string;
+  label: string;
   /** Lost on the way there and back, contacts included, V, at worst current. */
   dropV: number;
-  /** What is left at the card at the rail's nominal voltage, V. */
+  /** What is left at the card where the supply gives its nominal voltage, V. */
   volts: number;
   verdict: "fits" | "too low";
   sentence: string;
