@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import type { Reply } from "@/components/ui/form/reply";
+import type { saveBoardPlanInput, saveBomInput, tieSparesInput } from "@/lib/board-plan/schema";
 import type { changePartInput, savePartInput } from "@/lib/part/schema";
 import type { changeBlockInput, saveBlockInput } from "@/lib/block/schema";
 
@@ -16,4 +17,10 @@ export type PartActs = {
   save: Act<typeof savePartInput, { number: string; version: number }>;
   archive: Act<typeof changePartInput, { number: string }>;
   restore: Act<typeof changePartInput, { number: string }>;
+};
+
+export type BoardPlanActs = {
+  save: Act<typeof saveBoardPlanInput, { version: number; tiesReopened: boolean }>;
+  saveBom: Act<typeof saveBomInput, { version: number }>;
+  tie: Act<typeof tieSparesInput, { version: number }>;
 };

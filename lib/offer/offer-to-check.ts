@@ -34,7 +34,7 @@ export async function offerToCheck(scope: ProjectScope, input: OfferToCheckInput
     else {
       await tx
         .update(procedureChecks)
-        .set({ spec: changed.spec, caution: changed.caution })
+        .set({ spec: changed.spec, instruction: changed.instruction, caution: changed.caution })
         .where(and(eq(procedureChecks.procedureId, procedure.id), eq(procedureChecks.key, changed.key)));
     }
     const rows = isNew ? [...checks, changed] : checks;

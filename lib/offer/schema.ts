@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { line } from "@/lib/form/text";
+import { line, optionalLines } from "@/lib/form/text";
 import { writeId } from "@/lib/form/write-id";
 import { checkFields } from "@/lib/procedure/schema";
 
@@ -8,6 +8,8 @@ const existing = z.object({
   key: z.uuid(),
   /** Fields of the kind's own form that change; the others stay: { limits: "120 … 340 mA" }. */
   typed: z.record(z.string().max(40), z.string().max(500, "At most 500 characters fit here.")),
+  /** Stands in place of the check's own; left away, that stays. */
+  instruction: optionalLines(4000).optional(),
 });
 
 const added = z.object({ is: z.literal("new"), check: checkFields });
