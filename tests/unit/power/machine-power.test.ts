@@ -1,3 +1,4 @@
+import { describe, expect, test } from "vitest";
 import { machinePower, type MachinePowerInput, type MachineRail, type PoweredPlacement } from "@/lib/calc/power";
 import { card, FIVE, LINE, machine, powerOf } from "./machine";
 
