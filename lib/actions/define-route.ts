@@ -23,8 +23,10 @@ type Definition<Need extends Requirement, Schema extends z.ZodType> = {
     call: Call,
     request: Request,
   ) => Promise<Answer<unknown> | Response>;
-  /** Set false only for machine-to-machine posts that prove themselves otherwise (one-click unsubscribe). */
+  /** Set false only for posts that change nothing, or that prove themselves otherwise (one-click unsubscribe). */
   browserOnly?: boolean;
+  /** Of the JSON body, in bytes. */
+  bodyLimit?: number;
 };
 
 type Context = { params: Promise<Record<string, string | string[] | undefined>> };
@@ -50,11 +52,15 @@ export function defineRoute<Need extends Requirement, Schema extends z.ZodType>(
       typeof params.project === "string" ? params.project : undefined,
     );
     if (!granted.ok) return granted;
-    const body = changes && request.headers.get("content-type")?.includes("json") ? await readJson(request) : undefined;
+    const body =
+      changes && request.headers.get("content-type")?.includes("json")
+        ? await readJson(request, definition.bodyLimit)
+        : undefined;
     if (body && !body.ok) return body;
     const query = Object.fromEntries(new URL(request.url).searchParams);
-    const fromBody = z.record(z.string(), z.unknown()).safeParse(body?.value);
-    const parsed = await definition.input.safeParseAsync({ ...query, ...(fromBody.data ?? {}), ...params });
+    const fromBody = z.record(z.string(), z.unknown()).safeParse(body?.value ?? {});
+    if (!fromBody.success) return refuse("invalid", "The body must be one JSON object. Nothing was changed.");
+    const parsed = await definition.input.safeParseAsync({ ...query, ...fromBody.data, ...params });
     if (!parsed.success) {
       return refuse("invalid", "Something in the request is not valid. Nothing was changed.", {
         fields: fieldErrors(parsed.error),

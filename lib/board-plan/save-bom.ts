@@ -5,6 +5,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import type { Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { openPlan } from "./open-plan";
 import type { SaveBomInput } from "./schema";
 
@@ -22,6 +23,7 @@ export async function saveBom(scope: ProjectScope, input: SaveBomInput): Promise
     const version = await writeBoardPlan(tx, plan, {});
     const subject = { projectId, actorId: viewer.userId, subjectId: board.id };
     await recordEvent(tx, subject, "plan.edited", { code: board.code, what: "its other parts" });
+    await refreshFindings(tx, scope);
     return { version };
   });
 }

@@ -25,6 +25,8 @@ export const LIMITS = {
   invitations: { points: 40, seconds: HOUR, what: "You have sent many invitations in the last hour." },
   /** By person who sends the weekly e-mail to themselves. */
   previews: { points: 20, seconds: HOUR, what: "You have sent yourself many previews in the last hour." },
+  /** By peer: calculations without state. */
+  calculations: { points: 600, seconds: 5 * MINUTE, what: "Many calculations were asked for from your connection." },
   /** By person who uploads. */
   uploads: { points: 300, seconds: 10 * MINUTE, what: "You have uploaded many files in the last ten minutes." },
 } as const satisfies Record<string, { points: number; seconds: number; what: string }>;

@@ -5,11 +5,13 @@ import {
   findMachineConnectors,
   findMachinePins,
   findMachineSlots,
-  findOwnFamilies,
   findRails,
   findSignals,
 } from "@/db/queries/machine";
-import { loadUntiedSpares } from "@/lib/board-plan/load-untied-spares";
+import { findBomLines } from "@/db/queries/parts";
+import { findPowerLines } from "@/db/queries/power";
+import { loadDesigns } from "@/lib/board-plan/load-designs";
+import { untiedSpares } from "@/lib/board-plan/untied-spares";
 import { faceOf } from "@/lib/calc/connector";
 import {
   PIN_ROLES,
@@ -19,33 +21,30 @@ import {
   type Machine,
   type SignalFacts,
 } from "@/lib/calc/interconnect";
-import { familiesOf } from "@/lib/family/families-of";
+import { planPower } from "@/lib/power/plan-power";
 import { matingsOf, placementsOf } from "./placements";
 
 type InProject = { projectId: string };
 
-/** The whole machine as the calculations see it. Fifteen queries, whatever its size. */
-export async function loadMachine(db: Queryable, scope: InProject): Promise<Machine> {
-  const [boards, slots, connectors, pins, signals, rails, own, conditions, untied] = await Promise.all([
+/** The whole machine as the calculations see it, and what its power is planned from. Sixteen queries, whatever its size. */
+export async function readMachine(db: Queryable, scope: InProject) {
+  const [designs, boards, slots, connectors, pins, signals, rails, conditions, lines, bom] = await Promise.all([
+    loadDesigns(db, scope),
     findMachineBoards(db, scope),
     findMachineSlots(db, scope),
     findMachineConnectors(db, scope),
     findMachinePins(db, scope),
     findSignals(db, scope),
     findRails(db, scope),
-    findOwnFamilies(db, scope),
     findConditions(db, scope),
-    loadUntiedSpares(db, scope),
+    findPowerLines(db, scope),
+    findBomLines(db, scope),
   ]);
-  const byConnector = new Map<string, DesignPin[]>();
-  for (const pin of pins) {
-    const group = byConnector.get(pin.connectorId);
-    if (group) group.push(designPin(pin));
-    else byConnector.set(pin.connectorId, [designPin(pin)]);
-  }
   const placed = placementsOf({ boards, slots, connectors });
-  const matings = matingsOf({ boards, slots, connectors }, placed);
-  const designs = boards.map((board): BoardDesign => ({
+  const power = planPower({ designs, bom, lines, rails, conditions, placed });
+  const untied = untiedSpares(designs);
+  const byConnector = groupPins(pins);
+  const designed = boards.map((board): BoardDesign => ({
     code: board.code,
     name: board.name,
     kind: board.kind,
@@ -59,16 +58,30 @@ export async function loadMachine(db: Queryable, scope: InProject): Promise<Mach
     untiedSpares: untied.get(board.code) ?? [],
   }));
   const { ambientC, logicVolts, logicRail, pinCapacitancePf } = conditions;
-  return {
-    boards: designs,
+  const machine: Machine = {
+    boards: designed,
     placements: placed.map(({ id, board, label, slot }) => ({ id, board, label, slot })),
-    matings,
+    matings: matingsOf({ boards, slots, connectors }, placed),
     signals: signals.map(signalFacts),
     rails: rails.map(({ name, volts, tolerancePercent }) => ({ name, volts, tolerancePercent })),
-    draws: [],
-    families: familiesOf(own),
+    draws: power.draws,
+    families: designs.families,
     conditions: { ambientC, logicVolts, logicRail, pinCapacitancePf },
   };
+  return { machine, power, rails, conditions, slots };
+}
+
+export const loadMachine = async (db: Queryable, scope: InProject): Promise<Machine> =>
+  (await readMachine(db, scope)).machine;
+
+function groupPins(pins: readonly PinRow[]): Map<string, DesignPin[]> {
+  const byConnector = new Map<string, DesignPin[]>();
+  for (const pin of pins) {
+    const group = byConnector.get(pin.connectorId);
+    if (group) group.push(designPin(pin));
+    else byConnector.set(pin.connectorId, [designPin(pin)]);
+  }
+  return byConnector;
 }
 
 type PinRow = Awaited<ReturnType<typeof findMachinePins>>[number];

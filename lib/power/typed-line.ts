@@ -39,7 +39,10 @@ export const typedLine = z.discriminatedUnion("kind", [
     kind: z.literal("regulator"),
     ...named,
     output: line(40, "Name the rail that it makes."),
-    outputVolts: figure("V", "Say what it makes.", { least: -400, most: 400, example: "3.3 V" }),
+    /** A magnitude: the sign is the rail's. */
+    outputVolts: figure("V", "Say what it makes.", { least: -400, most: 400, example: "3.3 V" })
+      .transform(Math.abs)
+      .refine((value) => value > 0, "It makes more than 0 V."),
     type: z.enum(["linear", "switching"], { message: "Choose how it works." }),
     groundA: amps("Say what it takes for itself."),
     efficiency: share("Say how much of the power gets through."),

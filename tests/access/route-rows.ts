@@ -57,6 +57,16 @@ export const routes: Record<string, RouteRow> = {
     ask: (place) => ({ path: of(place, "/units/TIM-01/traveler") }),
     status: 200,
   },
+  "GET app/api/v1/calc/[calculation]/route.ts": {
+    permission: "public",
+    ask: () => ({ path: "/api/v1/calc/conformity" }),
+    status: 200,
+  },
+  "POST app/api/v1/calc/[calculation]/route.ts": {
+    permission: "public",
+    ask: () => ({ path: "/api/v1/calc/conformity", data: { reading: 4.98, limits: { lower: 4.75, upper: 5.25 } } }),
+    status: 200,
+  },
   "POST app/api/unsubscribe/[subscription]/[token]/route.ts": {
     permission: "public",
     // The mail's address is the proof; one that was made up ends nothing.

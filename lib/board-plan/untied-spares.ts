@@ -1,18 +1,13 @@
-import type { Queryable } from "@/db/client";
 import type { BoardDesign } from "@/lib/calc/interconnect";
 import { groupSpares } from "@/lib/calc/packing";
-import { loadDesigns } from "./load-designs";
+import type { Designs } from "./load-designs";
 import { familyOf, packBoard, planOf } from "./pack-board";
 
 /**
  * Spare gates whose inputs nobody has tied yet, by the code of the board. Only of CMOS, whose open inputs drift; a board
- * that uses no block has none. Seven queries, whatever the size of the machine.
+ * that uses no block has none.
  */
-export async function loadUntiedSpares(
-  db: Queryable,
-  scope: { projectId: string },
-): Promise<Map<string, BoardDesign["untiedSpares"]>> {
-  const designs = await loadDesigns(db, scope);
+export function untiedSpares(designs: Designs): Map<string, BoardDesign["untiedSpares"]> {
   const found = new Map<string, BoardDesign["untiedSpares"]>();
   for (const { id, code } of designs.boards) {
     const { sparesTied, family } = planOf(designs, id);
