@@ -6,12 +6,9 @@ export type GateTotals = Map<string, number>;
 /** What needs packages as one: an instance of a block on the board, or the loose gates. */
 export type Owner = { block: string | null; label: string; gates: GateTotals };
 
-/** Above this every sum is only "too many"; keeps products of nested counts exact. */
-const CEILING = 1e9;
-
+/** Nested counts may multiply to more than a number holds exactly, even to infinity: both are far above what is packed. */
 export function addGates(totals: GateTotals, more: Iterable<readonly [string, number]>, times = 1): GateTotals {
-  for (const [gateFunction, count] of more)
-    totals.set(gateFunction, Math.min(CEILING, (totals.get(gateFunction) ?? 0) + count * times));
+  for (const [gateFunction, count] of more) totals.set(gateFunction, (totals.get(gateFunction) ?? 0) + count * times);
   return totals;
 }
 

@@ -8,6 +8,7 @@ export function findCycle(blocks: readonly BlockDesign[]): BlockDesign[] | undef
   const byId = new Map(blocks.map((block) => [block.id, block]));
   const done = new Set<string>();
   for (const start of blocks) {
+    if (done.has(start.id)) continue;
     const cycle = follow(start, byId, done);
     if (cycle) return cycle;
   }
@@ -20,7 +21,7 @@ function follow(start: BlockDesign, byId: Map<string, BlockDesign>, done: Set<st
   const onPath = new Set([start.id]);
   for (let top = path.at(-1); top; top = path.at(-1)) {
     const child = top.block.children[top.next++];
-    if (!child || done.has(top.block.id)) {
+    if (!child) {
       done.add(top.block.id);
       onPath.delete(top.block.id);
       path.pop();

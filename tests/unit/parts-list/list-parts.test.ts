@@ -58,6 +58,7 @@ describe("a parts list over all boards and units", () => {
     [100, 7, 7],
     [40, 2.5, 1],
     [41, 2.5, 2],
+    [1000, 1.1, 11],
     [1, 10, 1],
     [0, 10, 0],
   ])("%i needed with %s %% spares are %i spare", (needed, percent, spares) => {
