@@ -45,20 +45,10 @@ export async function findCaseTwins(db: Queryable, { projectId }: InProject, nam
   return [...rows];
 }
 
-/** Signals that claim one of these names, as their own or as an alias. */
-export async function findClaims(db: Queryable, { projectId }: InProject, name: string, aliases: readonly string[]) {
-  const all = [name, ...aliases];
+/** Signals that have this name as an alias. */
+export async function findClaims(db: Queryable, { projectId }: InProject, name: string) {
   return db
-    .select({ name: signals.name, aliases: signals.aliases })
+    .select({ name: signals.name })
     .from(signals)
-    .where(
-      and(
-        eq(signals.projectId, projectId),
-        ne(signals.name, name),
-        sql`${signals.aliases} ?| array[${sql.join(
-          all.map((one) => sql`${one}`),
-          sql`, `,
-        )}]::text[]`,
-      ),
-    );
+    .where(and(eq(signals.projectId, projectId), ne(signals.name, name), sql`${signals.aliases} ? ${name}`));
 }

@@ -12,6 +12,9 @@ import { PROJECT } from "./tide/machine";
 import { storyHappenings, type Cast } from "./tide/tell-story";
 import { uploadPicture, uploadRipple, type Upload } from "./tide/upload-picture";
 import { machineHappenings } from "./tide/write-machine";
+import { partsHappenings } from "./tide/write-parts";
+import { powerHappenings } from "./tide/write-power";
+import { wiringHappenings } from "./tide/write-wiring";
 import { logHappenings } from "./tide/write-log";
 import { writeInstruments, writePeople } from "./tide/write-people";
 
@@ -37,6 +40,9 @@ async function seed(db: Database, now: Date): Promise<void> {
     name === "scope-ripple" ? uploadRipple(who, target, name) : uploadPicture(who, target, name);
   await play(db, [
     ...machineHappenings(db, scope, now),
+    ...wiringHappenings(db, scope, now),
+    ...partsHappenings(db, scope, now),
+    ...powerHappenings(db, scope, now),
     ...storyHappenings(db, cast, now, upload),
     ...logHappenings(cast, now),
   ]);

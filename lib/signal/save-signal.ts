@@ -18,7 +18,7 @@ export async function saveSignal(scope: ProjectScope, input: SaveSignalInput): P
     const current = await lockSignal(tx, scope, name);
     if ((current?.version ?? 0) !== input.version) rejectStale(name, current);
     if (!current) await rejectCaseTwin(tx, scope, name);
-    await rejectTakenNames(tx, scope, name, aliases);
+    await rejectTakenName(tx, scope, name);
     const values = { class: input.class, aliases, frequencyHz, note, version: input.version + 1 };
     const [row] = current
       ? await tx.update(signals).set(values).where(eq(signals.id, current.id)).returning({ id: signals.id })
@@ -56,14 +56,13 @@ async function rejectCaseTwin(tx: Transaction, scope: ProjectScope, name: string
   reject("invalid", sentence, { fields: { name: sentence } });
 }
 
-async function rejectTakenNames(tx: Transaction, scope: ProjectScope, name: string, aliases: readonly string[]) {
-  const [claim] = await findClaims(tx, scope, name, aliases);
+/**
+ * A name that stands for another signal is not free. Two signals may share another name: a card that sits in three slots
+ * calls each slot's own select SEL_N.
+ */
+async function rejectTakenName(tx: Transaction, scope: ProjectScope, name: string) {
+  const [claim] = await findClaims(tx, scope, name);
   if (!claim) return;
-  if (claim.aliases.includes(name)) {
-    const sentence = `${name} is another name of ${claim.name} already. Take it away there first.`;
-    reject("invalid", sentence, { fields: { name: sentence } });
-  }
-  const taken = aliases.find((alias) => claim.aliases.includes(alias)) ?? "";
-  const sentence = `${taken} is another name of ${claim.name} already. A name can mean one signal only.`;
-  reject("invalid", sentence, { fields: { aliases: sentence } });
+  const sentence = `${name} is another name of ${claim.name} already. Take it away there first.`;
+  reject("invalid", sentence, { fields: { name: sentence } });
 }

@@ -28,6 +28,11 @@ const DATED = [
   ["memberships", "created_at"],
   ["procedures", "issued_at"],
   ["slot_occupancies", "placed_at"],
+  ["rule_findings", "found_at"],
+  ["rule_findings", "accepted_at"],
+  ["blocks", "created_at"],
+  ["blocks", "changed_at"],
+  ["board_plans", "created_at"],
 ] as const;
 
 /** One thing that happens in the story, and when. */

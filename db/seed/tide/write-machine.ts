@@ -30,7 +30,15 @@ export function machineHappenings(db: Database, scope: ProjectScope, now: Date):
     at: at(Math.max(...board.revisions.map((one) => one.daysAgo)), 0),
     work: async () => {
       const { code, name, summary, kind, connectorType } = board;
-      const form = { ...write(scope), code, name, summary, kind, connectorType, connectorReference: "J1" };
+      const form = {
+        ...write(scope),
+        code,
+        name,
+        summary,
+        kind,
+        connectorType,
+        connectorReference: kind === "backplane" ? "X1" : "J1",
+      };
       const made = granted(await createBoard(scope, form));
       boardIds.set(code, made.id);
       await writeRevisions(db, scope, made.id, board);
