@@ -21,3 +21,4 @@ export {
   type SignalFacts,
 } from "./machine";
 export { type Net, type NetPin } from "./net";
+export { netFacts, netFactsOf, type NetFacts, type NetParty, type WorstMargin } from "./net-facts";

@@ -65,7 +65,7 @@ export function studyNet(net: Net): NetStudy {
       if (DRIVES.has(role)) study.mayBeHeardOutside = true;
     }
   }
-  if (passive.length > 0 && passive.some((pin) => leadsElsewhere(pin, passive))) {
+  if (passive.length > 0 && passive.some((pin) => leadsElsewhere(pin, net.pins))) {
     study.mayBeDrivenFromOutside = true;
     study.mayBeHeardOutside = true;
   }
@@ -80,8 +80,8 @@ export function studyNet(net: Net): NetStudy {
  * A passive pin leads on to the board's other connector, whose net is known when it meets one; else to a switch, a lamp
  * or a plug, of which nothing is known.
  */
-const leadsElsewhere = (pin: NetPin, passive: readonly NetPin[]): boolean =>
-  !pin.isMated || !passive.some((other) => other.placement === pin.placement && other.connectorId !== pin.connectorId);
+const leadsElsewhere = (pin: NetPin, pins: readonly NetPin[]): boolean =>
+  !pin.isMated || !pins.some((other) => other.placement === pin.placement && other.connectorId !== pin.connectorId);
 
 function join(parties: Map<string, Party>, pin: NetPin): void {
   const { placement, signal, role, family, enableGroup, loads } = pin;

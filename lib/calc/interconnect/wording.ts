@@ -39,8 +39,12 @@ export const pinCount = (count: number): string => `${count} pin${count === 1 ? 
 export const netName = ({ name, id }: { name: string; id: string }): string =>
   name === "" ? `the net at ${id}` : name;
 
-export const ohms = (value: number): string => formatQuantity({ value, unit: "Ω" }, { significant: 3 });
-export const amps = (value: number): string => formatQuantity({ value, unit: "A" }, { significant: 3 });
+/** To three digits, without zeros that say nothing. */
+const rounded = (value: number): number => Number(value.toPrecision(3));
+
+export const ohms = (value: number): string => formatQuantity({ value: rounded(value), unit: "Ω" });
+export const amps = (value: number): string => formatQuantity({ value: rounded(value), unit: "A" });
 export const volts = (value: number): string => formatQuantity({ value, unit: "V" });
 export const seconds = (value: number): string => formatQuantity({ value, unit: "s" }, { significant: 2 });
+export const farads = (pf: number): string => formatQuantity({ value: rounded(pf * 1e-12), unit: "F" });
 export const millimetres = (value: number): string => `${value.toFixed(1)}\u202fmm`;

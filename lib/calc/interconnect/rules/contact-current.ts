@@ -32,7 +32,7 @@ export const contactCurrent: Rule = (survey) => {
       weight: "must",
       subject: `${board}: ${what}`,
       title: (subject) => `${subject} pins carry too much current`,
-      why: `${amps(currentA)} through ${pinCount(pins.length)} is ${judged.sentence}`,
+      why: `${amps(currentA)} through ${pinCount(pins.length)}; one bears ${amps(judged.limitA)} at ${ambientC}\u202f°C.`,
       mend:
         edits.length > 0
           ? `Take ${what} on ${listed(edits.flatMap((edit) => (edit.kind === "pin" ? edit.pin : [])))} too, where the other half has it.`
