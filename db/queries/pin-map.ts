@@ -1,4 +1,4 @@
-import { and, asc, count, desc, eq, inArray, sql } from "drizzle-orm";
+import { and, asc, count, desc, eq, inArray, ne, sql } from "drizzle-orm";
 import type { Queryable, Transaction } from "@/db/client";
 import { boards, slots } from "@/db/schema/boards";
 import { events } from "@/db/schema/events";
@@ -11,6 +11,15 @@ type PinRow = Omit<typeof pins.$inferInsert, "id" | "connectorId">;
 
 export async function findPinsOf(db: Queryable, connectorId: string) {
   return db.select().from(pins).where(eq(pins.connectorId, connectorId)).orderBy(asc(pins.pin));
+}
+
+/** Notes beside pins; most pins have none. */
+export async function findPinNotes(db: Queryable, scope: InProject) {
+  return db
+    .select({ connectorId: pins.connectorId, pin: pins.pin, note: pins.note })
+    .from(pins)
+    .innerJoin(connectors, eq(connectors.id, pins.connectorId))
+    .where(and(eq(connectors.projectId, scope.projectId), ne(pins.note, "")));
 }
 
 export async function countPinsOf(db: Queryable, connectorId: string): Promise<number> {

@@ -57,7 +57,7 @@ export const blockChildren = pgTable(
       .references(() => blocks.id, { onDelete: "cascade" }),
     childId: uuid("child_id")
       .notNull()
-      .references((): AnyPgColumn => blocks.id),
+      .references((): AnyPgColumn => blocks.id, { onDelete: "cascade" }),
     count: integer("count").notNull(),
   },
   (table) => [
@@ -75,7 +75,7 @@ export const boardBlocks = pgTable(
       .references(() => boards.id, { onDelete: "cascade" }),
     blockId: uuid("block_id")
       .notNull()
-      .references(() => blocks.id),
+      .references(() => blocks.id, { onDelete: "cascade" }),
     count: integer("count").notNull(),
   },
   (table) => [

@@ -111,7 +111,7 @@ async function layRibbon(db: Database, scope: ProjectScope) {
 
 async function acceptNeighbours(db: Database, scope: ProjectScope) {
   const all = await db.select().from(ruleFindings).where(eq(ruleFindings.projectId, scope.projectId));
-  const found = all.find(({ key, weight }) => key.includes("PHI1") && weight === "look");
+  const found = all.find(({ key, rule }) => rule === "clock-beside-clock" && key.includes("PHI1"));
   if (!found) throw new Error(`no finding about the clocks: ${all.map(({ key }) => key).join(" | ")}`);
   const reason = "Both phases are slow against their length and end in 150 Ω at slot 8. Measured quiet on BPL-01.";
   granted(await acceptFinding(scope, { ...write(scope), key: found.key, facts: found.facts, reason }));
