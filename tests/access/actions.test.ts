@@ -16,6 +16,7 @@ import { powerRows } from "./action-rows/power";
 import { procedureRows } from "./action-rows/procedures";
 import type { ProjectRow, Row, Rows } from "./action-rows/row";
 import { travelerRows } from "./action-rows/travelers";
+import { wiringPlanRows } from "./action-rows/wiring-plan";
 import { actionFiles, root } from "./exported-actions";
 import { makeMachine, type Machine } from "./machine";
 import { MAY, ROLES } from "./permission-table";
@@ -32,6 +33,7 @@ const table: Record<string, Rows> = {
   ...powerRows,
   ...procedureRows,
   ...travelerRows,
+  ...wiringPlanRows,
 };
 type Listed = { file: string; name: string; row: Row };
 const listed: Listed[] = Object.entries(table).flatMap(([file, rows]) =>

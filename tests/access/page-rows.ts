@@ -61,6 +61,20 @@ export const pages: Record<string, PageRow> = {
   },
   "app/(workshop)/projects/[project]/bench/page.tsx": { permission: "project.see", path: of("/bench") },
   "app/(bench)/projects/[project]/bench/[unit]/page.tsx": { permission: "project.see", path: of("/bench/TIM-01") },
+  "app/(workshop)/projects/[project]/wiring/families/page.tsx": {
+    permission: "project.see",
+    path: of("/wiring/families"),
+  },
+  "app/(workshop)/projects/[project]/wiring/findings/page.tsx": {
+    permission: "project.see",
+    path: of("/wiring/findings"),
+  },
+  "app/(workshop)/projects/[project]/wiring/nets/page.tsx": { permission: "project.see", path: of("/wiring/nets") },
+  "app/(workshop)/projects/[project]/wiring/signals/page.tsx": {
+    permission: "project.see",
+    path: of("/wiring/signals"),
+  },
+  "app/(workshop)/projects/[project]/wiring/take/page.tsx": { permission: "wiring.edit", path: of("/wiring/take") },
   "app/(workshop)/projects/[project]/captures/page.tsx": { permission: "project.see", path: of("/captures") },
   "app/(workshop)/projects/[project]/log/page.tsx": { permission: "project.see", path: of("/log") },
   "app/(workshop)/projects/[project]/log/new/page.tsx": { permission: "log.write", path: of("/log/new") },
