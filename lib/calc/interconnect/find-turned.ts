@@ -13,21 +13,28 @@ export type Turned = {
   compared: number;
 };
 
-/** Signals that must fit only when turned, and the share of all that must: below it is chance, or another mistake. */
+/** Signals that must fit only when turned; fewer are chance, or pins that were exchanged. */
 const LEAST_GAIN = 3;
+/** Share of the pins that meet which must fit when turned, and of all that carry something. */
 const LEAST_SHARE = 0.8;
+const LEAST_COVER = 0.5;
 
-/** Looks at every meeting whose two lists differ on several pins; linear in pins. */
+const named = ({ pins }: IndexedConnector): number => pins.filter(({ signal }) => signal !== "").length;
+
+/** Looks at every meeting whose two lists do not fit as they are; linear in pins. */
 export const findTurned = ({ meetings }: MachineIndex, book: SignalBook): Turned[] =>
   meetings.flatMap((meeting) => {
-    const { from, to } = meeting;
-    const direct = compare(from.connector, to.connector, book, (pin) => pin);
-    if (direct.differ < LEAST_GAIN) return [];
+    const [from, to] = [meeting.from.connector, meeting.to.connector];
+    const most = Math.min(named(from), named(to));
+    const asListed = compare(from, to, book, (pin) => pin).same;
+    if (most - asListed < LEAST_GAIN) return [];
     const found = TURNS.flatMap((turn): Turned[] => {
-      const turned = turnedPins(from.connector.face, to.connector.face, turn);
-      const { same, differ } = compare(from.connector, to.connector, book, (pin) => turned.get(pin));
-      const isBetter = same - direct.same >= LEAST_GAIN && same >= LEAST_SHARE * (same + differ);
-      return isBetter ? [{ meeting, turn, asListed: direct.same, whenTurned: same, compared: same + differ }] : [];
+      const turned = turnedPins(from.face, to.face, turn);
+      const { same, differ } = compare(from, to, book, (pin) => turned.get(pin));
+      const fits = same >= LEAST_SHARE * (same + differ) && same >= LEAST_COVER * most;
+      return fits && same - asListed >= LEAST_GAIN
+        ? [{ meeting, turn, asListed, whenTurned: same, compared: same + differ }]
+        : [];
     });
     const [best] = found.sort((a, b) => b.whenTurned - a.whenTurned);
     return best ? [best] : [];
