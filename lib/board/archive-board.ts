@@ -5,6 +5,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { vacate } from "@/lib/slot/vacate";
 import type { ChangeBoardInput } from "./schema";
 
@@ -25,6 +26,7 @@ export async function archiveBoard(scope: ProjectScope, input: ChangeBoardInput)
     await tx.update(boards).set({ archivedAt }).where(eq(boards.id, board.id));
     const subject = { projectId, actorId: viewer.userId, subjectId: board.id };
     await recordEvent(tx, subject, "board.archived", { code: board.code, name: board.name });
+    await refreshFindings(tx, scope);
     return { units: gone.length };
   });
 }

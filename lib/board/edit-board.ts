@@ -5,6 +5,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { rejectTakenCode } from "./create-board";
 import type { EditBoardInput } from "./schema";
 import { setEdgeConnector } from "./set-edge-connector";
@@ -31,6 +32,7 @@ export async function editBoard(
     await tx.update(boards).set({ code, name, summary, kind, version }).where(eq(boards.id, current.id));
     await setEdgeConnector(tx, scope, current.id, input);
     await recordEvent(tx, { projectId, actorId: viewer.userId, subjectId: current.id }, "board.edited", { code, name });
+    await refreshFindings(tx, scope);
     return { code, version };
   });
 }

@@ -8,6 +8,7 @@ import { refuse, reject, type Answer } from "@/lib/actions/answer";
 import { lockStructure } from "@/lib/check/lock-states";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { addHoldings } from "@/lib/unit/holdings";
 import { removeUnits } from "@/lib/unit/remove-units";
 import type { PurgeBoardInput } from "./schema";
@@ -47,6 +48,7 @@ export async function purgeBoard(scope: ProjectScope, input: PurgeBoardInput): P
       name,
       ...gone,
     });
+    await refreshFindings(tx, scope);
     return { code };
   });
 }

@@ -5,6 +5,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import type { ChangeBoardInput } from "./schema";
 
 /** Brings the board back with the units that were archived with it; units archived before stay archived. */
@@ -22,6 +23,7 @@ export async function restoreBoard(scope: ProjectScope, input: ChangeBoardInput)
     await tx.update(boards).set({ archivedAt: null }).where(eq(boards.id, board.id));
     const subject = { projectId, actorId: viewer.userId, subjectId: board.id };
     await recordEvent(tx, subject, "board.restored", { code: board.code, name: board.name });
+    await refreshFindings(tx, scope);
     return { units: back.length };
   });
 }

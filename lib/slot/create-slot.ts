@@ -6,6 +6,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import type { CreateSlotInput } from "./schema";
 
 export async function createSlot(
@@ -24,6 +25,7 @@ export async function createSlot(
       .returning({ id: slots.id });
     if (!slot) return rejectTakenPosition(position);
     await recordEvent(tx, { projectId, actorId: viewer.userId, subjectId: slot.id }, "slot.created", { position });
+    await refreshFindings(tx, scope);
     return { id: slot.id, position };
   });
 }

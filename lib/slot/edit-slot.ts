@@ -5,6 +5,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { rejectTakenPosition, requireCard } from "./create-slot";
 import type { EditSlotInput } from "./schema";
 
@@ -33,6 +34,7 @@ export async function editSlot(scope: ProjectScope, input: EditSlotInput): Promi
     const version = current.version + 1;
     await tx.update(slots).set({ position, label, pitchHp, boardId, version }).where(eq(slots.id, current.id));
     await recordEvent(tx, { projectId, actorId: viewer.userId, subjectId: current.id }, "slot.edited", { position });
+    await refreshFindings(tx, scope);
     return { version };
   });
 }

@@ -6,6 +6,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import type { PlaceUnitInput } from "./schema";
 
 type Placed = { serial: string; position: number };
@@ -40,6 +41,7 @@ export async function placeUnit(scope: ProjectScope, input: PlaceUnitInput): Pro
     await tx.insert(slotOccupancies).values({ slotId: slot.id, unitId: unit.id, placedBy: viewer.userId });
     const subject = { projectId, actorId: viewer.userId, unitId: unit.id, subjectId: slot.id };
     await recordEvent(tx, subject, "unit.placed", placed);
+    await refreshFindings(tx, scope);
     return placed;
   });
 }

@@ -2,6 +2,7 @@ import { lockUnit } from "@/db/queries/units";
 import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import type { ChangeUnitInput } from "@/lib/unit/schema";
 import { vacate } from "./vacate";
 
@@ -16,6 +17,7 @@ export async function removeUnit(
     if (!unit) return reject("not-found", "There is no such unit in this project.");
     const slot = await vacate(tx, scope, unit);
     if (!slot) return reject("conflict", `${unit.serial} sits in no slot. Somebody may have taken it out just now.`);
+    await refreshFindings(tx, scope);
     return { serial: unit.serial, position: slot.position };
   });
 }

@@ -5,6 +5,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import type { ChangeSlotInput } from "./schema";
 
 /** Undoes archiving, unless another slot has taken the position. */
@@ -21,6 +22,7 @@ export async function restoreSlot(scope: ProjectScope, input: ChangeSlotInput): 
     await tx.update(slots).set({ archivedAt: null }).where(eq(slots.id, slot.id));
     const subject = { projectId, actorId: viewer.userId, subjectId: slot.id };
     await recordEvent(tx, subject, "slot.created", { position: slot.position });
+    await refreshFindings(tx, scope);
     return { position: slot.position };
   });
 }

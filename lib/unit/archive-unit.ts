@@ -5,6 +5,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { vacate } from "@/lib/slot/vacate";
 import type { ChangeUnitInput } from "./schema";
 
@@ -19,6 +20,7 @@ export async function archiveUnit(scope: ProjectScope, input: ChangeUnitInput): 
     await tx.update(units).set({ archivedAt: new Date() }).where(eq(units.id, unit.id));
     const subject = { projectId, actorId: viewer.userId, unitId: unit.id, subjectId: unit.id };
     await recordEvent(tx, subject, "unit.archived", { serial: unit.serial });
+    await refreshFindings(tx, scope);
     return { serial: unit.serial };
   });
 }

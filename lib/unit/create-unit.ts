@@ -6,6 +6,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { startTraveler } from "@/lib/traveler/start-traveler";
 import type { CreateUnitInput } from "./schema";
 
@@ -30,6 +31,7 @@ export async function createUnit(scope: ProjectScope, input: CreateUnitInput): P
     const subject = { projectId, actorId: viewer.userId, unitId: unit.id, subjectId: unit.id };
     await recordEvent(tx, subject, "unit.created", { serial });
     await startTraveler(tx, scope, { id: unit.id, boardId: board.id, serial });
+    await refreshFindings(tx, scope);
     return { id: unit.id, serial };
   });
 }

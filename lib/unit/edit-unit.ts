@@ -7,6 +7,7 @@ import { lockUnits } from "@/lib/check/lock-states";
 import { refreshStates } from "@/lib/check/refresh-states";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { rejectTakenSerial, requireRevision } from "./create-unit";
 import type { EditUnitInput } from "./schema";
 
@@ -36,6 +37,7 @@ export async function editUnit(
       await lockUnits(tx, projectId, [current.id]);
       await refreshStates(tx, { projectId, actorId: viewer.userId }, [current.id]);
     }
+    await refreshFindings(tx, scope);
     return { serial, version };
   });
 }

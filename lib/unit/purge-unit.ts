@@ -6,6 +6,7 @@ import { lockStructure } from "@/lib/check/lock-states";
 import { database } from "@/db/client";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { addHoldings } from "./holdings";
 import { removeUnits } from "./remove-units";
 import type { PurgeUnitInput } from "./schema";
@@ -37,6 +38,7 @@ export async function purgeUnit(scope: ProjectScope, input: PurgeUnitInput): Pro
     await removeUnits(tx, scope, [unit.id]);
     const subject = { projectId, actorId: viewer.userId, unitId: unit.id, subjectId: unit.id };
     await recordEvent(tx, subject, "unit.purged", { serial, checks, attempts, files, waits: waitsOfOtherUnits });
+    await refreshFindings(tx, scope);
     return { serial };
   });
 }

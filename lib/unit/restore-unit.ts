@@ -6,6 +6,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
+import { refreshFindings } from "@/lib/machine/refresh-findings";
 import type { ChangeUnitInput } from "./schema";
 
 export async function restoreUnit(scope: ProjectScope, input: ChangeUnitInput): Promise<Answer<{ serial: string }>> {
@@ -19,6 +20,7 @@ export async function restoreUnit(scope: ProjectScope, input: ChangeUnitInput): 
     await tx.update(units).set({ archivedAt: null }).where(eq(units.id, unit.id));
     const subject = { projectId, actorId: viewer.userId, unitId: unit.id, subjectId: unit.id };
     await recordEvent(tx, subject, "unit.restored", { serial: unit.serial });
+    await refreshFindings(tx, scope);
     return { serial: unit.serial };
   });
 }
