@@ -66,7 +66,7 @@ export function BoardPlanForm({ project, view, save, onDraft, onSaved }: Props) 
       </div>
       <fieldset className="min-w-0">
         <legend className="text-sm font-semibold">For the power plan</legend>
-        <div className="mt-1.5 grid gap-4 sm:grid-cols-3">
+        <div className="mt-1.5 grid gap-4 sm:grid-cols-2">
           <FormQuantityField name="clockHz" label="Clock" placeholder="1.8432 MHz" />
           <FormQuantityField name="activity" label="Outputs that move" placeholder="25 %" />
           <FormQuantityField name="loadPf" label="Load of an output" placeholder="50 pF" />

@@ -6,6 +6,7 @@ import { Button } from "@/components/ui/Button";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { Notice } from "@/components/ui/Notice";
 import { Panel } from "@/components/ui/Panel";
+import { counted } from "@/components/workshop/counted";
 import { designatorClashes } from "@/lib/board-plan/designators";
 import type { BoardPlanView } from "@/lib/board-plan/load-board-plan";
 import type { PlacedPackage } from "@/lib/calc/packing";
@@ -58,11 +59,7 @@ export function BomPanel({ project, view, packages, canEdit, save }: Props) {
   return (
     <Panel
       title="Other parts"
-      note={
-        lines.length > 0
-          ? `${lines.length === 1 ? "1 line" : `${lines.length} lines`}, ${pieces} pieces a unit`
-          : undefined
-      }
+      note={lines.length > 0 ? `${counted(lines.length, "line")}, ${counted(pieces, "piece")} a unit` : undefined}
       actions={lines.length > 0 && edit("Change the list", "plain")}
     >
       {clashes.length > 0 && (

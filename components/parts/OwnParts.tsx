@@ -9,6 +9,7 @@ import { Table } from "@/components/ui/Table";
 import type { TableColumn } from "@/components/ui/table-column";
 import { counted } from "@/components/workshop/counted";
 import { Disclosure } from "@/components/workshop/Disclosure";
+import { builtInName } from "@/lib/part/built-in-name";
 import type { PartLine, PartsView } from "@/lib/part/load-parts";
 import { PartDialog } from "./PartDialog";
 import type { PartActs } from "./parts-acts";
@@ -56,10 +57,11 @@ export function OwnParts({ project, view, canEdit, acts }: Props) {
     {
       id: "description",
       header: "What it is",
-      searchIn: ({ description, note, logic }) => `${description} ${note} ${logic?.name ?? ""}`,
-      cell: ({ description, note, logic }) => (
+      searchIn: ({ number, description, note, logic }) =>
+        `${description} ${note} ${logic?.name ?? ""} ${builtInName(number) ?? ""}`,
+      cell: ({ number, description, note, logic }) => (
         <span className="flex flex-col">
-          {description || logic?.name}
+          {description || logic?.name || <span className="text-ink-soft">{builtInName(number)}</span>}
           {note && <span className="line-clamp-1 text-sm text-ink-soft">{note}</span>}
         </span>
       ),

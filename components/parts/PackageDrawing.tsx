@@ -1,16 +1,16 @@
 import clsx from "clsx";
 import type { PlacedPackage, SpareGate } from "@/lib/calc/packing";
 
-const PIN = 9;
-const HEIGHT = 30;
-const PAD = 5;
+const PIN = 11;
+const HEIGHT = 36;
+const PAD = 6;
 
 type Props = { one: PlacedPackage; pins: number; spares: readonly SpareGate[] };
 
 /** A package lying, pin 1 at the lower left beside the notch. Filled gates are used; a spare one is an open cell. */
 export function PackageDrawing({ one, pins, spares }: Props) {
   const half = Math.ceil(pins / 2);
-  const width = Math.max(half * PIN, one.gates.length * 12) + 8;
+  const width = Math.max(half * PIN, one.gates.length * 14) + 8;
   const open = new Set(spares.flatMap(({ tieLow, tieHigh, leaveOpen }) => [...tieLow, ...tieHigh, ...leaveOpen]));
   const cell = (width - 14) / one.gates.length;
   const pinX = (pin: number) => 4 + ((width - 8) / half) * ((pin <= half ? pin : pins - pin + 1) - 0.5);
@@ -27,9 +27,9 @@ export function PackageDrawing({ one, pins, spares }: Props) {
         return (
           <rect
             key={pin}
-            x={pinX(pin) - 1.75}
+            x={pinX(pin) - 2}
             y={pin <= half ? HEIGHT + PAD : 0}
-            width="3.5"
+            width="4"
             height={PAD}
             className={open.has(pin) ? "fill-copper" : "fill-solder-light"}
           />
@@ -55,7 +55,7 @@ export function PackageDrawing({ one, pins, spares }: Props) {
               x={x + (cell - 2) / 2}
               y={PAD + HEIGHT / 2 + 3.5}
               textAnchor="middle"
-              fontSize="10"
+              fontSize="11"
               className={clsx("mono font-semibold", usedBy === null ? "fill-copper" : "fill-ink")}
             >
               {gate}

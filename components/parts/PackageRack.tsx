@@ -46,7 +46,7 @@ export function PackageRack({ packages, spares, parts = {} }: Props) {
           );
         })}
       </ul>
-      <div aria-live="polite" className="min-h-12 text-[0.9375rem] print:hidden">
+      <div aria-live="polite" className="text-[0.9375rem] print:hidden">
         {shown ? (
           <Gates one={shown} spares={ofPackage(shown.designator)} />
         ) : (

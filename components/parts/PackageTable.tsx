@@ -13,7 +13,7 @@ export function PackageTable({ packing }: { packing: Packing }) {
             <tr className="text-sm text-ink-soft">
               <th className="py-1.5 pr-4 text-right font-semibold">Count</th>
               <th className="py-1.5 pr-4 font-semibold">Package</th>
-              <th className="py-1.5 pr-4 font-semibold">What it is</th>
+              <th className="py-1.5 pr-4 font-semibold max-sm:hidden">What it is</th>
               {apart && <th className="py-1.5 pr-4 font-semibold">For</th>}
               <th className="py-1.5 pr-4 text-right font-semibold">Gates used</th>
               <th className="py-1.5 text-right font-semibold">Spare</th>
@@ -25,8 +25,9 @@ export function PackageTable({ packing }: { packing: Packing }) {
                 <td className="mono py-1.5 pr-4 text-right text-sm">{line.count}</td>
                 <th scope="row" className="mono whitespace-nowrap py-1.5 pr-4 text-sm">
                   {line.part}
+                  <span className="block whitespace-normal font-text font-normal sm:hidden">{line.partName}</span>
                 </th>
-                <td className="py-1.5 pr-4">{line.partName}</td>
+                <td className="py-1.5 pr-4 max-sm:hidden">{line.partName}</td>
                 {apart && <td className="py-1.5 pr-4 text-sm text-ink-soft">{line.forBlock ?? "the board"}</td>}
                 <td className="mono whitespace-nowrap py-1.5 pr-4 text-right text-sm">
                   {line.gatesUsed} of {line.count * line.gatesPerPackage}

@@ -1,7 +1,8 @@
 import type { z } from "zod";
 import type { Reply } from "@/components/ui/form/reply";
 import type { saveBoardPlanInput, saveBomInput, tieSparesInput } from "@/lib/board-plan/schema";
-import type { changePartInput, savePartInput } from "@/lib/part/schema";
+import type { saveSparesInput } from "@/lib/parts-list/schema";
+import type { changePartInput, savePartInput, stockPartInput } from "@/lib/part/schema";
 import type { changeBlockInput, saveBlockInput } from "@/lib/block/schema";
 
 type Act<Schema extends z.ZodType, Value> = (input: z.input<Schema>) => Promise<Reply<Value>>;
@@ -24,3 +25,6 @@ export type BoardPlanActs = {
   saveBom: Act<typeof saveBomInput, { version: number }>;
   tie: Act<typeof tieSparesInput, { version: number }>;
 };
+
+export type StockAct = Act<typeof stockPartInput, { stock: number; price: string; version: number }>;
+export type SparesAct = Act<typeof saveSparesInput, { version: number }>;

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { readFigure } from "@/lib/form/figure";
+import { figure } from "@/lib/form/figure-field";
 import { line, optionalLine } from "@/lib/form/text";
 import { countedRows, namedOnce, readCount } from "@/lib/form/whole-count";
 import { writeId } from "@/lib/form/write-id";
@@ -16,41 +16,20 @@ const ofPlan = {
   version: z.int(),
 };
 
-type Kind = { unit: "Hz" | "F" | "%"; least: number; most: number; example: string; missing: string };
+const clockHz = figure("Hz", "Say how often the logic moves.", { most: 1e9, example: "1.8432 MHz" });
+const activity = figure("%", "Say which share of the outputs moves.", { most: 100, example: "25 %" });
+const loadFarad = figure("F", "Say what an output drives.", { most: 1e-6, example: "50 pF" });
 
-/** A figure that must be there, kept as `scale` says: 50 pF as 50. */
-const figure = ({ unit, missing, ...bounds }: Kind, scale: number) =>
-  z.string({ message: missing }).transform((typed, context) => {
-    const read = readFigure(typed, unit, bounds);
-    const message = !read.ok ? read.message : read.value === null ? missing : undefined;
-    if (read.ok && read.value !== null) return Number((read.value * scale).toPrecision(12));
-    context.addIssue({ code: "custom", message: message ?? missing });
-    return z.NEVER;
-  });
-
-const clock: Kind = {
-  unit: "Hz",
-  least: 0,
-  most: 1e9,
-  example: "1.8432 MHz",
-  missing: "Say how often the logic moves.",
-};
-const activity: Kind = {
-  unit: "%",
-  least: 0,
-  most: 100,
-  example: "25 %",
-  missing: "Say which share of the outputs moves.",
-};
-const load: Kind = { unit: "F", least: 0, most: 1e-6, example: "50 pF", missing: "Say what an output drives." };
+/** Without what the change of unit adds: 50 pF is 50, not 49.99999999999999. */
+const exact = (value: number) => Number(value.toPrecision(9));
 
 export const saveBoardPlanInput = z.object({
   ...ofPlan,
   packing: z.enum(["pooled", "per-block"], { message: "Choose how packages are shared." }),
   family: line(40, "Choose the family of the packages."),
-  clockHz: figure(clock, 1),
-  activity: figure(activity, 0.01),
-  loadPf: figure(load, 1e12),
+  clockHz,
+  activity: activity.transform((percent) => exact(percent / 100)),
+  loadPf: loadFarad.transform((farad) => exact(farad * 1e12)),
   /** Empty: as many as there are. */
   unitsPlanned: z.string().transform((typed, context): number | null => {
     if (typed.trim() === "") return null;
