@@ -56,8 +56,10 @@ export const FIGURE_NAMES = Object.keys(FIGURES) as FigureName[];
 
 export const figureOf = (name: FigureName): Figure => FIGURES[name];
 
-/** "3.84 V", "400 µA", "3.5 pF"; empty where a sheet says nothing. */
+/** "3.84 V", "0.33 V", "400 µA", "3.5 pF"; empty where a sheet says nothing. Sheets print volts without a prefix. */
 export function writeFigure(name: FigureName, stored: number | null | undefined): string {
+  if (stored === null || stored === undefined) return "";
   const { unit, scale } = FIGURES[name];
-  return stored === null || stored === undefined ? "" : formatQuantity({ value: stored * scale, unit });
+  if (unit === "V") return `${Number(stored.toPrecision(6))}\u202fV`;
+  return formatQuantity({ value: stored * scale, unit });
 }

@@ -74,11 +74,11 @@ function SourceRow({ line, project, acts }: { line: FamilyLine } & Pick<Props, "
   const { supply } = family;
   return (
     <tr>
-      <td colSpan={COLUMNS.length + 1} className="pb-2.5">
-        <div className="sticky left-0 flex max-w-[min(calc(100vw-3rem),70rem)] flex-wrap items-baseline gap-x-3 gap-y-1 pl-4 pr-3 text-xs text-ink-soft sm:pl-5">
+      <td colSpan={COLUMNS.length + 1} className="pb-2">
+        <div className="sticky left-0 flex w-[min(calc(100vw-3rem),76rem)] flex-wrap items-center gap-x-3 gap-y-1 pl-4 pr-3 text-xs text-ink-soft sm:pl-5">
           {replaces && <Badge tone="copper">stands for the built-in {replaces}</Badge>}
           {replacedBy && <Badge>replaced by your {replacedBy}</Badge>}
-          <span className="min-w-0 max-w-prose">
+          <span className="min-w-0 flex-1 basis-64">
             {family.source}
             {supply && ` For supplies from ${supply.minVolts} to ${supply.maxVolts} V.`}
           </span>
