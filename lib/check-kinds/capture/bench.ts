@@ -1,6 +1,7 @@
 import { defineBenchKind } from "../bench-kind";
 import { isStatedEntry, NOTHING_STATED, state, summariseStated, type StatedEntry } from "../stated-verdict";
 import { BenchForm } from "./BenchForm";
+import { expectedText } from "./expected-text";
 import { judge, requires } from "./judge";
 import type { Spec } from "./schema";
 
@@ -14,6 +15,6 @@ export const captureOnBench = defineBenchKind<Spec, StatedEntry>({
   summary: (_spec, entry) => summariseStated(entry),
   requires,
   units: () => [],
-  expected: (spec) => spec.expects || undefined,
+  expected: (spec) => expectedText(spec) || undefined,
   BenchForm,
 });

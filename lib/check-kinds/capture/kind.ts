@@ -1,6 +1,7 @@
 import { defineKind } from "../define-kind";
 import { statedEntryShape } from "../stated-entry-shape";
 import { NOTHING_STATED, summariseStated } from "../stated-verdict";
+import { expectedText } from "./expected-text";
 import { judge, requires } from "./judge";
 import { RecordView } from "./RecordView";
 import { specFromTyped, specShape, typedShape } from "./schema";
@@ -12,12 +13,16 @@ export const capture = defineKind({
   specShape,
   typedShape,
   specFromTyped,
-  emptyTyped: { expects: "" },
-  typedFromSpec: (spec) => spec,
+  emptyTyped: { expects: "", windowOf: "", window: "" },
+  typedFromSpec: ({ expects, window }) => ({
+    expects,
+    windowOf: window?.of ?? "",
+    window: window?.limits.typed ?? "",
+  }),
   entryShape: statedEntryShape,
   emptyEntry: () => NOTHING_STATED,
   judge,
-  expectation: (spec) => spec.expects || "capture",
+  expectation: (spec) => expectedText(spec) || "capture",
   summary: (_spec, entry) => summariseStated(entry),
   measured: false,
   requires,

@@ -27,7 +27,7 @@ const GOOD: Record<(typeof CHECK_KINDS)[number]["name"], unknown> = {
   reading: { unit: "Ω", limits: "< 0.5 Ω", expected: "0.1" },
   table: TABLE,
   photo: { expects: "solder side", minimum: "2" },
-  capture: { expects: "CLK at U3 pin 9" },
+  capture: { expects: "CLK at U3 pin 9", windowOf: "A0 to S15 at 50 %", window: "120 … 260 ns" },
 };
 
 describe.each(CHECK_KINDS.map((kind) => [kind.name, kind] as const))("the kind %s", (name, kind) => {
@@ -125,5 +125,32 @@ describe("what the eye judges", () => {
     expect(judge(true, { evidence: ["photo", "photo"] })).toBe(true);
     expect(judge(false, { evidence: ["photo", "photo"] })).toBe(false);
     expect(judge(false, { evidence: ["photo", "photo"], note: "C3 is turned." })).toBe(true);
+  });
+});
+
+describe("a capture", () => {
+  const kind = checkKind("capture");
+
+  it("that was stored before there were windows still reads, and has none", () => {
+    const old = { expects: "CLK at U3 pin 9" };
+    expect(kind.expectation(old)).toBe("CLK at U3 pin 9");
+    expect(kind.typedFromSpec(old)).toEqual({ ...old, windowOf: "", window: "" });
+    expect(kind.readTyped(old)).toEqual({ ok: true, value: old });
+  });
+
+  it("says what is measured in it and within which limits", () => {
+    expect(kind.expectation(specOf("capture", GOOD.capture))).toBe("CLK at U3 pin 9; A0 to S15 at 50 %: 120 … 260 ns");
+  });
+
+  it("has both what is measured and its limits, or neither", () => {
+    const fieldsOf = (typed: object) => {
+      const read = kind.readTyped({ expects: "", windowOf: "", window: "", ...typed });
+      return read.ok ? "none" : Object.keys(read.fields);
+    };
+    expect(fieldsOf({ window: "120 … 260 ns" })).toEqual(["windowOf"]);
+    expect(fieldsOf({ windowOf: "A0 to S15" })).toEqual(["window"]);
+    expect(fieldsOf({ windowOf: "A0 to S15", window: "260 … 120 ns" })).toEqual(["window"]);
+    expect(fieldsOf({ windowOf: "A0 to S15", window: "120 … 260" })).toEqual(["window"]);
+    expect(fieldsOf({})).toBe("none");
   });
 });
