@@ -1,7 +1,7 @@
 import Papa from "papaparse";
 import { escapeCell } from "@/lib/pin-map/cell-escape";
 import { COLUMN_NAMES, EMPTY_TEXTS, PIN_COLUMNS } from "@/lib/pin-map/pin-columns";
-import type { TakeTarget } from "./find-target";
+import type { TakeTarget } from "./resolve-target";
 
 const HEADINGS = ["Board", "Connector", "Pin", ...PIN_COLUMNS.map((column) => COLUMN_NAMES[column])];
 

@@ -2,7 +2,7 @@ import { z } from "zod";
 import type { ProjectScope } from "@/lib/access/scope";
 import { refuse, type Answer } from "@/lib/actions/answer";
 import { composeFile } from "./compose-file";
-import { nameOf } from "./find-target";
+import { nameOf } from "./resolve-target";
 import { loadTakeSources } from "./load-take-sources";
 import { withFaces } from "./with-faces";
 

@@ -2,7 +2,7 @@ import { busNames } from "@/lib/pin-map/bus-range";
 import { EMPTY_TEXTS, isEmptyRow, PIN_COLUMNS, type PinTexts } from "@/lib/pin-map/pin-columns";
 import type { KnownNames } from "@/lib/pin-map/read-cell";
 import { pinTexts, readPinRow } from "@/lib/pin-map/read-pin-row";
-import { findPins, findTarget, nameOf, type TakeTarget } from "./find-target";
+import { findPins, findTarget, nameOf, type TakeTarget } from "./resolve-target";
 import type { FileColumn, Mapping } from "./guess-columns";
 import type { Table, TableRow } from "./split-table";
 

@@ -7,7 +7,7 @@ import { knownNames } from "@/lib/pin-map/known-names";
 import type { PinTexts } from "@/lib/pin-map/pin-columns";
 import { pinTexts } from "@/lib/pin-map/read-pin-row";
 import type { KnownNames } from "@/lib/pin-map/read-cell";
-import type { TakeTarget } from "./find-target";
+import type { TakeTarget } from "./resolve-target";
 
 /** A connector with its pins, without the drawing of its face, which its type tells. */
 export type TakeSource = Omit<TakeTarget, "face"> & { type: string; grid: ConnectorGrid | null };

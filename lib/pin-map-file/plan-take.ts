@@ -1,5 +1,5 @@
 import { EMPTY_TEXTS, isEmptyRow, type PinTexts } from "@/lib/pin-map/pin-columns";
-import type { TakeTarget } from "./find-target";
+import type { TakeTarget } from "./resolve-target";
 import { sameTexts, type FilePin } from "./judge-rows";
 
 export type PinChange = { pin: string; kind: "added" | "changed" | "cleared"; before: PinTexts; after: PinTexts };

@@ -1,5 +1,5 @@
 import { faceOf } from "@/lib/calc/connector";
-import type { TakeTarget } from "./find-target";
+import type { TakeTarget } from "./resolve-target";
 import type { TakeSource } from "./load-take-sources";
 
 /** The same connectors with their faces, drawn from their types. */

@@ -35,7 +35,7 @@ export function LevelLadder({ driver, receiver, level, supplyVolts }: Props) {
           </pattern>
         </defs>
         <rect x="0" y="0" width="100%" height="14" fill="none" stroke="var(--rule-strong)" />
-        <rect {...band(given)} y="0" height="14" fill="var(--mask)" stroke="var(--rule-strong)" />
+        <rect {...band(given)} y="0" height="14" fill="var(--ink-soft)" stroke="var(--rule-strong)" />
         <rect x="0" y="32" width="100%" height="14" fill="none" stroke="var(--rule-strong)" />
         <rect {...band(taken)} y="32" height="14" fill={`url(#${hatch})`} stroke="var(--rule-strong)" />
         <rect
@@ -52,8 +52,9 @@ export function LevelLadder({ driver, receiver, level, supplyVolts }: Props) {
       <figcaption className="mono mt-1 flex justify-between text-2xs text-ink-soft">
         <span>0 V</span>
         <span className="font-text">
-          <span className="text-ink">■</span> output {isHigh ? "gives" : "leaves"}, <span aria-hidden="true">▨</span>{" "}
-          input takes, <span className={fits ? "text-passed" : "text-failed"}>■</span> {fits ? "margin" : "missing"}
+          <span className="text-ink-soft">■</span> output {isHigh ? "gives" : "leaves"},{" "}
+          <span aria-hidden="true">▨</span> input takes, <span className={fits ? "text-passed" : "text-failed"}>■</span>{" "}
+          {fits ? "margin" : "missing"}
         </span>
         <span>{volts(top)}</span>
       </figcaption>

@@ -9,7 +9,7 @@ const seconds = (value: number) => formatQuantity({ value, unit: "s" }, { signif
 type Props = { facts: NetFacts; frequencyHz: number | null };
 
 /** What the driver has to charge, and what that does to its edge. */
-export function NetEdge({ facts: { capacitancePf, edge, drivers }, frequencyHz }: Props) {
+export function NetEdge({ facts: { capacitancePf, edge, drivers, window }, frequencyHz }: Props) {
   if (capacitancePf === null || drivers.length === 0) return null;
   const isSlow = edge !== null && frequencyHz !== null && edge.edgeS * frequencyHz > 0.1;
   return (
@@ -34,6 +34,11 @@ export function NetEdge({ facts: { capacitancePf, edge, drivers }, frequencyHz }
         <p className="mt-3 max-w-prose text-[0.9375rem]">
           {edge.sentence}
           {isSlow && " At the frequency that is stated, the edges take more than a tenth of each period."}
+        </p>
+      )}
+      {!edge && window && (
+        <p className="mt-3 max-w-prose text-[0.9375rem]">
+          Its outputs only pull low: the resistor makes the rise, see below.
         </p>
       )}
       <Basis

@@ -18,7 +18,7 @@ export function ShareBar({ label, load: { usedA, availableA, holds } }: { label:
       </p>
       <span aria-hidden="true" className="mt-1 block h-2.5 border border-rule-strong bg-raised">
         <span
-          className={clsx("block h-full", holds ? "bg-mask" : "bg-failed")}
+          className={clsx("block h-full", holds ? "bg-ink-soft" : "bg-failed")}
           style={{ width: usedA > 0 ? `max(2px, ${percent}%)` : 0 }}
         />
       </span>

@@ -1,7 +1,7 @@
 import { pinNamed } from "@/lib/calc/connector";
 import { EMPTY_TEXTS, isEmptyRow, type PinTexts } from "@/lib/pin-map/pin-columns";
 import { decodeFile } from "@/lib/pin-map-file/decode-file";
-import type { TakeTarget } from "@/lib/pin-map-file/find-target";
+import type { TakeTarget } from "@/lib/pin-map-file/resolve-target";
 import { guessColumns } from "@/lib/pin-map-file/guess-columns";
 import { judgeRows } from "@/lib/pin-map-file/judge-rows";
 import { planTake, type TakePlan } from "@/lib/pin-map-file/plan-take";
