@@ -10,7 +10,9 @@ export function OrderTotals({ view }: { view: PartsListView }) {
   return (
     <dl className="grid gap-px overflow-hidden rounded-lg border border-rule bg-rule sm:grid-cols-3">
       <Total name="Left to buy" figure={String(totals.toBuy)}>
-        {parts === 0 ? "everything is in stock" : `${counted(totals.toBuy, "piece")} of ${counted(parts, "part")}`}
+        {parts === 0
+          ? "everything is in stock"
+          : `${totals.toBuy === 1 ? "piece" : "pieces"} of ${counted(parts, "part")}`}
       </Total>
       <Total name="Costs" figure={money(totals.costMinor, currency)}>
         {missing === 0 ? "every price is known" : `and what ${counted(missing, "part")} without a price cost`}

@@ -1,6 +1,7 @@
 import type { z } from "zod";
 import type { Reply } from "@/components/ui/form/reply";
 import type { saveBoardPlanInput, saveBomInput, tieSparesInput } from "@/lib/board-plan/schema";
+import type { changeDelayPathInput, saveDelayPathInput } from "@/lib/delay-path/schema";
 import type { saveSparesInput } from "@/lib/parts-list/schema";
 import type { changePartInput, savePartInput, stockPartInput } from "@/lib/part/schema";
 import type { changeBlockInput, saveBlockInput } from "@/lib/block/schema";
@@ -28,3 +29,9 @@ export type BoardPlanActs = {
 
 export type StockAct = Act<typeof stockPartInput, { stock: number; price: string; version: number }>;
 export type SparesAct = Act<typeof saveSparesInput, { version: number }>;
+
+export type DelayActs = {
+  save: Act<typeof saveDelayPathInput, { id: string; version: number }>;
+  archive: Act<typeof changeDelayPathInput, { name: string }>;
+  restore: Act<typeof changeDelayPathInput, { name: string }>;
+};

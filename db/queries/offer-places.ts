@@ -4,9 +4,9 @@ import { boards } from "@/db/schema/boards";
 import { procedureChecks, procedures, type Stage } from "@/db/schema/procedures";
 
 type InProject = { projectId: string };
-type Wanted = { stage: Stage; kind: string; board?: string };
+type Wanted = { stage?: Stage; kind: string; board?: string };
 
-/** Per board in work its draft, or without one its newest issued procedure, with the checks of one stage and kind. */
+/** Per board in work its draft, or without one its newest issued procedure, with the checks of one kind, of one stage or of all. */
 export async function findOfferPlaces(db: Queryable, scope: InProject, { stage, kind, board }: Wanted) {
   const current = db
     .selectDistinctOn([procedures.boardId], {
@@ -36,7 +36,7 @@ export async function findOfferPlaces(db: Queryable, scope: InProject, { stage, 
       procedureChecks,
       and(
         eq(procedureChecks.procedureId, current.id),
-        eq(procedureChecks.stage, stage),
+        stage && eq(procedureChecks.stage, stage),
         eq(procedureChecks.kind, kind),
       ),
     )

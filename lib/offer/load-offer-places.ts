@@ -7,7 +7,8 @@ import { checkKind, type CheckKindName } from "@/lib/check-kinds/list";
 import type { OfferPlace } from "./schema";
 
 type Wanted = {
-  stage: Stage;
+  /** Without it, checks of every stage. */
+  stage?: Stage;
   kind: CheckKindName;
   /** Only checks whose form says so: { unit: "A" }. */
   typed?: Record<string, string>;
