@@ -1,0 +1,1 @@
+export { CHECK_STAGES, holds, type CheckStage, type CheckState, type StandingCheck } from "./standing-check";

@@ -1,0 +1,11 @@
+export { type DoubtAfter, type DoubtLine, type DoubtReason, type RepeatWork } from "./doubt-line";
+export {
+  REWORK_KINDS,
+  type BoardMap,
+  type CoveringCheck,
+  type Covers,
+  type DoubtChoices,
+  type Rework,
+  type ReworkKind,
+  type Touched,
+} from "./rework";

@@ -1,0 +1,19 @@
+export {
+  type BoardLink,
+  type BoardOrder,
+  type BoardOrderInput,
+  type BoardOrdering,
+  type BoardOverride,
+  type BoardRisk,
+  type BoardStep,
+} from "./board-order";
+export {
+  type CheckOrder,
+  type Circle,
+  type CriticalPath,
+  type OpenCheck,
+  type Ordered,
+  type Schedule,
+  type ScheduledCheck,
+  type ScheduleRequest,
+} from "./check-order";
