@@ -7,6 +7,7 @@ import { Badge } from "@/components/ui/Badge";
 import { Button } from "@/components/ui/Button";
 import { ConfirmDialog } from "@/components/ui/ConfirmDialog";
 import { Dialog } from "@/components/ui/Dialog";
+import type { BoardSpares } from "@/lib/board-plan/load-board-spares";
 import type { BoardView } from "@/lib/board/load-board";
 import { findConnector } from "@/lib/calc/connector";
 import type { BoardActs, RevisionActs, UnitActs } from "./board-acts";
@@ -14,6 +15,7 @@ import { ArchivedBoard } from "./ArchivedBoard";
 import { BoardForm } from "./BoardForm";
 import { connectorId } from "./connector-id";
 import { ConnectorPanel } from "./ConnectorPanel";
+import { PackagesPanel } from "./PackagesPanel";
 import { ProcedurePanel } from "./ProcedurePanel";
 import { RevisionsPanel } from "./RevisionsPanel";
 import { UnitsPanel } from "./UnitsPanel";
@@ -23,13 +25,15 @@ type Props = {
   project: string;
   zone: string;
   board: BoardView;
+  /** Its packages by the plan of its parts; undefined while it uses no blocks. */
+  spares: BoardSpares | undefined;
   can: { editBoard: boolean; editUnits: boolean; editProcedure: boolean; purge: boolean };
   boardActs: Omit<BoardActs, "create">;
   revisionActs: RevisionActs;
   unitActs: UnitActs;
 };
 
-export function BoardPlace({ project, zone, board, can, boardActs, revisionActs, unitActs }: Props) {
+export function BoardPlace({ project, zone, board, spares, can, boardActs, revisionActs, unitActs }: Props) {
   const router = useRouter();
   const { act } = useAct();
   const [isEditing, setEditing] = useState(false);
@@ -106,6 +110,7 @@ export function BoardPlace({ project, zone, board, can, boardActs, revisionActs,
         acts={unitActs}
       />
       <ConnectorPanel board={board} />
+      {spares && <PackagesPanel project={project} zone={zone} code={board.code} spares={spares} />}
       <Dialog title="Change the board" isOpen={isEditing} onOpenChange={setEditing}>
         {(close) => (
           <BoardForm

@@ -65,7 +65,7 @@ export function DelayBars({ delay }: { delay: PathDelay }) {
               ))
             )}
           </dd>
-          <dd className={clsx("mono text-sm sm:text-right", isLimit && "font-semibold", "max-sm:-mt-1.5")}>
+          <dd className={clsx("mono self-center text-sm sm:text-right", isLimit && "font-semibold", "max-sm:-mt-1.5")}>
             {total === null ? <span className="font-text font-normal text-ink-soft">not known</span> : ns(total)}
           </dd>
         </div>

@@ -4,6 +4,7 @@ import { BoardPlace } from "@/components/board/BoardPlace";
 import { can } from "@/lib/access/permissions";
 import { definePage } from "@/lib/actions/define-page";
 import { loadBoard } from "@/lib/board/load-board";
+import { loadBoardSpares } from "@/lib/board-plan/load-board-spares";
 import { archiveBoard, createRevision, editBoard, purgeBoard, releaseRevision, restoreBoard } from "../actions";
 import { archiveUnit, createUnit, editUnit, purgeUnit, restoreUnit } from "../unit-actions";
 
@@ -15,7 +16,8 @@ export default definePage({
   permission: "project.see",
   path: (params) => `/projects/${params.project}/boards/${params.board}`,
   render: async (scope, { params }) => {
-    const board = await loadBoard(scope, params.board ?? "");
+    const code = params.board ?? "";
+    const [board, spares] = await Promise.all([loadBoard(scope, code), loadBoardSpares(scope, code)]);
     if (!board) notFound();
     const open = !scope.archived;
     return (
@@ -23,6 +25,7 @@ export default definePage({
         project={scope.slug}
         zone={scope.viewer.timeZone}
         board={board}
+        spares={spares}
         can={{
           editBoard: open && can(scope.role, "board.edit"),
           editUnits: open && can(scope.role, "unit.edit"),
