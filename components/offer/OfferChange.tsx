@@ -1,16 +1,16 @@
 import clsx from "clsx";
 import { Icon } from "@/components/ui/Icon";
 
-export type ChangeLine = { name: string; now: string; then: string };
+export type ChangeLine = { name: string; now: string; then: string; isProse?: boolean };
 
 /** What stands in the check now, and what would stand there. Lines that stay the same are said quietly. */
 export function OfferChange({ lines }: { lines: readonly ChangeLine[] }) {
   return (
     <dl className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-4 gap-y-1.5 text-[0.9375rem]">
-      {lines.map(({ name, now, then }) => (
+      {lines.map(({ name, now, then, isProse }) => (
         <div key={name} className="contents">
           <dt className="text-ink-soft">{name}</dt>
-          <dd className="mono flex flex-wrap items-baseline gap-x-2 text-sm">
+          <dd className={clsx("flex flex-wrap items-baseline gap-x-2", !isProse && "mono text-sm")}>
             {now !== then && (
               <>
                 <span className="text-ink-soft">

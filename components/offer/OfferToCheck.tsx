@@ -23,14 +23,26 @@ export type OfferToCheckProps = {
   fresh: Extract<OfferInput["target"], { is: "new" }>["check"] | null;
   canEdit: boolean;
   act: OfferAct;
+  /** Which check is chosen to begin with; null: the new one. */
+  prefer?: string | null;
   /** What to look at in the chosen check, e.g. an instruction that names another figure. */
   remark?: (target: OfferTarget) => string | undefined;
 };
 
 /** A figure that was worked out, offered to one check of the board's draft. Nothing changes before somebody says so. */
-export function OfferToCheck({ project, place, fields, caution, fresh, canEdit, act, remark }: OfferToCheckProps) {
+export function OfferToCheck({
+  project,
+  place,
+  fields,
+  caution,
+  fresh,
+  prefer,
+  canEdit,
+  act,
+  remark,
+}: OfferToCheckProps) {
   const router = useRouter();
-  const [chosen, setChosen] = useState(place.checks[0]?.key ?? NEW);
+  const [chosen, setChosen] = useState((prefer === undefined ? place.checks[0]?.key : prefer) ?? NEW);
   const { submit, isPending, error } = useSubmit(act, { onDone: () => router.refresh() });
   const [taken, setTaken] = useState<string>();
   const target = place.checks.find((check) => check.key === chosen);
@@ -128,5 +140,5 @@ function linesOf(
   const lines = fields.map(({ field, name, text }) => ({ name, now: target?.typed[field] ?? "", then: text }));
   if (!caution) return lines;
   const now = target?.caution.split("\n").find((line) => line.startsWith(caution.begins)) ?? "";
-  return [...lines, { name: "Caution", now, then: caution.text }];
+  return [...lines, { name: "Caution", now, then: caution.text, isProse: true }];
 }

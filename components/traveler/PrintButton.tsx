@@ -1,11 +1,12 @@
 "use client";
 
 import { Button } from "@/components/ui/Button";
+import type { ButtonKind } from "@/components/ui/button-style";
 import { Icon } from "@/components/ui/Icon";
 
-export function PrintButton() {
+export function PrintButton({ kind = "primary" }: { kind?: ButtonKind }) {
   return (
-    <Button kind="primary" onPress={() => print()}>
+    <Button kind={kind} onPress={() => print()}>
       <Icon name="print" /> Print
     </Button>
   );

@@ -7,7 +7,7 @@ import { recordEvent } from "@/lib/event/record-event";
 import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { openLines, unchangedLine } from "./open-lines";
 import type { RemovePowerLineInput } from "./schema";
-import { lineWords } from "./write-line";
+import { lineWords } from "./line-kinds";
 
 /** Takes a line off what a board draws. */
 export async function removePowerLine(

@@ -10,7 +10,7 @@ import { refreshFindings } from "@/lib/machine/refresh-findings";
 import { openLines, unchangedLine } from "./open-lines";
 import type { PowerLineItem } from "./line-item";
 import type { SavePowerLineInput } from "./schema";
-import { lineWords } from "./write-line";
+import { lineWords } from "./line-kinds";
 
 const MOST_LINES = 200;
 

@@ -2,7 +2,7 @@ import { z } from "zod";
 import { line } from "@/lib/form/text";
 import { writeId } from "@/lib/form/write-id";
 import { powerLineItem } from "./line-item";
-import { readLine, typedLine } from "./typed-line";
+import { typedLineForm } from "./typed-line";
 
 const ofBoard = {
   project: z.string(),
@@ -17,7 +17,7 @@ export const savePowerLineInput = z.object({
   line: z.union([z.uuid(), z.literal("")], { message: "Name the line." }),
   /** The line as it was looked at: another one there now is a conflict. */
   seen: powerLineItem.nullable(),
-  typed: typedLine.transform(readLine),
+  typed: typedLineForm,
 });
 export type SavePowerLineInput = z.output<typeof savePowerLineInput>;
 export type SavePowerLineTyped = z.input<typeof savePowerLineInput>;

@@ -18,7 +18,7 @@ const counted = { ...named, count: wholeCount("Count", { most: 10_000 }) };
 const measured = { typicalA: amps("Say what it draws as a rule."), worstA: amps("Say what it draws at most.") };
 
 /** A line as its form holds it: figures as people write them. */
-export const typedLine = z.discriminatedUnion("kind", [
+const typedLine = z.discriminatedUnion("kind", [
   z.object({
     kind: z.literal("led"),
     ...counted,
@@ -59,7 +59,7 @@ export type TypedLine = z.input<typeof typedLine>;
 type Read = z.output<typeof typedLine>;
 
 /** From the form to what is kept. The worst is never below the typical. */
-export function readLine(typed: Read, context: z.RefinementCtx): PowerLineItem {
+function readLine(typed: Read, context: z.RefinementCtx): PowerLineItem {
   const atLeast = (field: string, typical: number, worst: number) => {
     if (worst >= typical) return;
     context.addIssue({ code: "custom", path: [field], message: "At worst it is at least what it is as a rule." });
@@ -88,3 +88,6 @@ export function readLine(typed: Read, context: z.RefinementCtx): PowerLineItem {
   atLeast("worstA", typed.typicalA, typed.worstA);
   return typed;
 }
+
+/** The whole form: fields first, then what they say together. */
+export const typedLineForm = typedLine.transform(readLine);

@@ -89,5 +89,6 @@ export const pages: Record<string, PageRow> = {
   "app/(workshop)/projects/[project]/people/page.tsx": { permission: "project.see", path: of("/people") },
   "app/(workshop)/projects/[project]/digest/page.tsx": { permission: "digest.preview", path: of("/digest") },
   "app/(workshop)/projects/[project]/search/page.tsx": { permission: "project.see", path: of("/search") },
+  "app/(workshop)/projects/[project]/wiring/power/page.tsx": { permission: "project.see", path: of("/wiring/power") },
   "app/(workshop)/projects/[project]/settings/page.tsx": { permission: "project.archive", path: of("/settings") },
 };
