@@ -1,4 +1,5 @@
 import { inputStress, margins, type Family, type Margins } from "../levels";
+import { grouped } from "./grouped";
 import { pullUpLine, pullUpOhm } from "./net-currents";
 import { isSameCopper, type NetStudy, type Party } from "./study-net";
 import type { Survey } from "./survey";
@@ -16,26 +17,42 @@ export type LevelPair = {
 
 /**
  * Every pair of families that meets on the net, both at the machine's logic supply, on one rail: what one card's supply
- * does the other's does too. Pairs of a family that nobody knows are left out.
+ * does the other's does too. Pairs of a family that nobody knows are left out. Linear in the parties: of each family two
+ * pieces of copper are enough to see whether one drives another.
  */
 export function levelPairs(survey: Survey, study: NetStudy): LevelPair[] {
-  const pairs = new Map<string, LevelPair>();
+  const drivers = firstTwo(
+    study.drivers,
+    ({ family, role }) => `${family}\u0000${role === "open-drain output" ? 1 : 0}`,
+  );
+  const receivers = firstTwo(study.receivers, ({ family }) => family);
   const pulled = isPulledHigh(survey, study);
-  for (const driver of study.drivers) {
-    const driving = survey.family(driver.family);
-    if (!driving) continue;
-    for (const receiver of study.receivers) {
-      const receiving = survey.family(receiver.family);
-      if (!receiving || isSameCopper(driver, receiver)) continue;
-      const highByPullUp =
-        driver.role === "open-drain output" || (pulled(receiving) && driving.technology === "bipolar");
+  const pairs = new Map<string, LevelPair>();
+  for (const some of drivers) {
+    for (const others of receivers) {
+      const met = some.flatMap((driver) =>
+        others.filter((receiver) => !isSameCopper(driver, receiver)).map((receiver) => ({ driver, receiver })),
+      )[0];
+      const [driving, receiving] = [survey.family(met?.driver.family ?? ""), survey.family(met?.receiver.family ?? "")];
+      if (!met || !driving || !receiving) continue;
+      const isOpen = met.driver.role === "open-drain output";
+      const highByPullUp = isOpen || (driving.technology === "bipolar" && pulled(receiving));
       const key = `${driving.name}\u0000${receiving.name}\u0000${highByPullUp ? 1 : 0}`;
-      if (pairs.has(key)) continue;
-      pairs.set(key, { driver, receiver, driving, receiving, margins: margins(driving, receiving), highByPullUp });
+      if (!pairs.has(key)) {
+        pairs.set(key, { ...met, driving, receiving, margins: margins(driving, receiving), highByPullUp });
+      }
     }
   }
   return [...pairs.values()];
 }
+
+/** Of each kind the first party and the next that is other copper. */
+const firstTwo = (parties: readonly Party[], kindOf: (party: Party) => string): Party[][] =>
+  [...grouped(parties, kindOf).values()].map((same) => {
+    const [first] = same;
+    const other = first && same.find((party) => !isSameCopper(first, party));
+    return [first, other].filter((party) => party !== undefined);
+  });
 
 /** Whether the net's resistors lift it to the receiver's level against leakage and input currents. */
 function isPulledHigh(survey: Survey, study: NetStudy): (receiving: Family) => boolean {

@@ -1,7 +1,8 @@
 import { familyAt, findFamily, loading, netLoad, type Family, type Group, type Loading } from "../levels";
 import { inParallelOhm, lineOf, pullUpWindow, type Line, type PullUpWindow } from "../pull-up";
+import { grouped } from "./grouped";
 import type { Machine } from "./machine";
-import { isSameCopper, type NetStudy, type Party } from "./study-net";
+import { copperOf, type NetStudy, type Party } from "./study-net";
 import type { Survey } from "./survey";
 
 type FamilyOf = (name: string) => Family | undefined;
@@ -22,28 +23,47 @@ function groupsOf(parties: readonly Party[], family: FamilyOf, countOf: (party: 
 const inputsOf = (parties: readonly Party[], family: FamilyOf) => groupsOf(parties, family, ({ loads }) => loads);
 const outputsOf = (parties: readonly Party[], family: FamilyOf) => groupsOf(parties, family, () => 1);
 
-/** Resistance of all pull-ups together, Ω; null without one. */
-export const pullUpOhm = ({ pullUps }: NetStudy): number | null =>
-  inParallelOhm(pullUps.flatMap((pin) => pin.pullUpOhm ?? []));
-
-/** What the driver has to give and take on this net; undefined when its family is unknown or figures cannot be used. */
-export function driverLoading({ family, index }: Survey, study: NetStudy, driver: Party): Loading | undefined {
-  const own = family(driver.family);
-  if (!own) return undefined;
-  const ohm = pullUpOhm(study);
-  const answer = loading(own, {
-    inputs: inputsOf(
-      study.receivers.filter((receiver) => !isSameCopper(receiver, driver)),
-      family,
-    ),
-    offOutputs: outputsOf(
-      study.drivers.filter((other) => !isSameCopper(other, driver)),
-      family,
-    ),
-    pullUp: ohm === null ? null : { ohm, supplyVolts: index.machine.conditions.logicVolts },
-  });
-  return answer.ok ? answer.value : undefined;
+/** Resistance of all pull-ups together, Ω, to four digits, as resistors are no better; null without one. */
+export function pullUpOhm({ pullUps }: NetStudy): number | null {
+  const ohm = inParallelOhm(pullUps.flatMap((pin) => pin.pullUpOhm ?? []));
+  return ohm === null ? null : Number(ohm.toPrecision(4));
 }
+
+/**
+ * What each driver has to give and take on this net, in the order of study.drivers; undefined where its family is
+ * unknown or figures cannot be used. A driver's own copper does not load it. Linear in the parties.
+ */
+export function driverLoadings({ family, index }: Survey, study: NetStudy): (Loading | undefined)[] {
+  const ohm = pullUpOhm(study);
+  const pullUp = ohm === null ? null : { ohm, supplyVolts: index.machine.conditions.logicVolts };
+  const [inputs, outputs] = [inputsOf(study.receivers, family), outputsOf(study.drivers, family)];
+  const receiversOf = grouped(study.receivers, copperOf);
+  const driversOf = grouped(study.drivers, copperOf);
+  const known = new Map<string, Loading | undefined>();
+  return study.drivers.map((driver) => {
+    const driving = family(driver.family);
+    if (!driving) return undefined;
+    const copper = copperOf(driver);
+    const burden = {
+      inputs: without(inputs, inputsOf(receiversOf.get(copper) ?? [], family)),
+      offOutputs: without(outputs, outputsOf(driversOf.get(copper) ?? [], family)),
+      pullUp,
+    };
+    const counts = [burden.inputs, burden.offOutputs].map((groups) => groups.map(({ count }) => count).join());
+    const key = [driving.name, ...counts].join("\u0000");
+    if (!known.has(key)) {
+      const answer = loading(driving, burden);
+      known.set(key, answer.ok ? answer.value : undefined);
+    }
+    return known.get(key);
+  });
+}
+
+const without = (groups: readonly Group[], less: readonly Group[]): Group[] =>
+  groups.map(({ family, count }) => ({
+    family,
+    count: count - (less.find((one) => one.family === family)?.count ?? 0),
+  }));
 
 /** Capacitance of the net, pF; undefined when figures cannot be used. */
 export function capacitancePf({ family, index }: Survey, { net, drivers, receivers }: NetStudy): number | undefined {

@@ -10,7 +10,7 @@ import { indexMachine } from "./index-machine";
 import { levelPairs, type LevelPair } from "./level-pairs";
 import type { Machine, PinRole } from "./machine";
 import type { Net } from "./net";
-import { capacitancePf, driverLoading, netPullUpWindow, pullUpLine, pullUpOhm } from "./net-currents";
+import { capacitancePf, driverLoadings, netPullUpWindow, pullUpLine, pullUpOhm } from "./net-currents";
 import { netSentences } from "./net-sentences";
 import { byName } from "./order";
 import { studyNet, type NetStudy, type Party } from "./study-net";
@@ -62,7 +62,8 @@ export function netFactsOf(machine: Machine): (net: Net) => NetFacts {
 
 function factsOf(survey: Survey, study: NetStudy): NetFacts {
   const party = (one: Party) => netParty(survey, one);
-  const drivers = study.drivers.map((one) => ({ ...party(one), loading: driverLoading(survey, study, one) ?? null }));
+  const loadings = driverLoadings(survey, study);
+  const drivers = study.drivers.map((one, at) => ({ ...party(one), loading: loadings[at] ?? null }));
   const pairs = levelPairs(survey, study);
   const pf = capacitancePf(survey, study) ?? null;
   const facts = {

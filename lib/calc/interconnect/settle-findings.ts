@@ -1,5 +1,6 @@
 import type { Draft } from "./draft";
 import type { Edit, Finding, PinAt, Weight } from "./finding";
+import { grouped } from "./grouped";
 import type { NetPin } from "./net";
 import { byName, distinct } from "./order";
 import { busStem, capitalNet as capital, subjectsListed } from "./wording";
@@ -11,13 +12,13 @@ const WEIGHTS: readonly Weight[] = ["must", "should", "look"];
  * shows. The order is by weight, then title.
  */
 export function settleFindings(drafts: readonly Draft[]): Finding[] {
-  const sameMistake = group(
+  const sameMistake = together(
     drafts,
     (draft) => `${draft.rule}\u0000${draft.sameAs ?? designPins(onCards(draft.pins)).join(",")}`,
   );
   const merged = sameMistake.map(merge);
-  const sameBus = group(merged, busOf).map(merge);
-  return group(sameBus, keyOf)
+  const sameBus = together(merged, busOf).map(merge);
+  return together(sameBus, keyOf)
     .map(merge)
     .map(finish)
     .sort(
@@ -43,16 +44,9 @@ function busOf(draft: Merged): string {
   return [draft.rule, "bus", stem, draft.bus, ...draft.boards].join("\u0000");
 }
 
-function group<T>(items: readonly T[], nameOf: (item: T) => string): T[][] {
-  const groups = new Map<string, T[]>();
-  for (const item of items) {
-    const name = nameOf(item);
-    const same = groups.get(name);
-    if (same) same.push(item);
-    else groups.set(name, [item]);
-  }
-  return [...groups.values()];
-}
+const together = <T>(drafts: readonly T[], nameOf: (draft: T) => string): T[][] => [
+  ...grouped(drafts, nameOf).values(),
+];
 
 function merge(drafts: readonly (Draft & { subjects?: string[] })[]): Merged {
   const inOrder = [...drafts].sort((a, b) => byName(a.subject, b.subject) || byName(a.why, b.why));
@@ -65,7 +59,8 @@ function merge(drafts: readonly (Draft & { subjects?: string[] })[]): Merged {
     subjects: distinct(inOrder.flatMap((draft) => draft.subjects ?? [draft.subject])),
     pins,
     boards: distinct(inOrder.flatMap((draft) => [...(draft.boards ?? draft.pins.map((pin) => pin.board))])),
-    edits: uniqueEdits(inOrder.flatMap((draft) => draft.edits)),
+    // All of it is mended or nothing is offered.
+    edits: inOrder.every((draft) => draft.edits.length > 0) ? uniqueEdits(inOrder.flatMap((draft) => draft.edits)) : [],
     facts: distinct(inOrder.flatMap((draft) => draft.facts ?? [])).join("; "),
   };
 }

@@ -97,9 +97,14 @@ function join(parties: Map<string, Party>, pin: NetPin): void {
   }
 }
 
+/** Names the copper of a party: its board and signal; a pin without a signal is copper of its own. */
+export const copperOf = ({ placement, signal, pins }: Party): string =>
+  signal === ""
+    ? `${placement}\u0000\u0000${pins[0]?.connectorId ?? ""}\u0000${pins[0]?.pin ?? ""}`
+    : `${placement}\u0000${signal}`;
+
 /** Whether both are the same copper of the same board: a bidirectional pin and its own input. */
 export const isSameCopper = (one: Party, other: Party): boolean =>
-  one.placement === other.placement &&
-  (one.signal === "" ? one.pins[0] === other.pins[0] : one.signal === other.signal);
+  one.placement === other.placement && one.signal === other.signal && copperOf(one) === copperOf(other);
 
 export const pinsOf = (parties: readonly Party[]): NetPin[] => parties.flatMap(({ pins }) => pins);

@@ -1,7 +1,8 @@
 import { familyAt, findFamily, type Family } from "../levels";
 import type { PinAt } from "./finding";
+import { grouped } from "./grouped";
 import type { IndexedBoard, IndexedConnector, IndexedPin } from "./index-design";
-import type { MachineIndex, PlacedBoard } from "./index-machine";
+import type { End, MachineIndex, PlacedBoard } from "./index-machine";
 import type { Net } from "./net";
 import { railBook, type RailBook } from "./rail-book";
 import { signalBook, type SignalBook } from "./signal-book";
@@ -11,6 +12,8 @@ import { studyNet, type NetStudy } from "./study-net";
 export type Survey = SignalBook & {
   index: MachineIndex;
   nets: NetStudy[];
+  /** Without supply and ground: what drives those is told by the rules about supplies alone. */
+  signalNets: NetStudy[];
   rails: RailBook;
   /** The family at the machine's logic supply; at its own where its figures do not reach that. */
   family(name: string): Family | undefined;
@@ -26,18 +29,24 @@ export type Survey = SignalBook & {
 
 export function surveyMachine(index: MachineIndex, nets: readonly Net[]): Survey {
   const { machine } = index;
-  const placements = new Map<string, PlacedBoard[]>();
-  for (const placed of index.placed) push(placements, placed.board.design.code, placed);
+  const placements = grouped(index.placed, ({ board }) => board.design.code);
   const partners = new Map<IndexedConnector, ReturnType<Survey["partnersOf"]>>();
+  const meet = (one: End, other: End) => {
+    const met = partners.get(one.connector) ?? [];
+    met.push({ at: one.placed, partner: other.connector, partnerAt: other.placed });
+    partners.set(one.connector, met);
+  };
   for (const { from, to } of index.meetings) {
-    push(partners, from.connector, { at: from.placed, partner: to.connector, partnerAt: to.placed });
-    push(partners, to.connector, { at: to.placed, partner: from.connector, partnerAt: from.placed });
+    meet(from, to);
+    meet(to, from);
   }
+  const studies = nets.map(studyNet);
   const placementsOf = ({ design }: IndexedBoard) => placements.get(design.code) ?? [];
   return {
     ...signalBook(machine),
     index,
-    nets: nets.map(studyNet),
+    nets: studies,
+    signalNets: studies.filter(({ power, ground }) => power.length === 0 && ground.length === 0),
     rails: railBook(machine),
     family: rememberFamilies(index),
     place: ({ label, board, connector, pin }) =>
@@ -51,12 +60,6 @@ export function surveyMachine(index: MachineIndex, nets: readonly Net[]): Survey
     placementsOf,
     partnersOf: (connector) => partners.get(connector) ?? [],
   };
-}
-
-function push<K, V>(map: Map<K, V[]>, key: K, value: V): void {
-  const list = map.get(key);
-  if (list) list.push(value);
-  else map.set(key, [value]);
 }
 
 function rememberFamilies({ machine }: MachineIndex): Survey["family"] {

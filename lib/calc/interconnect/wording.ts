@@ -32,6 +32,9 @@ export function subjectsListed(subjects: readonly string[]): string {
   return isRun ? `${first} … ${last}` : listed(subjects, 2);
 }
 
+/** The verb that suits the number: "drives" for one, "drive" for several. */
+export const verb = (count: number, one: string, several: string): string => (count === 1 ? one : several);
+
 /** "1 pin", "3 pins". */
 export const pinCount = (count: number): string => `${count} pin${count === 1 ? "" : "s"}`;
 

@@ -1,5 +1,6 @@
 import { pinsApartMm } from "../../connector";
 import type { Draft, Rule } from "../draft";
+import { grouped } from "../grouped";
 import type { IndexedConnector, IndexedPin } from "../index-design";
 import { distinct } from "../order";
 import type { Survey } from "../survey";
@@ -27,21 +28,8 @@ export const clockNeighbours: Rule = (survey) => {
       );
     }),
   );
-  const clocks = distinct(found.map(({ clock }) => clock.signal));
-  return clocks.flatMap((name) => [
-    ...told(
-      survey,
-      name,
-      found.filter(({ clock, beside }) => clock.signal === name && beside),
-      true,
-    ),
-    ...told(
-      survey,
-      name,
-      found.filter(({ clock, beside }) => clock.signal === name && !beside),
-      false,
-    ),
-  ]);
+  const byClock = grouped(found, ({ clock, beside }) => `${clock.signal}\u0000${beside ? 1 : 0}`);
+  return [...byClock.values()].flatMap((own) => told(survey, own));
 };
 
 const isClock = ({ classOf }: Survey, name: string) => classOf(name) === "clock";
@@ -54,13 +42,14 @@ function isBeside({ rails }: Survey, { face }: IndexedConnector, clock: PinInPla
   return pinsApartMm(face, clock.at, other.at) <= step + SLACK_MM;
 }
 
-type Beside = { clock: IndexedPin; pin: IndexedPin };
+type Beside = { clock: IndexedPin; pin: IndexedPin; beside: boolean };
 
-function told(survey: Survey, clock: string, found: readonly Beside[], isPair: boolean): Draft[] {
+function told(survey: Survey, found: readonly Beside[]): Draft[] {
+  const isPair = found.some(({ beside }) => beside);
+  const clock = found[0]?.clock.signal ?? "";
   // Of two clocks beside each other, the first by name tells it.
   const own = isPair ? found.filter(({ pin }) => clock < pin.signal) : found;
-  const [first] = own;
-  if (!first) return [];
+  if (own.length === 0) return [];
   const others = distinct(own.map(({ pin }) => pin.signal));
   const places = distinct(own.map(({ clock: at, pin }) => `${at.name} next to ${pin.name}`));
   const boards = distinct(own.map(({ pin }) => pin.connector.board));

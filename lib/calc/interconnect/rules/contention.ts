@@ -1,8 +1,9 @@
 import type { Draft, Rule } from "../draft";
 import { editPins } from "../edit-pins";
+import { grouped } from "../grouped";
 import { pinsOf, type NetStudy, type Party } from "../study-net";
 import type { Survey } from "../survey";
-import { capital, counted, listed, netName } from "../wording";
+import { capital, counted, listed, netName, verb } from "../wording";
 import { chooseGroup, groupWords } from "./enable-group";
 
 /**
@@ -11,7 +12,7 @@ import { chooseGroup, groupWords } from "./enable-group";
  * stand in their sheets.
  */
 export const twoPushPull: Rule = (survey) =>
-  survey.nets.flatMap((study): Draft[] => {
+  survey.signalNets.flatMap((study): Draft[] => {
     const pushing = withRole(study, "push-pull output");
     if (pushing.length < 2) return [];
     const choice = chooseGroup(survey, study);
@@ -37,7 +38,7 @@ export const twoPushPull: Rule = (survey) =>
  * meet: whether the net is a wired AND or a bus, only its builder knows.
  */
 export const mixedOutputs: Rule = (survey) =>
-  survey.nets.flatMap((study): Draft[] => {
+  survey.signalNets.flatMap((study): Draft[] => {
     const pushing = withRole(study, "push-pull output");
     const turns = [...withRole(study, "three-state output"), ...withRole(study, "bidirectional")];
     const open = withRole(study, "open-drain output");
@@ -55,7 +56,7 @@ export const mixedOutputs: Rule = (survey) =>
           ...common,
           weight: "must",
           title: (name) => `Open-drain and three-state outputs share ${name}`,
-          why: `${places(survey, open)} can pull low while ${places(survey, turns)} drives high.`,
+          why: `${places(survey, open)} can pull low while ${places(survey, turns)} ${verb(turns.length, "drives", "drive")} high.`,
           mend: "Make all of them open-drain with a pull-up, or all three-state in one group.",
           edits: [],
         },
@@ -68,7 +69,7 @@ export const mixedOutputs: Rule = (survey) =>
         ...common,
         weight: onlyBidirectional ? "should" : "must",
         title: (name) => `A push-pull output shares ${name} with ${kindWords(others)}`,
-        why: `${places(survey, pushing)} always drives; ${places(survey, others)} drives against it whenever it is on.`,
+        why: `${places(survey, pushing)} always drives; ${places(survey, others)} ${verb(others.length, "drives against it whenever it is on", "drive against it whenever they are on")}.`,
         mend: wired
           ? "Make it open-drain like the others."
           : `Make it three-state, ${groupWords(choice).replace("their", "its")}.`,
@@ -91,20 +92,15 @@ export const mixedOutputs: Rule = (survey) =>
  * direction is often one protocol's.
  */
 export const enableGroups: Rule = (survey) =>
-  survey.nets.flatMap((study): Draft[] => {
+  survey.signalNets.flatMap((study): Draft[] => {
     const turns = study.drivers.filter(({ role }) => role === "three-state output" || role === "bidirectional");
-    const groups = new Set(turns.map(({ enableGroup }) => enableGroup));
+    const groups = grouped(turns, ({ enableGroup }) => enableGroup);
     if (turns.length < 2 || (groups.size === 1 && !groups.has(""))) return [];
     const isProtocol = groups.size === 1 && turns.every(({ role }) => role === "bidirectional");
     const choice = chooseGroup(survey, study);
-    const told = [...groups].map((group) => {
-      const members = listed(
-        placeList(
-          survey,
-          turns.filter(({ enableGroup }) => enableGroup === group),
-        ),
-      );
-      return group === "" ? `${members}: no group` : `${members}: group ${group}`;
+    const told = [...groups].map(([group, parties]) => {
+      const members = places(survey, parties);
+      return group === "" ? `${members} in no group` : `${members} in ${group}`;
     });
     return [
       {
@@ -112,21 +108,19 @@ export const enableGroups: Rule = (survey) =>
         weight: isProtocol ? "look" : "should",
         subject: netName(study.net),
         title: (subject) => `Outputs that take turns on ${subject} are not in one group`,
-        why: `${told.join("; ")}. Nothing says that only one of them is on at a time.`,
+        why: `${listed(told, 3)}. Nothing says that only one of them is on at a time.`,
         mend: `Put them ${choice.from === "the net" ? `into the group ${choice.group}` : groupWords(choice)}, if one decoder selects them all.`,
         edits: editPins(pinsOf(turns), { enableGroup: choice.group }),
         pins: pinsOf(turns),
-        bus: [...groups].sort().join(","),
+        bus: [...groups.keys()].sort().join(","),
       },
     ];
   });
 
 const withRole = ({ drivers }: NetStudy, role: Party["role"]) => drivers.filter((party) => party.role === role);
 
-const placeList = ({ place }: Survey, parties: readonly Party[]): string[] =>
-  parties.flatMap(({ pins }) => pins.slice(0, 1).map(place));
-
-const places = (survey: Survey, parties: readonly Party[]): string => listed(placeList(survey, parties));
+const places = ({ place }: Survey, parties: readonly Party[]): string =>
+  listed(parties.flatMap(({ pins }) => pins.slice(0, 1).map(place)));
 
 function kindWords(parties: readonly Party[]): string {
   const words = [...new Set(parties.map(({ role }) => role))].map((role) =>

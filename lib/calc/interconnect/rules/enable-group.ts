@@ -19,9 +19,11 @@ export function chooseGroup(survey: Survey, { net, drivers }: NetStudy): GroupCh
 }
 
 function commonest(drivers: readonly Party[]): string | undefined {
-  const groups = drivers.map(({ enableGroup }) => enableGroup).filter((group) => group !== "");
-  const count = (group: string) => groups.filter((one) => one === group).length;
-  return distinct(groups).sort((a, b) => count(b) - count(a) || byName(a, b))[0];
+  const counts = new Map<string, number>();
+  for (const { enableGroup } of drivers) {
+    if (enableGroup !== "") counts.set(enableGroup, (counts.get(enableGroup) ?? 0) + 1);
+  }
+  return [...counts].sort(([a, many], [b, others]) => others - many || byName(a, b))[0]?.[0];
 }
 
 function nearestGroup({ index }: Survey, { pins }: Party): string[] {

@@ -1,5 +1,5 @@
 import type { Draft, Rule } from "../draft";
-import { driverLoading } from "../net-currents";
+import { driverLoadings } from "../net-currents";
 import { pinsOf } from "../study-net";
 import { listed, netName } from "../wording";
 
@@ -8,10 +8,11 @@ import { listed, netName } from "../wording";
  * worst off speaks. No edits: fewer loads, a buffer or a stronger family change the boards, not only the pin map.
  */
 export const fanOut: Rule = (survey) =>
-  survey.nets.flatMap((study): Draft[] => {
+  survey.signalNets.flatMap((study): Draft[] => {
     if (study.receivers.length === 0) return [];
-    const overloaded = study.drivers.flatMap((driver) => {
-      const loading = driverLoading(survey, study, driver);
+    const loadings = driverLoadings(survey, study);
+    const overloaded = study.drivers.flatMap((driver, at) => {
+      const loading = loadings[at];
       if (!loading || loading.holds) return [];
       const share = Math.max(loading.high.usedA / loading.high.availableA, loading.low.usedA / loading.low.availableA);
       return [{ driver, loading, share }];

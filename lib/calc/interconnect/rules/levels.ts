@@ -12,7 +12,7 @@ import { ttlTwin } from "./ttl-twin";
  * lib/calc/levels for figures and sources. One finding for high and one for low; the pair that is worst speaks.
  */
 export const levelsDoNotFit: Rule = (survey) =>
-  survey.nets.flatMap((study): Draft[] => {
+  survey.signalNets.flatMap((study): Draft[] => {
     if (study.drivers.length === 0 || study.receivers.length === 0) return [];
     const pairs = levelPairs(survey, study);
     const high = pairs.filter(({ margins, highByPullUp }) => margins.highVolts < 0 && !highByPullUp);

@@ -13,6 +13,9 @@ export function offeredPins(survey: Survey, connector: IndexedConnector, wanted:
     .filter(({ name, signal }) =>
       rest.every(({ partner }) => partner.byName.get(name.toLowerCase())?.some((pin) => pin.signal === signal)),
     )
-    .filter(({ name }) => (connector.byName.get(name.toLowerCase()) ?? []).every((pin) => pin.signal === ""))
+    .filter(({ name }) => (connector.byName.get(name.toLowerCase()) ?? []).every(isEmpty))
     .map(({ name, signal }) => ({ pin: name, signal }));
 }
+
+const isEmpty = ({ signal, design }: IndexedPin) =>
+  signal === "" && (design.role === "passive" || design.role === "no connection");

@@ -2,7 +2,7 @@ import type { Draft, Rule } from "../draft";
 import { clearPins, editPins } from "../edit-pins";
 import { distinct } from "../order";
 import { pinsOf } from "../study-net";
-import { listed, netName } from "../wording";
+import { listed, netName, verb } from "../wording";
 
 /**
  * A supply or ground pin on a net that outputs drive: the output works against the supply. An input on a supply is right
@@ -18,7 +18,7 @@ export const powerOnSignal: Rule = (survey) =>
       const outputs = pinsOf(drivers);
       const shown = [...outputs, ...supply.slice(0, 6)];
       const common = { rule: "power-on-signal", weight: "must", pins: shown } as const;
-      const against = `${listed(outputs.map(place), 2)} drives against ${listed(supply.map(place), 2)}`;
+      const against = `${listed(outputs.map(place), 2)} ${verb(outputs.length, "drives", "drive")} against ${listed(supply.map(place), 2)}`;
       // Where the supply pin's own name is a rail, the output is misplaced; else the role of the supply pin is a slip.
       const rail = supply.find(({ signal }) => rails.isRail(signal));
       return rail
@@ -27,7 +27,7 @@ export const powerOnSignal: Rule = (survey) =>
               ...common,
               subject: rail.signal,
               title: (subject) => `An output drives ${subject}`,
-              why: `${against}, which ${rail.role === "ground" ? "is ground" : "carries the supply"}.`,
+              why: `${against}, which ${verb(supply.length, "is", "are")} ${rail.signal}.`,
               mend: "Take the output off this pin.",
               edits: clearPins(outputs),
             },
@@ -37,7 +37,7 @@ export const powerOnSignal: Rule = (survey) =>
               ...common,
               subject: netName(net),
               title: (subject) => `A supply pin sits on ${subject}`,
-              why: `${against}, which has the role ${supply[0]?.role ?? "power"}.`,
+              why: `${against}, which ${verb(supply.length, "has", "have")} the role ${supply[0]?.role ?? "power"}.`,
               mend: "Give the pin its true role.",
               edits: editPins(supply, { role: "passive" }),
             },
@@ -51,7 +51,7 @@ export const powerOnSignal: Rule = (survey) =>
         weight: "look",
         subject: listed(distinct(strangers.map(({ signal }) => signal)), 2),
         title: (subject) => `${subject} is tied to ${netName(net)}`,
-        why: `${listed(strangers.map(place), 3)} listens to ${netName(net)} all the time.`,
+        why: `${listed(strangers.map(place), 3)} ${verb(strangers.length, "listens", "listen")} to ${netName(net)} all the time.`,
         mend: "Accept it if the input is tied on purpose; else move it to its signal's pin.",
         // Only the builder knows whether it is tied on purpose.
         edits: [],

@@ -17,7 +17,7 @@ const isOpenDrain = ({ drivers }: NetStudy) =>
  * on beyond a connector that meets nothing known: the resistor may stand there.
  */
 export const noPullUp: Rule = (survey) =>
-  survey.nets.flatMap((study): Draft[] => {
+  survey.signalNets.flatMap((study): Draft[] => {
     if (!isOpenDrain(study) || study.pullUps.length > 0) return [];
     const { net, drivers, mayBeHeardOutside } = study;
     const window = netPullUpWindow(survey, study);
@@ -39,7 +39,7 @@ export const noPullUp: Rule = (survey) =>
 
 /** Several resistors are one of less ohms; most often two boards each thought of it. A look while the value still fits. */
 export const severalPullUps: Rule = (survey) =>
-  survey.nets.flatMap((study): Draft[] => {
+  survey.signalNets.flatMap((study): Draft[] => {
     const { net, pullUps } = study;
     const ohm = pullUpOhm(study);
     if (!isOpenDrain(study) || pullUps.length < 2 || ohm === null) return [];
@@ -62,7 +62,7 @@ export const severalPullUps: Rule = (survey) =>
 
 /** A resistance outside [Rmin, Rmax]: the outputs cannot pull low, or the line does not reach its level. */
 export const pullUpOutside: Rule = (survey) =>
-  survey.nets.flatMap((study): Draft[] => {
+  survey.signalNets.flatMap((study): Draft[] => {
     const ohm = pullUpOhm(study);
     if (!isOpenDrain(study) || ohm === null) return [];
     const judgement = judged(survey, study, ohm);

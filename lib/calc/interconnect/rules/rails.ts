@@ -2,7 +2,7 @@ import type { Draft, Rule } from "../draft";
 import { editPins } from "../edit-pins";
 import type { NetPin } from "../net";
 import { distinct } from "../order";
-import { listed, volts } from "../wording";
+import { listed, verb, volts } from "../wording";
 
 const named = (pins: readonly NetPin[], name: string) => pins.filter((pin) => pin.signal === name);
 
@@ -74,7 +74,7 @@ export const railRole: Rule = (survey) =>
         weight: "should",
         subject: name,
         title: (subject) => `${subject} is a supply on one pin and ground on another`,
-        why: `${listed(wrong.map(survey.place))} says otherwise than the rest.`,
+        why: `${listed(wrong.map(survey.place))} ${verb(wrong.length, "says", "say")} otherwise than the rest.`,
         mend: `Give ${wrong.length === 1 ? "this pin" : "these pins"} the role ${role}.`,
         edits: editPins(wrong, { role }),
         pins: wrong,

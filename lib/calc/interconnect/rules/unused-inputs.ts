@@ -1,6 +1,6 @@
 import type { Draft, Rule } from "../draft";
 import { editPins } from "../edit-pins";
-import { listed } from "../wording";
+import { listed, verb } from "../wording";
 
 /** Holds a lone CMOS input without loading anything; common practice, no source. */
 const TIE_OHM = 10_000;
@@ -28,7 +28,7 @@ export const openInputs: Rule = (survey) =>
           weight: "should",
           subject: name,
           title: (subject) => `Unused CMOS inputs on ${subject} are not tied`,
-          why: `${listed(open.map((pin) => pin.name))} ${open.length === 1 ? "carries" : "carry"} no signal. A CMOS input that floats draws current and switches at random.`,
+          why: `${listed(open.map((pin) => pin.name))} ${verb(open.length, "carries", "carry")} no signal. A CMOS input that floats draws current and switches at random.`,
           mend: "Tie each to the supply by 10\u202fkΩ, or to ground.",
           edits: editPins(pins, { pullUpOhm: TIE_OHM }),
           pins,
