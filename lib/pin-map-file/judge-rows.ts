@@ -1,4 +1,4 @@
-import { busNames } from "@/lib/pin-map/bus-range";
+import { busNames } from "@/lib/calc/signal-names";
 import { EMPTY_TEXTS, isEmptyRow, PIN_COLUMNS, type PinTexts } from "@/lib/pin-map/pin-columns";
 import type { KnownNames } from "@/lib/pin-map/read-cell";
 import { pinTexts, readPinRow } from "@/lib/pin-map/read-pin-row";

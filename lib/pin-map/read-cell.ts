@@ -1,6 +1,6 @@
 import { PIN_ROLES, type PinRole } from "@/lib/calc/interconnect";
 import { formatQuantity, parseQuantity } from "@/lib/calc/units";
-import { busNames } from "./bus-range";
+import { busNames } from "@/lib/calc/signal-names";
 import type { PinColumn } from "./pin-columns";
 import { readRole } from "./pin-role";
 

@@ -1,4 +1,4 @@
-import { busNames } from "@/lib/pin-map/bus-range";
+import { busNames } from "@/lib/calc/signal-names";
 import { areaOf, type Area, type Selection } from "./selection";
 import { changeOf, columnAt, headingAt, textAt, type CellChange, type TableText } from "./table-text";
 

@@ -3,7 +3,7 @@ import { describe, expect, test } from "vitest";
 import { clearCells, fillAll, fillDown, typeInto } from "@/components/wiring/grid/fill";
 import { at, type Selection } from "@/components/wiring/grid/selection";
 import { placeOf } from "@/components/wiring/grid/table-text";
-import { busNames } from "@/lib/pin-map/bus-range";
+import { busNames } from "@/lib/calc/signal-names";
 import { pinsOf, table } from "./table";
 
 const SIGNAL = placeOf("signal");

@@ -1,0 +1,2 @@
+export { busNames } from "./bus-range";
+export { signalKey, signalKeys } from "./signal-key";
