@@ -16,6 +16,8 @@ export const PERMISSIONS = {
   "log.write": bench,
   "unit.edit": bench,
   "slot.edit": bench,
+  "fault.write": bench,
+  "rework.record": bench,
   "wiring.edit": bench,
   "parts.edit": bench,
   "finding.accept": maintainers,

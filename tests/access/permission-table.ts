@@ -9,7 +9,9 @@ const maintainers: readonly Role[] = ["maintainer"];
 export const MAY: Record<Permission, readonly Role[]> = {
   // see project, traveler, captures, log
   "project.see": everyone,
-  // record / void own attempt, attach, log entry
+  // record / void own attempt, attach, log entry, fault, rework
+  "fault.write": bench,
+  "rework.record": bench,
   "attempt.record": bench,
   "attempt.void-own": bench,
   "evidence.attach": bench,
