@@ -1,4 +1,7 @@
 import { describe, expect, it } from "vitest";
+import { acceptFinding as acceptAction } from "@/app/(workshop)/projects/[project]/wiring/findings/actions";
+import { loadProjectWeek } from "@/lib/digest/project-week";
+import { wiringLines } from "@/lib/digest/wiring-lines";
 import { acceptFinding } from "@/lib/finding/accept-finding";
 import { loadFindings } from "@/lib/finding/load-findings";
 import { withdrawAcceptance } from "@/lib/finding/withdraw-acceptance";
@@ -51,6 +54,24 @@ describe("a finding of the rule check", () => {
     expect(rackSentence(rack)).toContain("in the wiring must be mended.");
   });
 
+  it("is counted in the weekly mail, and named in the one after it was found", async () => {
+    const project = await withTwoDrivers();
+    const { title } = await found(project);
+    const now = Date.now();
+    const [lastWeek, thisWeek] = [
+      { since: new Date(now - 1_209_600_000), until: new Date(now - 604_800_000) },
+      { since: new Date(now - 604_800_000), until: new Date(now + 60_000) },
+    ];
+    const week = await loadProjectWeek(project.id, thisWeek);
+    if (!week) throw new Error("no week");
+    expect(wiringLines(week, thisWeek)?.fresh).toContain(title);
+    expect(wiringLines(week, thisWeek)?.sentence).toMatch(/open in the wiring: \d+ must be mended/);
+    expect(wiringLines(week, lastWeek)).toMatchObject({
+      fresh: [],
+      sentence: expect.stringContaining("None of them is new."),
+    });
+  });
+
   it("goes by itself when the pins are mended", async () => {
     const project = await withTwoDrivers();
     await project.wire("CON.J1", [{ pin: "a10", signal: "PH6", role: "input", family: "HC" }]);
@@ -66,6 +87,27 @@ describe("an acceptance", () => {
     const open = (await loadFindings(project.scopes.builder)).findings.filter((one) => !one.accepted);
     const must = open.filter(({ weight }) => weight === "must");
     expect((await loadPlaceCounts(project.scopes.builder)).toMend).toBe(must.length);
+  });
+
+  it("is a maintainer's to give: a builder is refused, and the finding stays open", async () => {
+    const project = await withTwoDrivers();
+    const { key, facts } = await found(project);
+    const input = { ...project.write(), key, facts, reason: "It is fine." };
+    for (const viewer of [project.viewers.builder, project.viewers.collaborator]) {
+      expect(await acceptAction.as(viewer, input)).toMatchObject({ ok: false, error: { code: "forbidden" } });
+    }
+    expect((await found(project)).accepted).toBeNull();
+    expect(await acceptAction.as(project.viewers.maintainer, input)).toMatchObject({ ok: true });
+  });
+
+  it("wants a reason", async () => {
+    const project = await withTwoDrivers();
+    const { key, facts } = await found(project);
+    const input = { ...project.write(), key, facts, reason: "  " };
+    expect(await acceptAction.as(project.viewers.maintainer, input)).toMatchObject({
+      ok: false,
+      error: { fields: { reason: "Say why it may stay as it is." } },
+    });
   });
 
   it("survives a change elsewhere and every run of the check after it", async () => {

@@ -45,7 +45,7 @@ export function HowItWasRead({ file, read, correct }: Props) {
         tabIndex={0}
         role="group"
         aria-label="First rows of the file, scrolls sideways"
-        className="-mx-4 mt-4 overflow-x-auto px-4 pb-1 sm:-mx-5 sm:px-5"
+        className="relative -mx-4 mt-4 overflow-x-auto px-4 pb-1 sm:-mx-5 sm:px-5"
       >
         <table className="border-collapse text-left text-sm">
           <thead>

@@ -4,6 +4,7 @@ import { useRouter } from "next/navigation";
 import { useMemo } from "react";
 import type { z } from "zod";
 import { Page } from "@/components/shell/Page";
+import { buttonStyle } from "@/components/ui/button-style";
 import { ButtonLink } from "@/components/ui/ButtonLink";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { FileDrop } from "@/components/ui/FileDrop";
@@ -64,7 +65,18 @@ export function TakePlace({ sources, known, asked, project, take }: Props) {
     <Page
       title="Take a file"
       lede="A table of pins as a spreadsheet saves it. Nothing is taken until you have seen what would change and confirm it."
-      actions={<ButtonLink href={editor}>Back to the pins</ButtonLink>}
+      actions={
+        <>
+          <a
+            href={`/api/projects/${project}/pin-map${chosen ? `?connector=${chosen.id}` : ""}`}
+            download
+            className={buttonStyle()}
+          >
+            {chosen ? `${nameOf(chosen)} as CSV` : "All pins as CSV"}
+          </a>
+          <ButtonLink href={editor}>Back to the pins</ButtonLink>
+        </>
+      }
     >
       <div className="flex min-w-0 flex-col gap-5">
         <Panel>
