@@ -1,7 +1,7 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useState } from "react";
+import { useState, type ReactNode } from "react";
 import { Page } from "@/components/shell/Page";
 import { Badge } from "@/components/ui/Badge";
 import { Button } from "@/components/ui/Button";
@@ -27,13 +27,25 @@ type Props = {
   board: BoardView;
   /** Its packages by the plan of its parts; undefined while it uses no blocks. */
   spares: BoardSpares | undefined;
+  /** What its first power should show; nothing while its budget is not known. */
+  firstPower: ReactNode;
   can: { editBoard: boolean; editUnits: boolean; editProcedure: boolean; purge: boolean };
   boardActs: Omit<BoardActs, "create">;
   revisionActs: RevisionActs;
   unitActs: UnitActs;
 };
 
-export function BoardPlace({ project, zone, board, spares, can, boardActs, revisionActs, unitActs }: Props) {
+export function BoardPlace({
+  project,
+  zone,
+  board,
+  spares,
+  firstPower,
+  can,
+  boardActs,
+  revisionActs,
+  unitActs,
+}: Props) {
   const router = useRouter();
   const { act } = useAct();
   const [isEditing, setEditing] = useState(false);
@@ -111,6 +123,7 @@ export function BoardPlace({ project, zone, board, spares, can, boardActs, revis
       />
       <ConnectorPanel board={board} />
       {spares && <PackagesPanel project={project} zone={zone} code={board.code} spares={spares} />}
+      {firstPower}
       <Dialog title="Change the board" isOpen={isEditing} onOpenChange={setEditing}>
         {(close) => (
           <BoardForm

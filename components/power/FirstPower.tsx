@@ -3,6 +3,7 @@
 import Link from "next/link";
 import { OfferToCheck } from "@/components/offer/OfferToCheck";
 import type { OfferAct } from "@/components/offer/offer-acts";
+import { ButtonLink } from "@/components/ui/ButtonLink";
 import { Notice } from "@/components/ui/Notice";
 import { Panel } from "@/components/ui/Panel";
 import type { CurrentWindow } from "@/lib/calc/power";
@@ -16,12 +17,24 @@ type Props = {
   place: OfferPlace;
   canEdit: boolean;
   offer: OfferAct;
+  /** Where the budget stands that it comes from; left away beside it. */
+  budgetHref?: string;
 };
 
 /** What a unit should draw when it is switched on for the first time, offered to its power-on checks. */
-export function FirstPower({ project, windows, place, canEdit, offer }: Props) {
+export function FirstPower({ project, windows, place, canEdit, offer, budgetHref }: Props) {
   return (
-    <Panel title="For the power-on checks" note={`one unit of ${place.board} on the bench`}>
+    <Panel
+      title="For the power-on checks"
+      note={`one unit of ${place.board} on the bench`}
+      actions={
+        budgetHref && (
+          <ButtonLink href={budgetHref} size="sm">
+            See its budget
+          </ButtonLink>
+        )
+      }
+    >
       <div className="flex flex-col gap-5">
         {windows.map((window) => (
           <RailOffer
@@ -48,7 +61,7 @@ export function FirstPower({ project, windows, place, canEdit, offer }: Props) {
   );
 }
 
-type RailOfferProps = Omit<Props, "windows" | "offer"> & {
+type RailOfferProps = Omit<Props, "windows" | "offer" | "budgetHref"> & {
   window: CurrentWindow;
   /** Names of all rails that come to the board, the one of its logic first. */
   rails: readonly string[];

@@ -39,7 +39,7 @@ function logicOf(
 ): { part: LogicPart; family: string } | undefined {
   const mine = own.find(({ number }) => number.toLowerCase() === partNumber.trim().toLowerCase());
   if (mine) return { part: mine, family: Object.hasOwn(mine.perFamily, family) ? family : firstOf(mine, family) };
-  const [, letters, digits] = /^[A-Z]{0,3}74([A-Z]{1,5})(\d{2,4})\b/i.exec(partNumber.trim()) ?? [];
+  const [, letters, digits] = /^[A-Z]{0,3}74([A-Z]{1,5})(\d{2,4})(?!\d)/i.exec(partNumber.trim()) ?? [];
   const named = letters === undefined ? undefined : findFamily(families, letters);
   const part = digits === undefined ? undefined : findPart(digits);
   return part && named ? { part, family: named.name } : undefined;

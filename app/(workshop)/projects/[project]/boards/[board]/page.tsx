@@ -1,11 +1,14 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
 import { BoardPlace } from "@/components/board/BoardPlace";
+import { FirstPower } from "@/components/power/FirstPower";
 import { can } from "@/lib/access/permissions";
 import { definePage } from "@/lib/actions/define-page";
 import { loadBoard } from "@/lib/board/load-board";
 import { loadBoardSpares } from "@/lib/board-plan/load-board-spares";
+import { loadFirstPower } from "@/lib/power/load-first-power";
 import { archiveBoard, createRevision, editBoard, purgeBoard, releaseRevision, restoreBoard } from "../actions";
+import { offerToCheck } from "./procedure/actions";
 import { archiveUnit, createUnit, editUnit, purgeUnit, restoreUnit } from "../unit-actions";
 
 export async function generateMetadata({ params }: { params: Promise<{ board: string }> }): Promise<Metadata> {
@@ -17,19 +20,35 @@ export default definePage({
   path: (params) => `/projects/${params.project}/boards/${params.board}`,
   render: async (scope, { params }) => {
     const code = params.board ?? "";
-    const [board, spares] = await Promise.all([loadBoard(scope, code), loadBoardSpares(scope, code)]);
+    const [board, spares, first] = await Promise.all([
+      loadBoard(scope, code),
+      loadBoardSpares(scope, code),
+      loadFirstPower(scope, code),
+    ]);
     if (!board) notFound();
     const open = !scope.archived;
+    const editProcedure = open && can(scope.role, "procedure.edit");
     return (
       <BoardPlace
         project={scope.slug}
         zone={scope.viewer.timeZone}
         board={board}
         spares={spares}
+        firstPower={
+          first && (
+            <FirstPower
+              project={scope.slug}
+              {...first}
+              budgetHref={`/projects/${scope.slug}/wiring/power?board=${encodeURIComponent(board.code)}#board`}
+              canEdit={editProcedure}
+              offer={offerToCheck}
+            />
+          )
+        }
         can={{
           editBoard: open && can(scope.role, "board.edit"),
           editUnits: open && can(scope.role, "unit.edit"),
-          editProcedure: open && can(scope.role, "procedure.edit"),
+          editProcedure,
           purge: open && can(scope.role, "board.purge"),
         }}
         boardActs={{ edit: editBoard, archive: archiveBoard, restore: restoreBoard, purge: purgeBoard }}

@@ -3,6 +3,7 @@ import { PowerPlace } from "@/components/power/PowerPlace";
 import { can } from "@/lib/access/permissions";
 import { definePage } from "@/lib/actions/define-page";
 import { loadOfferPlaces } from "@/lib/offer/load-offer-places";
+import { CURRENT_CHECKS } from "@/lib/power/load-first-power";
 import { loadPower } from "@/lib/power/load-power";
 import { offerToCheck } from "../../boards/[board]/procedure/actions";
 import { removePowerLine, removeRail, saveConditions, savePowerLine, saveRail } from "./actions";
@@ -17,8 +18,7 @@ export default definePage({
     const asked = typeof search.board === "string" ? search.board.toUpperCase() : "";
     const board = view.boards.find(({ code }) => code === asked) ?? view.boards.find(({ power }) => power !== null);
     const chosen = board?.code ?? view.boards[0]?.code ?? "";
-    const currents = { stage: "power-on", kind: "reading", typed: { unit: "A" }, board: chosen } as const;
-    const [place] = chosen === "" ? [] : await loadOfferPlaces(scope, currents);
+    const [place] = chosen === "" ? [] : await loadOfferPlaces(scope, { ...CURRENT_CHECKS, board: chosen });
     const open = !scope.archived;
     return (
       <PowerPlace
