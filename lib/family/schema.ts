@@ -73,7 +73,6 @@ export const saveFamilyInput = head
     return checked.success ? { ...rest, figures: checked.data } : z.NEVER;
   });
 export type SaveFamilyInput = z.output<typeof saveFamilyInput>;
-export type SaveFamilyTyped = z.input<typeof saveFamilyInput>;
 
 type Context = { addIssue: (issue: { code: "custom"; path: string[]; message: string; input?: unknown }) => void };
 

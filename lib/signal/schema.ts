@@ -62,7 +62,6 @@ export const saveSignalInput = z
     context.addIssue({ code: "custom", path: ["aliases"], message });
   });
 export type SaveSignalInput = z.output<typeof saveSignalInput>;
-export type SaveSignalTyped = z.input<typeof saveSignalInput>;
 
 export const removeSignalInput = z.object({ project: z.string(), writeId, name: signalName, version: z.int() });
 export type RemoveSignalInput = z.output<typeof removeSignalInput>;

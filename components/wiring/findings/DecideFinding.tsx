@@ -28,8 +28,8 @@ export function AcceptFinding({
       }
       explanation={
         <>
-          It no longer counts as open, on the rack and in the weekly e-mail. It stays accepted until its facts change,
-          other pins, another family, other figures; then it is open again. Your name and the reason stand beside it.
+          It no longer counts as open, on the rack and in the weekly e-mail. It stays accepted until its facts change
+          (other pins, another family, other figures); then it is open again. Your name and the reason stand beside it.
         </>
       }
       label="Why it may stay as it is"

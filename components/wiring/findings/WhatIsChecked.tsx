@@ -17,17 +17,17 @@ export function WhatIsChecked() {
         The machine as it is put together, every board in its slot, with each change of a pin, a signal, a family or a
         slot. A planning aid, never a proof of safety.
       </p>
-      <dl className="mt-3 flex flex-col gap-2 text-sm">
+      <ul aria-label="How much a finding weighs" className="mt-3 flex flex-col gap-2 text-sm">
         {(["must", "should", "look"] as const).map((weight) => (
-          <div key={weight} className="flex gap-2.5">
+          <li key={weight} className="flex gap-2.5">
             <WeightMark weight={weight} className="mt-0.5" />
-            <div>
-              <dt className="font-semibold">{WEIGHT_WORDS[weight]}</dt>
-              <dd className="text-ink-soft">{MEANS[weight]}</dd>
-            </div>
-          </div>
+            <span>
+              <b className="block font-semibold">{WEIGHT_WORDS[weight]}</b>
+              <span className="text-ink-soft">{MEANS[weight]}</span>
+            </span>
+          </li>
         ))}
-      </dl>
+      </ul>
       <ul className="mt-3 border-t border-rule pt-1">
         {RULE_FAMILIES.map(({ name, looksAt, follows, leavesOut }) => (
           <li key={name}>

@@ -59,7 +59,7 @@ export function NetPanel({ line, facts, machine, signal, project, canEdit, save,
                 signal={signal}
                 project={project}
                 save={save}
-                trigger={<Button size="sm">{signal.version === 0 ? "Say more" : "Change"}</Button>}
+                trigger={<Button size="sm">Edit the signal</Button>}
               />
             )}
             <span className="max-lg:hidden">

@@ -49,9 +49,9 @@ export function NetTouches({ net, project }: { net: Net; project: string }) {
                     <Link
                       key={`${pin.connectorId} ${pin.pin}`}
                       href={pinAddress(project, pin)}
-                      className="link mono whitespace-nowrap text-sm"
+                      className="link mono inline-flex min-h-6 items-center gap-1 whitespace-nowrap text-sm"
                     >
-                      {pin.connector} {pin.pin}
+                      <span>{pin.connector}</span> <span>{pin.pin}</span>
                     </Link>
                   ))}
                 </span>

@@ -47,7 +47,7 @@ export function NetsPlace({ machine, findings, signals, project, canEdit, save }
     );
   }
   return (
-    <Page title="Nets" lede={netsSentence(lines, machine)} className={chosen ? "max-lg:[&>header]:hidden" : ""}>
+    <Page title="Nets" lede={netsSentence(lines, machine)} className={chosen ? "max-lg:[&>header]:sr-only" : ""}>
       <div
         className={clsx(
           "grid grid-cols-1 items-start gap-5",
