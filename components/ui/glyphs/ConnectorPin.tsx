@@ -68,14 +68,14 @@ function RolePin({ role, box, at, patterns }: RolePinProps) {
         className={isSolid ? "fill-current stroke-current" : "fill-raised stroke-current"}
         strokeWidth={at.room * 0.06}
       />
-      {pattern !== undefined && <rect {...box} fill={`url(#${patternId(patterns, role)})`} />}
+      {pattern !== undefined && <rect {...box} fill={`url(#${patternId(patterns, role)})`} opacity="0.7" />}
       <text
         x={at.x}
         y={at.y + at.room * 0.19}
         textAnchor="middle"
         fontSize={at.room * 0.54}
         className={clsx("mono font-semibold", isSolid ? "fill-paper" : "fill-ink stroke-raised")}
-        strokeWidth={at.room * 0.16}
+        strokeWidth={at.room * 0.13}
         strokeLinejoin="round"
         paintOrder="stroke"
         style={{ fontSizeAdjust: "none" }}

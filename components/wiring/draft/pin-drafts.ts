@@ -65,17 +65,25 @@ export const changedPins = (drafts: Drafts): number =>
 export const rowsToSave = (kept: KeptMap, drafts: Drafts, connectorId: string): (PinTexts & { pin: string })[] =>
   Object.keys(drafts[connectorId]?.pins ?? {}).map((pin) => ({ pin, ...shownTexts(kept, drafts, connectorId, pin) }));
 
-/** After a save the server has what was sent; what was typed meanwhile stays a change. */
-export function afterSave(
-  kept: KeptMap,
-  connectorId: string,
-  version: number,
-  sent: readonly (PinTexts & { pin: string })[],
-): KeptMap {
+/** A row as it was sent, and the texts that stand for it once the server has read it (an empty role is implied). */
+export type SentRow = { pin: string; typed: PinTexts; stored: PinTexts };
+
+/** After a save the server has what was sent. */
+export function afterSave(kept: KeptMap, connectorId: string, version: number, sent: readonly SentRow[]): KeptMap {
   const rows = { ...kept[connectorId]?.rows };
-  for (const { pin, ...texts } of sent) {
-    if (isEmptyRow(texts)) delete rows[pin];
-    else rows[pin] = texts;
+  for (const { pin, stored } of sent) {
+    if (isEmptyRow(stored)) delete rows[pin];
+    else rows[pin] = stored;
   }
   return { ...kept, [connectorId]: { version, rows } };
+}
+
+/** What was typed while a save was on its way: cells whose text is another one than was sent. */
+export function typedSince(draft: ConnectorDraft, sent: readonly SentRow[]): ConnectorDraft {
+  const pins = Object.entries(draft.pins).map(([pin, { typed, was }]) => {
+    const row = sent.find((one) => one.pin === pin)?.typed;
+    const later = PIN_COLUMNS.filter((column) => typed[column] !== undefined && typed[column] !== row?.[column]);
+    return [pin, { typed: Object.fromEntries(later.map((column) => [column, typed[column]])), was }] as const;
+  });
+  return { ...draft, pins: Object.fromEntries(pins) };
 }

@@ -7,6 +7,7 @@ import {
   rebased,
   rowsToSave,
   shownTexts,
+  typedSince,
   type Drafts,
   type KeptMap,
 } from "@/components/wiring/draft/pin-drafts";
@@ -54,12 +55,17 @@ describe("what was typed and not saved", () => {
     expect(applyChanges(drafts, kept, [write(drafts, "a1", "GND")])).toEqual({});
   });
 
-  test("stays after a save that began before it", () => {
-    const first = applyChanges({}, kept, [write({}, "a1", "0V")]);
-    const sent = rowsToSave(kept, first, "J1");
+  test("stays after a save that began before it, and a role that was left empty does not come back as a change", () => {
+    const first = applyChanges({}, kept, [write({}, "a1", "", "role")]);
+    const sent = rowsToSave(kept, first, "J1").map(({ pin, ...typed }) => ({
+      pin,
+      typed,
+      stored: { ...typed, role: "ground" },
+    }));
     const second = applyChanges(first, kept, [write(first, "a2", "CLK")]);
     const now = afterSave(kept, "J1", 4, sent);
-    const draft = second.J1 && rebased(second.J1, now.J1 ?? { version: 0, rows: {} });
+    const draft = second.J1 && rebased(typedSince(second.J1, sent), now.J1 ?? { version: 0, rows: {} });
+    expect(now.J1?.rows.a1).toMatchObject({ signal: "GND", role: "ground" });
     expect(draft).toMatchObject({ version: 4, pins: { a2: { typed: { signal: "CLK" } } } });
     expect(Object.keys(draft?.pins ?? {})).toEqual(["a2"]);
   });

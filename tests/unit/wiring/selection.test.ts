@@ -1,8 +1,10 @@
 import { describe, expect, test } from "vitest";
-import { placeAfterKey } from "@/components/wiring/grid/key-moves";
+import { commandFor, type Pressed } from "@/components/wiring/grid/key-commands";
 import { areaOf, at, everything, moveBy, moveTo, nextCell } from "@/components/wiring/grid/selection";
 
 const size = { rows: 64, columns: 8 };
+const press = (pressed: Partial<Pressed> & { key: string }) =>
+  commandFor({ isControl: false, isShift: false, isAlt: false, ...pressed }, { row: 10, column: 3 }, size, 20);
 
 describe("the cell one is in", () => {
   test("stays in the table at its edges", () => {
@@ -25,18 +27,46 @@ describe("the cell one is in", () => {
     ["PageDown", false, { row: 29, column: 3 }],
     ["PageUp", false, { row: -9, column: 3 }],
     ["ArrowDown", true, { row: 63, column: 3 }],
-  ])("goes with %s (with control: %s) where a spreadsheet's goes", (key, isJump, place) => {
-    expect(placeAfterKey({ key, isJump }, { row: 10, column: 3 }, size, 20)).toEqual(place);
-  });
-
-  test("is not moved by a letter, nor by a name that objects have anyway", () => {
-    expect(placeAfterKey({ key: "x", isJump: false }, { row: 1, column: 1 }, size, 20)).toBeUndefined();
-    expect(placeAfterKey({ key: "toString", isJump: false }, { row: 1, column: 1 }, size, 20)).toBeUndefined();
+    ["ArrowLeft", false, { row: 10, column: 2 }],
+  ])("goes with %s (with control: %s) where a spreadsheet's goes", (key, isControl, to) => {
+    expect(press({ key, isControl })).toEqual({ kind: "move", to, extend: false });
+    expect(press({ key, isControl, isShift: true })).toEqual({ kind: "move", to, extend: true });
   });
 
   test("is all of the table after select all, and none of an empty one", () => {
     expect(areaOf(everything(size, { row: 5, column: 5 }))).toEqual({ top: 0, bottom: 63, left: 0, right: 7 });
     expect(everything({ rows: 0, columns: 8 }, { row: 0, column: 0 }).focus).toEqual({ row: 0, column: 0 });
+  });
+});
+
+describe("a key", () => {
+  test.each([
+    ["Enter", {}, { kind: "edit" }],
+    ["F2", {}, { kind: "edit" }],
+    ["p", {}, { kind: "edit", text: "p" }],
+    ["+", { isShift: true }, { kind: "edit", text: "+" }],
+    ["Delete", {}, { kind: "clear" }],
+    ["Escape", {}, { kind: "one-cell" }],
+    ["d", { isControl: true }, { kind: "fill-down" }],
+    ["a", { isControl: true }, { kind: "all" }],
+    ["z", { isControl: true }, { kind: "undo" }],
+    ["Z", { isControl: true, isShift: true }, { kind: "redo" }],
+    ["y", { isControl: true }, { kind: "redo" }],
+    ["Tab", { isShift: true }, { kind: "tab", step: -1 }],
+  ])("%s %j does what it does in a spreadsheet", (key, held, command) => {
+    expect(press({ key, ...held })).toEqual(command);
+  });
+
+  test.each([
+    ["c", { isControl: true }],
+    ["v", { isControl: true }],
+    ["s", { isControl: true }],
+    ["Shift", {}],
+    ["F5", {}],
+    ["toString", {}],
+    ["é", { isAlt: true }],
+  ])("%s %j is left to the browser", (key, held) => {
+    expect(press({ key, ...held })).toBeUndefined();
   });
 });
 
