@@ -37,11 +37,18 @@ async function setArchived(
     if ((block.archivedAt === null) === (archivedAt === null)) return { name };
     if (archivedAt) {
       const parents = holdings.filter(({ childId }) => childId === id).map(({ blockId }) => blockId);
-      const blocksAround = all.filter((other) => parents.includes(other.id)).map((other) => `in ${other.name}`);
+      const blocksAround = all
+        .filter((other) => parents.includes(other.id) && !other.archivedAt)
+        .map((other) => `in ${other.name}`);
       const onBoards = uses.filter(({ blockId }) => blockId === id).map(({ boardId }) => boardId);
       const boardsAround = inWork.filter((board) => onBoards.includes(board.id)).map(({ code }) => `on ${code}`);
       const places = [...boardsAround, ...blocksAround];
       if (places.length > 0) reject("conflict", `${name} is used ${listed(places)}. Take it out there first.`);
+    }
+    const children = holdings.filter(({ blockId }) => blockId === id).map(({ childId }) => childId);
+    const gone = all.find((other) => children.includes(other.id) && other.archivedAt);
+    if (!archivedAt && gone) {
+      reject("conflict", `${name} holds ${gone.name}, which is archived. Restore that first.`);
     }
     await tx.update(blocks).set({ archivedAt }).where(eq(blocks.id, id));
     const subject = { projectId, actorId: viewer.userId, subjectId: id };

@@ -86,7 +86,12 @@ function oldCheck({ caution }: OfferToCheckInput, target: Target<"existing">, ch
   const stray = Object.keys(target.typed).find((field) => !Object.hasOwn(form, field));
   if (stray !== undefined) reject("invalid", `A check of the kind “${kind.label}” has no field ${stray}.`);
   const spec = specOf(kind.name, { ...form, ...target.typed });
-  return { ...check, spec, caution: warn(check.caution, caution) };
+  return {
+    ...check,
+    spec,
+    instruction: target.instruction ?? check.instruction,
+    caution: warn(check.caution, caution),
+  };
 }
 
 function specOf(kind: Parameters<typeof readSpec>[0]["kind"], typed: unknown): unknown {
