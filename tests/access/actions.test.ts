@@ -10,6 +10,7 @@ import { makeViewer } from "../support/people";
 import { accountRows } from "./action-rows/account";
 import { boardRows } from "./action-rows/boards";
 import { evidenceRows } from "./action-rows/evidence";
+import { partsRows } from "./action-rows/parts";
 import { peopleRows } from "./action-rows/people";
 import { pinMapRows } from "./action-rows/pin-maps";
 import { powerRows } from "./action-rows/power";
@@ -28,6 +29,7 @@ const table: Record<string, Rows> = {
   ...accountRows,
   ...boardRows,
   ...evidenceRows,
+  ...partsRows,
   ...peopleRows,
   ...pinMapRows,
   ...powerRows,

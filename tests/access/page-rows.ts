@@ -76,6 +76,19 @@ export const pages: Record<string, PageRow> = {
   },
   "app/(workshop)/projects/[project]/wiring/take/page.tsx": { permission: "wiring.edit", path: of("/wiring/take") },
   "app/(workshop)/projects/[project]/captures/page.tsx": { permission: "project.see", path: of("/captures") },
+  "app/(workshop)/projects/[project]/parts/page.tsx": { permission: "project.see", path: of("/parts") },
+  "app/(workshop)/projects/[project]/parts/boards/page.tsx": { permission: "project.see", path: of("/parts/boards") },
+  "app/(workshop)/projects/[project]/parts/boards/[board]/page.tsx": {
+    permission: "project.see",
+    path: of("/parts/boards/TIM"),
+  },
+  "app/(workshop)/projects/[project]/parts/blocks/page.tsx": { permission: "project.see", path: of("/parts/blocks") },
+  "app/(workshop)/projects/[project]/parts/blocks/[block]/page.tsx": {
+    permission: "project.see",
+    path: (place) => of(`/parts/blocks/${place.block}`)(place),
+  },
+  "app/(workshop)/projects/[project]/parts/logic/page.tsx": { permission: "project.see", path: of("/parts/logic") },
+  "app/(workshop)/projects/[project]/parts/delay/page.tsx": { permission: "project.see", path: of("/parts/delay") },
   "app/(workshop)/projects/[project]/log/page.tsx": { permission: "project.see", path: of("/log") },
   "app/(workshop)/projects/[project]/log/new/page.tsx": { permission: "log.write", path: of("/log/new") },
   "app/(workshop)/projects/[project]/log/[entry]/page.tsx": {

@@ -4,6 +4,7 @@ import type { Role } from "@/db/schema/projects";
 import { tokenFor } from "@/lib/auth/token";
 import { invitePerson } from "@/lib/invitation/invite-person";
 import { must } from "../support/bench";
+import { FULL_ADDER, keepBlock } from "../support/parts";
 import { makeEvidence } from "../support/project";
 import { appUrl, sessionCookie } from "../support/session";
 import { makeLogEntry, makeMachine } from "./machine";
@@ -20,6 +21,7 @@ export async function makePlace() {
   return {
     ...machine,
     entry: await makeLogEntry(machine),
+    block: (await must(keepBlock(scopes.maintainer, FULL_ADDER))).id,
     file: await makeEvidence(machine),
     invitation: tokenFor("invitation", invited.id),
   };

@@ -47,6 +47,11 @@ export const routes: Record<string, RouteRow> = {
     ask: (place) => ({ path: of(place, "/pin-map") }),
     status: 200,
   },
+  "GET app/api/projects/[project]/parts-list/route.ts": {
+    permission: "project.see",
+    ask: (place) => ({ path: of(place, "/parts-list") }),
+    status: 200,
+  },
   "GET app/api/projects/[project]/search/route.ts": {
     permission: "project.see",
     ask: (place) => ({ path: of(place, "/search?q=clock") }),
