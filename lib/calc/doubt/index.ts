@@ -1,4 +1,6 @@
+export { doubtfulAfter, type DoubtContext } from "./doubtful-after";
 export { type DoubtAfter, type DoubtLine, type DoubtReason, type RepeatWork } from "./doubt-line";
+export { repeatWork } from "./repeat-work";
 export {
   REWORK_KINDS,
   type BoardMap,

@@ -18,6 +18,8 @@ export type Touched = {
 
 export type Rework = {
   unitId: string;
+  /** Code of the unit's board. */
+  board: string;
   kind: ReworkKind;
   touches: Touched;
   /** Units that sit in the machine with it: their integration checks prove its signals too. Empty: it lies on the bench. */
@@ -37,9 +39,9 @@ export type CoveringCheck = StandingCheck & {
 export type BoardMap = {
   /** Code of the board. */
   board: string;
-  /** By connector, in the board's own order: "J1", "a4", "PH6". */
+  /** By connector: "J1", "a4", "PH6"; by part where the netlist knows its pins: "U7", "3", "PH6". */
   pins: readonly { connector: string; pin: string; signal: string }[];
-  /** From the netlist and the board's blocks. */
+  /** From the netlist and the board's blocks; without grounds, which no part interrupts. */
   parts: readonly { part: string; signals: readonly string[]; blocks: readonly string[] }[];
   /** Other names that mean the same, agreed on: "PWROK" for "PWR_OK". */
   aliases: readonly { name: string; aliases: readonly string[] }[];

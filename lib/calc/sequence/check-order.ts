@@ -11,8 +11,8 @@ export type OpenCheck = {
   waitsFor: string[];
   /** Open checks that can be done as soon as it holds, and no sooner. */
   frees: string[];
-  /** Waiting checks behind it, directly or through others. */
-  holdsBack: string[];
+  /** How many open checks come after it, directly or through others. */
+  holdsBack: number;
   /** From its beginning to the end of the longest chain behind it, s. */
   tailS: number;
   /** Why it comes where it comes, in words. */

@@ -1,3 +1,4 @@
+export { formatDuration } from "./format-duration";
 export { formatLimits } from "./format-limits";
 export { formatQuantity, type Digits } from "./format-quantity";
 export { type Deviation, type Limits } from "./limits";
