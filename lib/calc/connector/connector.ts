@@ -28,9 +28,5 @@ export type Connector = {
 
 export const GRID_MM = 2.54;
 
-/** The name of the pin in a row, counted from 0, at a position; empty where the connector has none. */
-export const pinAt = (connector: Connector, row: number, position: number): string =>
-  connector.pins.find((pin) => pin.row === row && pin.position === position)?.name ?? "";
-
 /** Whether the two can be put together at all. */
 export const canMate = (one: Connector, other: Connector): boolean => one.body === other.body;

@@ -16,9 +16,9 @@ export function joinNets(index: MachineIndex, crossing: Crossing = () => undefin
   const mated = new Set<string>();
   for (const meeting of index.meetings) {
     const { from, to } = meeting;
-    const met = crossing(meeting) ?? ((pin: string) => pin);
+    const crossed = crossing(meeting);
     for (const pin of from.connector.pins) {
-      for (const other of to.connector.byName.get(met(pin.name).toLowerCase()) ?? []) {
+      for (const other of to.connector.byName.get(crossed ? crossed(pin.key) : pin.key) ?? []) {
         copper.join(from.placed.firstCopper + pin.copper, to.placed.firstCopper + other.copper);
       }
     }

@@ -37,6 +37,6 @@ function crossings(turned: ReturnType<typeof findTurned>): Crossing {
     const turn = turns.get(meeting);
     if (!turn) return undefined;
     const met = turnedPins(meeting.from.connector.face, meeting.to.connector.face, turn);
-    return (pin) => met.get(pin.toLowerCase()) ?? "";
+    return (pin) => met.get(pin) ?? "";
   };
 }

@@ -48,9 +48,9 @@ function compare(
 ): { same: number; differ: number } {
   let same = 0;
   let differ = 0;
-  for (const { name, signal } of from.pins) {
+  for (const { key, signal } of from.pins) {
     if (signal === "") continue;
-    const met = meets(name.toLowerCase());
+    const met = meets(key);
     const other = met === undefined ? undefined : to.byName.get(met)?.[0]?.signal;
     if (other === undefined || other === "") continue;
     if (areAliases(signal, other)) same += 1;

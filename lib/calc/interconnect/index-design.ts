@@ -8,6 +8,8 @@ export type IndexedPin = {
   connector: IndexedConnector;
   /** In the face's own writing; as it came where the face has no such pin. */
   name: string;
+  /** The name in small letters, by which two pins meet. */
+  key: string;
   /** Whether the face has it. */
   isOnFace: boolean;
   /** What the pin carries; empty for a pin that is joined to nothing. */
@@ -45,14 +47,16 @@ export function indexDesign(design: BoardDesign): IndexedBoard {
   const pins = connectors.flatMap((connector) => connector.pins);
   const copper = new DisjointSets(pins.length);
   const firstOf = new Map<string, number>();
+  pins.forEach(({ signal }, at) => {
+    if (signal === "") return;
+    const first = firstOf.get(signal);
+    if (first === undefined) firstOf.set(signal, at);
+    else copper.join(first, at);
+  });
+  // Pins listed twice follow each other.
   pins.forEach((pin, at) => {
-    const names = [`pin ${pin.connector.id} ${pin.name.toLowerCase()}`];
-    if (pin.signal !== "") names.push(`signal ${pin.signal}`);
-    for (const name of names) {
-      const first = firstOf.get(name);
-      if (first === undefined) firstOf.set(name, at);
-      else copper.join(first, at);
-    }
+    const before = pins[at - 1];
+    if (before?.connector === pin.connector && before.key === pin.key) copper.join(at - 1, at);
   });
   const numbers = new Map<number, number>();
   pins.forEach((pin, at) => {
@@ -80,13 +84,17 @@ function indexConnector({ id, reference, face, pins }: DesignConnector, board: s
   });
   // Compared without subtraction: Infinity − Infinity is no number.
   placed.sort((a, b) =>
-    a.at === b.at ? byName(a.name, b.name) || byContent(a.design, b.design) : a.at < b.at ? -1 : 1,
+    a.at === b.at
+      ? byName(a.name.toLowerCase(), b.name.toLowerCase()) || byContent(a.design, b.design)
+      : a.at < b.at
+        ? -1
+        : 1,
   );
   for (const { design, name, onFace } of placed) {
     const signal = design.role === "no connection" ? "" : design.signal.trim();
-    const pin = { design, connector, name, isOnFace: onFace !== undefined, signal, copper: 0 };
-    connector.pins.push(pin);
     const key = name.toLowerCase();
+    const pin = { design, connector, name, key, isOnFace: onFace !== undefined, signal, copper: 0 };
+    connector.pins.push(pin);
     const same = connector.byName.get(key);
     if (same) same.push(pin);
     else connector.byName.set(key, [pin]);

@@ -1,6 +1,8 @@
 import { inputStress, margins, type Family, type Margins } from "../levels";
 import { grouped } from "./grouped";
-import { pullUpLine, pullUpOhm } from "./net-currents";
+import { pullUpOhm } from "./net-currents";
+import { pullUpLine } from "./pull-up-line";
+import { remember } from "./remember";
 import { isSameCopper, type NetStudy, type Party } from "./study-net";
 import type { Survey } from "./survey";
 
@@ -39,12 +41,17 @@ export function levelPairs(survey: Survey, study: NetStudy): LevelPair[] {
       const highByPullUp = isOpen || (driving.technology === "bipolar" && pulled(receiving));
       const key = `${driving.name}\u0000${receiving.name}\u0000${highByPullUp ? 1 : 0}`;
       if (!pairs.has(key)) {
-        pairs.set(key, { ...met, driving, receiving, margins: margins(driving, receiving), highByPullUp });
+        pairs.set(key, { ...met, driving, receiving, margins: pairMargins(survey, driving, receiving), highByPullUp });
       }
     }
   }
   return [...pairs.values()];
 }
+
+const rememberMargins = remember<Survey, Margins>();
+
+export const pairMargins = (survey: Survey, driving: Family, receiving: Family): Margins =>
+  rememberMargins(survey, `${driving.name}\u0000${receiving.name}`, () => margins(driving, receiving));
 
 /** Of each kind the first party and the next that is other copper. */
 const firstTwo = (parties: readonly Party[], kindOf: (party: Party) => string): Party[][] =>
@@ -63,5 +70,8 @@ function isPulledHigh(survey: Survey, study: NetStudy): (receiving: Family) => b
   return ({ vihMin }) => rest >= vihMin;
 }
 
-export const isStressed = ({ driving, receiving, driver }: LevelPair): boolean =>
-  driver.role !== "open-drain output" && inputStress(driving, receiving).over;
+const rememberStress = remember<Survey, boolean>();
+
+export const isStressed = (survey: Survey, { driving, receiving, driver }: LevelPair): boolean =>
+  driver.role !== "open-drain output" &&
+  rememberStress(survey, `${driving.name}\u0000${receiving.name}`, () => inputStress(driving, receiving).over);

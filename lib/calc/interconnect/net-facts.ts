@@ -10,9 +10,10 @@ import { indexMachine } from "./index-machine";
 import { levelPairs, type LevelPair } from "./level-pairs";
 import type { Machine, PinRole } from "./machine";
 import type { Net } from "./net";
-import { capacitancePf, driverLoadings, netPullUpWindow, pullUpLine, pullUpOhm } from "./net-currents";
+import { capacitancePf, driverLoadings, pullUpOhm } from "./net-currents";
 import { netSentences } from "./net-sentences";
 import { byName } from "./order";
+import { netPullUpWindow, pullUpLine } from "./pull-up-line";
 import { studyNet, type NetStudy, type Party } from "./study-net";
 import { surveyMachine, type Survey } from "./survey";
 

@@ -6,8 +6,10 @@ import { pinCount } from "../wording";
 /** Families that the table does not have: their levels, loads and edges are not looked at. No edits: figures are. */
 export const unknownFamilies: Rule = ({ index, family, pinOfDesign }) => {
   const pins = index.boards.flatMap((board) => board.pins);
+  const names = new Set(pins.map(({ design }) => design.family));
+  const isUnknown = new Set([...names].filter((name) => name.trim() !== "" && !family(name.trim())));
   const unknown = grouped(
-    pins.filter(({ design }) => design.family.trim() !== "" && !family(design.family.trim())),
+    pins.filter(({ design }) => isUnknown.has(design.family)),
     ({ design }) => design.family.trim(),
   );
   return [...unknown]

@@ -17,7 +17,7 @@ export const levelsDoNotFit: Rule = (survey) =>
     const pairs = levelPairs(survey, study);
     const high = pairs.filter(({ margins, highByPullUp }) => margins.highVolts < 0 && !highByPullUp);
     const low = pairs.filter(({ margins }) => margins.lowVolts < 0);
-    const stressed = pairs.filter(isStressed);
+    const stressed = pairs.filter((pair) => isStressed(survey, pair));
     return [
       ...told(survey, study, high, "high", ({ margins }) => margins.highVolts),
       ...told(survey, study, low, "low", ({ margins }) => margins.lowVolts),

@@ -1,7 +1,6 @@
-import { margins } from "../../levels";
 import { editPins } from "../edit-pins";
 import type { Edit } from "../finding";
-import type { LevelPair } from "../level-pairs";
+import { pairMargins, type LevelPair } from "../level-pairs";
 import { distinct } from "../order";
 import { pinsOf, type NetStudy } from "../study-net";
 import type { Survey } from "../survey";
@@ -24,7 +23,7 @@ export function ttlTwin(
     study.drivers.every(({ family, role }) => {
       const [driving, receiving] = [survey.family(family), survey.family(twin)];
       if (!driving || !receiving || (level === "high" && role === "open-drain output")) return true;
-      const { highVolts, lowVolts } = margins(driving, receiving);
+      const { highVolts, lowVolts } = pairMargins(survey, driving, receiving);
       return (level === "high" ? highVolts : lowVolts) >= 0;
     });
   const swaps = distinct(failing.map(({ receiving }) => receiving.name)).map((name) => {
