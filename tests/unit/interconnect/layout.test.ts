@@ -1,7 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { applyEdits } from "@/lib/calc/interconnect";
 import { board, carries, clock, found, ground, input, only, pushPull, rack } from "../../support/small-machine";
-import { face } from "../../support/face";
 
 describe("fast edges", () => {
   test("far from ground are found with the family and the distance, once for the connector", () => {
@@ -75,80 +74,5 @@ describe("CMOS inputs that carry nothing", () => {
     expect(found(applyEdits(machine, finding.edits), "spare-gates")).toEqual([]);
     const bipolar = { ...spare, untiedSpares: [{ part: "74LS00", gates: 2, inputs: 4, family: "LS" }] };
     expect(found({ ...machine, boards: [bipolar] }, "spare-gates")).toEqual([]);
-  });
-});
-
-describe("connectors and slots", () => {
-  const straight = rack({ cards: { TIM: { a7: pushPull("STB") }, CON: { a7: input("STB") } } });
-
-  test("that cannot be put together are told with both kinds", () => {
-    const boards = straight.boards.map((one) =>
-      one.code !== "CON" ? one : board("CON", { a7: input("STB") }, "card", "din41612-b64"),
-    );
-    const finding = only({ ...straight, boards }, "cannot-mate");
-    expect(finding.title).toBe("BPL X2 and CON J1 cannot be put together");
-    expect(found(straight, "cannot-mate")).toEqual([]);
-  });
-
-  test("with 64 pins of type C in a slot of 96 fit", () => {
-    const boards = straight.boards.map((one) => ({
-      ...one,
-      connectors: one.connectors.map((connector) =>
-        one.code === "BPL" ? { ...connector, face: face("din41612-c96") } : connector,
-      ),
-    }));
-    expect(found({ ...straight, boards }, "cannot-mate")).toEqual([]);
-  });
-
-  test("pins that the face does not have are told; capitals do not matter", () => {
-    const machine = rack({
-      cards: { CON: { a33: input("D0"), b2: input("D1"), A5: input("D2") } },
-      more: { matings: [] },
-    });
-    const finding = only({ ...machine, boards: machine.boards.filter(({ code }) => code === "CON") }, "unknown-pins");
-    expect(finding.title).toBe("CON J1 has no pin a33 and b2");
-    expect(found(straight, "unknown-pins")).toEqual([]);
-  });
-
-  test("one pin listed twice joins both signals and is told", () => {
-    const boards = straight.boards.map((one) => ({
-      ...one,
-      connectors: one.connectors.map((connector) =>
-        one.code === "CON" ? { ...connector, pins: [...connector.pins, { pin: "A7", ...input("D0") }] } : connector,
-      ),
-    }));
-    expect(only({ ...straight, boards }, "pins-twice").why).toContain("a7: D0 and STB");
-    expect(found(straight, "pins-twice")).toEqual([]);
-  });
-
-  test("two boards in one slot are told, by the slot and by the connector", () => {
-    const second = { id: "slot 2b", board: "CON", label: "CON-09", slot: 2 };
-    const machine = {
-      ...straight,
-      placements: [...straight.placements, second],
-      matings: [
-        ...straight.matings,
-        { from: { placement: "backplane", connector: "X2" }, to: { placement: "slot 2b", connector: "CON J1" } },
-      ],
-    };
-    const titles = found(machine, "claimed-twice").map(({ title }) => title);
-    expect(titles).toEqual(["BPL-01 X2 is claimed twice", "Slot 2 is claimed twice"]);
-    expect(found(straight, "claimed-twice")).toEqual([]);
-  });
-
-  test("what names a board or a connector that is not there is told and left out", () => {
-    const machine = {
-      ...straight,
-      placements: [...straight.placements, { id: "slot 9", board: "GONE", label: "GONE-01", slot: 9 }],
-      matings: [
-        ...straight.matings,
-        { from: { placement: "backplane", connector: "X99" }, to: { placement: "slot 1", connector: "TIM J1" } },
-      ],
-    };
-    expect(found(machine, "loose-end").map(({ title }) => title)).toEqual([
-      "BPL-01 is put together by a connector that it does not have",
-      "GONE-01 stands for a board that is not there",
-    ]);
-    expect(found(straight, "loose-end")).toEqual([]);
   });
 });
