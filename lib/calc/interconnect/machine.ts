@@ -83,7 +83,7 @@ export type Rail = {
   tolerancePercent: number;
 };
 
-/** Current that a placement draws from a rail, A; see lib/calc/power. */
+/** Current that a placement draws from a rail through its connectors, A; below zero for the one that feeds it. */
 export type Draw = { placement: string; rail: string; typicalA: number; worstA: number };
 
 export type PlanConditions = {
