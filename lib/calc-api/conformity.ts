@@ -2,9 +2,10 @@ import { z } from "zod";
 import { judge, JudgementError } from "@/lib/calc/conformity";
 import { UNITS } from "@/lib/calc/units";
 import { defineCalculation, type Outcome } from "./define-calculation";
+import { from } from "./fields";
 
-const figure = z.number().min(-1e30).max(1e30);
-const magnitude = z.number().min(0).max(1e30);
+const figure = from(-1e30, 1e30);
+const magnitude = from(0, 1e30);
 
 const input = z.strictObject({
   reading: figure.describe("In the base unit: 4.98 V is 4.98, 120 mA is 0.12."),

@@ -1,0 +1,201 @@
+import { randomUUID } from "node:crypto";
+import { describe, expect, test, vi } from "vitest";
+import { GET, POST } from "@/app/api/v1/calc/[calculation]/route";
+import { CALCULATIONS } from "@/lib/calc-api/list";
+import { limit, LIMITS } from "@/lib/http/rate-limit";
+import { PEER_HEADER } from "@/lib/http/peer-header";
+import { peerNetwork } from "@/lib/http/peer-network";
+import { useDatabase } from "../support/database";
+
+// Bench scripts bring no cookie.
+vi.mock("@/lib/auth/current-viewer", () => ({ currentViewer: async () => undefined }));
+
+useDatabase();
+
+const address = (name: string) => `https://boardwake.example/api/v1/calc/${name}`;
+const at = (calculation: string) => ({ params: Promise.resolve({ calculation }) });
+/** A connection of its own, so that tests do not use up each other's limit. */
+const somebody = () => `2001:db8:${randomUUID().slice(0, 4)}:${randomUUID().slice(0, 4)}::1`;
+
+async function post(name: string, body: BodyInit, headers: Record<string, string> = {}) {
+  const request = new Request(address(name), {
+    method: "POST",
+    body,
+    headers: { "content-type": "application/json", [PEER_HEADER]: somebody(), ...headers },
+  });
+  const answer = await POST(request, at(name));
+  return { answer, json: await answer.json() };
+}
+const send = (name: string, input: unknown, headers?: Record<string, string>) =>
+  post(name, JSON.stringify(input), headers);
+
+const READING = { reading: 4.98, limits: { lower: 4.75, upper: 5.25 } };
+
+describe("a calculation without state", () => {
+  test.each(CALCULATIONS.map((calculation) => [calculation.name, calculation] as const))(
+    "%s answers the example that it shows",
+    async (name) => {
+      const card = await (await GET(new Request(address(name)), at(name))).json();
+      const { answer, json } = await send(name, card.example);
+      expect(answer.status).toBe(200);
+      expect(answer.headers.get("content-type")).toContain("application/json");
+      expect(json).toMatchObject({ calculation: name, result: expect.any(Object), source: card.source });
+    },
+  );
+
+  test("needs nobody to be signed in, may be asked from anywhere, and is kept by no cache", async () => {
+    const { answer } = await send("conformity", READING, {
+      origin: "https://bench.example",
+      "sec-fetch-site": "cross-site",
+    });
+    expect(answer.status).toBe(200);
+    expect(answer.headers.get("cache-control")).toBe("no-store");
+  });
+
+  test("says the same as the bench: 4.98 V within 4.75 … 5.25 V conforms", async () => {
+    const { json } = await send("conformity", READING);
+    expect(json.result).toMatchObject({
+      verdict: "conforms",
+      sentences: [expect.stringContaining("fits"), expect.any(String)],
+    });
+  });
+});
+
+describe("a problem document (RFC 9457)", () => {
+  const problem = { "content-type": "application/problem+json" };
+  const expectProblem = (answer: Response, status: number) => {
+    expect(answer.status).toBe(status);
+    expect(answer.headers.get("content-type")).toBe(problem["content-type"]);
+  };
+
+  test("names each field by its path", async () => {
+    const input = { reading: "4.98", limits: { lower: 4.75, colour: 1 }, rule: "strict" };
+    const { answer, json } = await send("conformity", input);
+    expectProblem(answer, 400);
+    expect(json.errors).toEqual({
+      reading: "Give a number without quotes, in the unit that the name ends with; “4.98” is text.",
+      "limits.colour": "There is no such field here.",
+      rule: "One of simple, guarded.",
+    });
+    expect(json).toMatchObject({ status: 400, type: expect.any(String), title: expect.any(String) });
+  });
+
+  test.each(["NaN", "Infinity", "-Infinity", "1e999"])("refuses the text “%s” as a figure", async (text) => {
+    const { answer, json } = await send("conformity", { ...READING, reading: text });
+    expectProblem(answer, 400);
+    expect(Object.keys(json.errors)).toEqual(["reading"]);
+  });
+
+  test("refuses 1e999, which reads as infinity", async () => {
+    const { answer, json } = await post("conformity", '{"reading":1e999,"limits":{"lower":1}}');
+    expectProblem(answer, 400);
+    expect(Object.keys(json.errors)).toEqual(["reading"]);
+  });
+
+  test("refuses NaN, which is no JSON", async () => {
+    const { answer, json } = await post("conformity", '{"reading":NaN,"limits":{"lower":1}}');
+    expectProblem(answer, 400);
+    expect(json.detail).toContain("not JSON");
+  });
+
+  test.each([
+    ["levels", { driver: "HC", receivers: [{ family: "HC", count: -1 }] }, "receivers.0.count"],
+    ["packing", { board: { loose: [{ gateFunction: "nand2", count: -1 }] } }, "board.loose.0.count"],
+    ["delay", { steps: [{ name: "A", typicalS: -1e-9 }] }, "steps.0.typicalS"],
+    [
+      "pull-up",
+      { supply: { minVolts: -5, maxVolts: 5 }, line: { highVolts: 3, lowVolts: 0.4, sinkA: 1 } },
+      "supply.minVolts",
+    ],
+    ["power", { rails: [{ name: "+5V", volts: 5, tolerancePercent: -5 }], board: {} }, "rails.0.tolerancePercent"],
+    ["interconnect", { boards: [], conditions: { logicVolts: -5 } }, "conditions.logicVolts"],
+  ])("%s refuses what must not be negative", async (name, input, path) => {
+    const { answer, json } = await send(name, input);
+    expectProblem(answer, 400);
+    expect(Object.keys(json.errors)).toContain(path);
+  });
+
+  test("lists the calculations that there are, for one that there is not", async () => {
+    const { answer, json } = await send("perpetuum-mobile", {});
+    expectProblem(answer, 404);
+    expect(json.details.calculations).toEqual(expect.arrayContaining(["levels", "pull-up", "interconnect"]));
+    expectProblem(await GET(new Request(address("x")), at("x")), 404);
+  });
+
+  test.each(["[]", '"text"', "42", "[{}]"])("answers %s as a body: one object is wanted", async (body) => {
+    const { answer, json } = await post("conformity", body);
+    expectProblem(answer, 400);
+    expect(json.detail).toContain("one JSON object");
+  });
+
+  test("answers a form with the wrong type", async () => {
+    const { answer } = await post("conformity", "reading=4.98", {
+      "content-type": "application/x-www-form-urlencoded",
+    });
+    expectProblem(answer, 415);
+  });
+
+  test("answers a body beyond its limit without reading it to the end", async () => {
+    let sent = 0;
+    const endless = new ReadableStream<Uint8Array>({
+      pull: (stream) => {
+        sent += 1_000_000;
+        stream.enqueue(new Uint8Array(1_000_000).fill(32));
+      },
+    });
+    const request = new Request(address("interconnect"), {
+      ...{ method: "POST", body: endless, duplex: "half" },
+      headers: { "content-type": "application/json", [PEER_HEADER]: somebody() },
+    });
+    expectProblem(await POST(request, at("interconnect")), 413);
+    expect(sent).toBeLessThan(12_000_000);
+  });
+});
+
+test(
+  "a machine of 200 connectors with 200 pins each is checked; one more connector is not",
+  { timeout: 60_000 },
+  async () => {
+    const pins = Array.from({ length: 200 }, (_, index) => ({
+      pin: `a${index + 1}`,
+      signal: `S${index}`,
+      role: "passive",
+    }));
+    const grid = { rows: ["a"], positions: 200, pitchMm: 2.54 };
+    const machine = (slots: number) => {
+      const connectors = Array.from({ length: slots }, (_, index) => ({
+        reference: `X${index}`,
+        type: "grid",
+        grid,
+        pins,
+      }));
+      const cards = Array.from({ length: 100 }, (_, index) => ({ id: `C${index}`, board: "CON", slot: index }));
+      return {
+        boards: [
+          { code: "BPL", kind: "backplane", connectors },
+          { code: "CON", connectors: [{ reference: "J1", type: "grid", grid, pins }] },
+        ],
+        placements: [{ id: "BPL", board: "BPL" }, ...cards],
+        matings: cards.map(({ id }, index) => ({
+          from: { placement: "BPL", connector: `X${index}` },
+          to: { placement: id, connector: "J1" },
+        })),
+      };
+    };
+    const { answer, json } = await send("interconnect", machine(100));
+    expect(answer.status).toBe(200);
+    expect(json.result.nets).toHaveLength(200);
+    const more = await send("interconnect", machine(101));
+    expect(more.json.errors.placements).toContain("201 connectors");
+  },
+);
+
+test("one connection gets so many calculations and no more, and others still theirs", async () => {
+  const peer = somebody();
+  const { points } = LIMITS.calculations;
+  await Promise.all(Array.from({ length: points }, () => limit("calculations", peerNetwork(peer))));
+  const worn = await send("conformity", READING, { [PEER_HEADER]: peer });
+  expect(worn.answer.status).toBe(429);
+  expect(Number(worn.answer.headers.get("retry-after"))).toBeGreaterThan(0);
+  expect((await send("conformity", READING)).answer.status).toBe(200);
+});
