@@ -19,6 +19,8 @@ export type CheckHistoryRow = {
   failed_arrival: number | null;
   reopened_after: number | null;
   reopened_reason: string | null;
+  reworked_after: number | null;
+  reworked_reason: string | null;
   /** Reason of the standing concession for the last valid attempt. */
   conceded_reason: string | null;
   /** The cached columns, to be compared with what history says. */
@@ -68,6 +70,7 @@ export async function findCheckHistories(
         where a.check_id = c.id and a.verdict = 'does-not-conform'
           and not exists (select 1 from attempt_voids v where v.attempt_id = a.id)) as failed_arrival,
       reopened.after_arrival::float8 as reopened_after, reopened.reason as reopened_reason,
+      reworked.after_arrival::float8 as reworked_after, reworked.reason as reworked_reason,
       (select concessions.reason from concessions
         where concessions.check_id = c.id and concessions.attempt_id = last.id and concessions.withdrawn_at is null
         order by concessions.created_at desc, concessions.id limit 1) as conceded_reason,
@@ -83,5 +86,10 @@ export async function findCheckHistories(
     left join lateral (
       select r.after_arrival, r.reason from reopenings r
       where r.check_id = c.id order by r.after_arrival desc, r.created_at desc, r.id limit 1) reopened on true
+    left join lateral (
+      select d.after_arrival, d.reason from rework_doubts d
+      join reworks on reworks.id = d.rework_id
+      where d.check_id = c.id and d.origin <> 'spared'
+      order by d.after_arrival desc, reworks.arrival desc limit 1) reworked on true
     where c.unit_id in (select unit_id from relevant) and c.retired_at is null`);
 }

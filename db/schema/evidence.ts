@@ -1,6 +1,7 @@
 import { bigint, index, integer, pgTable, smallint, text, uuid } from "drizzle-orm/pg-core";
 import { units } from "./boards";
 import { createdAt, id, instant } from "./columns";
+import { faults, reworks } from "./faults";
 import { users } from "./people";
 import { projects } from "./projects";
 import { attempts, checks } from "./travelers";
@@ -26,6 +27,9 @@ export const logEntries = pgTable(
 
 /** photo and scope-picture are images; scope-data is delimited text. */
 export type AttachmentKind = "photo" | "scope-picture" | "scope-data";
+
+/** How the unit looked before the rework, or how it looks since. */
+export type ReworkSide = "before" | "after";
 
 /** A file in the object store. A row exists only for a file that arrived whole and was recognised by its content. */
 export const attachments = pgTable(
@@ -56,6 +60,9 @@ export const attachments = pgTable(
     checkId: uuid("check_id").references(() => checks.id, { onDelete: "set null" }),
     attemptId: uuid("attempt_id").references(() => attempts.id, { onDelete: "set null" }),
     logEntryId: uuid("log_entry_id").references(() => logEntries.id, { onDelete: "set null" }),
+    faultId: uuid("fault_id").references(() => faults.id, { onDelete: "set null" }),
+    reworkId: uuid("rework_id").references(() => reworks.id, { onDelete: "set null" }),
+    reworkSide: text("rework_side").$type<ReworkSide>(),
     archivedAt: instant("archived_at"),
     createdAt: createdAt(),
   },
@@ -64,5 +71,7 @@ export const attachments = pgTable(
     index("attachments_check").on(table.checkId),
     index("attachments_attempt").on(table.attemptId),
     index("attachments_log_entry").on(table.logEntryId),
+    index("attachments_fault").on(table.faultId),
+    index("attachments_rework").on(table.reworkId),
   ],
 );

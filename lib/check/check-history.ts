@@ -24,6 +24,8 @@ export type CheckHistory = PlacedCheck & {
   failedArrival: number | null;
   /** The newest reopening: it concerns the attempts that had arrived by then. */
   reopened: { afterArrival: number; reason: string } | null;
+  /** The newest rework that puts it in doubt: it concerns the attempts that had arrived by then. */
+  reworked: { afterArrival: number; reason: string } | null;
   /** Standing concessions. */
   concessions: readonly { attemptId: string; reason: string }[];
 };

@@ -2,6 +2,7 @@ import type { CheckState } from "@/db/schema/travelers";
 import type { CheckHistory, DerivedCheck } from "./check-history";
 import { findBlockers } from "./find-blockers";
 import { findDoubt, type Doubt } from "./find-doubt";
+import { isReworked } from "./is-reworked";
 import { reasonFor } from "./state-reason";
 
 /**
@@ -42,5 +43,5 @@ function stateFromAttempts(check: CheckHistory, doubt: Doubt | undefined): Check
   if (last.verdict === "does-not-conform") {
     return check.concessions.some((concession) => concession.attemptId === last.id) ? "conceded" : "failed";
   }
-  return doubt ? "doubtful" : "passed";
+  return doubt || isReworked(check) ? "doubtful" : "passed";
 }

@@ -1,6 +1,7 @@
 import type { CheckState, Verdict } from "@/db/schema/travelers";
 import type { Blocker, CheckHistory } from "./check-history";
 import type { Doubt } from "./find-doubt";
+import { isReworked } from "./is-reworked";
 
 /** Names a check from the point of view of a unit: the serial only when it is another one. */
 export function nameCheck(check: { serial: string; title: string }, fromSerial: string): string {
@@ -28,7 +29,10 @@ export function reasonFor(
     case "reopened":
       return `Reopened: ${check.reopened?.reason ?? ""}`;
     case "doubtful":
-      return doubt ? `${nameCheck(doubt.by, check.serial)} failed afterwards, and this check relies on it.` : "";
+      return [
+        ...(isReworked(check) ? [check.reworked?.reason ?? ""] : []),
+        ...(doubt ? [`${nameCheck(doubt.by, check.serial)} failed afterwards, and this check relies on it.`] : []),
+      ].join(" ");
     case "conceded":
       return `Accepted: ${check.concessions.find((concession) => concession.attemptId === check.last?.id)?.reason ?? ""}`;
     case "passed":

@@ -111,6 +111,53 @@ describe("a check with attempts", () => {
   });
 });
 
+describe("a rework", () => {
+  const reworked = { afterArrival: 5, reason: "Bodge wire W3: it covers PH7; the rework touches it." };
+
+  it("puts a passed check in doubt, with its reason, until an attempt arrives after it", () => {
+    expect(stateOf([history({ id: "a", last: good(5), reworked })], "a")).toMatchObject({
+      state: "doubtful",
+      reason: reworked.reason,
+    });
+    expect(stateOf([history({ id: "a", last: good(6), reworked })], "a")).toMatchObject({
+      state: "passed",
+      reason: "",
+    });
+  });
+
+  it("changes nothing where there is no pass to doubt", () => {
+    expect(stateOf([history({ id: "a", reworked })], "a")?.state).toBe("untested");
+    expect(stateOf([history({ id: "a", last: bad(5), failedArrival: 5, reworked })], "a")?.state).toBe("failed");
+    const reopened = { afterArrival: 5, reason: "again" };
+    expect(stateOf([history({ id: "a", last: good(5), reworked, reopened })], "a")?.state).toBe("reopened");
+  });
+
+  it("and a failure that the check relies on are both said", () => {
+    const machine = [
+      history({ id: "a", last: bad(7), failedArrival: 7, position: 1 }),
+      history({ id: "b", last: good(5), reworked, needs: ["a"], position: 2 }),
+    ];
+    expect(stateOf(machine, "b")?.reason).toBe(
+      `${reworked.reason} “a” failed afterwards, and this check relies on it.`,
+    );
+  });
+
+  it("never makes fewer checks doubtful, whatever else happened", () => {
+    fc.assert(
+      fc.property(machines, fc.nat(23), fc.integer({ min: 1, max: 60 }), (machine, at, afterArrival) => {
+        const doubtful = (list: CheckHistory[]) =>
+          [...deriveStates(list).values()].flatMap(({ id, state }) => (state === "doubtful" ? [id] : []));
+        const more = machine.map((check, index) =>
+          index === at && (check.reworked?.afterArrival ?? 0) < afterArrival
+            ? { ...check, reworked: { afterArrival, reason: "R2 touched it." } }
+            : check,
+        );
+        expect(doubtful(more)).toEqual(expect.arrayContaining(doubtful(machine)));
+      }),
+    );
+  });
+});
+
 describe("doubt", () => {
   it("falls on a passed check when what it relies on fails afterwards, through any number of steps", () => {
     const machine = [

@@ -17,6 +17,7 @@ export function history(given: Given): CheckHistory {
     last: null,
     failedArrival: null,
     reopened: null,
+    reworked: null,
     concessions: [],
     ...given,
   };
@@ -40,6 +41,7 @@ export const machines: fc.Arbitrary<CheckHistory[]> = fc
       ),
       earlierFailure: fc.option(arrival),
       reopened: fc.option(arrival),
+      reworked: fc.option(arrival),
       conceded: fc.boolean(),
     }),
     { maxLength: 24 },
@@ -64,6 +66,7 @@ export const machines: fc.Arbitrary<CheckHistory[]> = fc
         last,
         failedArrival: failures.length > 0 ? Math.max(...failures) : null,
         reopened: one.reopened ? { afterArrival: one.reopened, reason: "again" } : null,
+        reworked: one.reworked ? { afterArrival: one.reworked, reason: "R1 touched it." } : null,
         concessions: one.conceded && last ? [{ attemptId: last.id, reason: "good enough" }] : [],
       });
     }),
