@@ -6,6 +6,7 @@ import { z } from "zod";
 import { FormQuantityField, FormRadioGroup, FormSelect } from "@/components/ui/form/bound-fields";
 import { Form } from "@/components/ui/form/Form";
 import { Notice } from "@/components/ui/Notice";
+import { counted } from "@/components/workshop/counted";
 import { useStaleEdit } from "@/components/workshop/use-stale-edit";
 import type { BoardPlanView } from "@/lib/board-plan/load-board-plan";
 import { saveBoardPlanInput, type SaveBoardPlanTyped } from "@/lib/board-plan/schema";
@@ -88,7 +89,8 @@ function Sharing({ view }: { view: BoardPlanView }) {
   });
   const packed = packDraft(view, { packing, family, blocks });
   const counts = packed.ok ? packed.packing : undefined;
-  const text = (count: number | undefined) => (count === undefined || count === 0 ? "" : `: ${count} packages`);
+  const text = (count: number | undefined) =>
+    count === undefined || count === 0 ? "" : `: ${counted(count, "package")}`;
   return (
     <FormRadioGroup
       name="packing"

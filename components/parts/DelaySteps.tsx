@@ -6,7 +6,12 @@ type Good = Extract<WorkedOut, { ok: true }>;
 /** The chain part by part: figures of one piece, and what is assumed. */
 export function DelaySteps({ worked: { given, delay } }: { worked: Good }) {
   return (
-    <div className="overflow-x-auto" role="group" aria-label="Steps of the path, scrolls sideways" tabIndex={0}>
+    <div
+      className="relative overflow-x-auto"
+      role="group"
+      aria-label="Steps of the path, scrolls sideways"
+      tabIndex={0}
+    >
       <table aria-label="Steps of the path" className="w-full border-collapse text-left text-[0.9375rem]">
         <thead>
           <tr className="text-sm text-ink-soft">

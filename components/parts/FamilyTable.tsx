@@ -12,7 +12,12 @@ export function FamilyTable({ part }: { part: LogicPart }) {
     );
   }
   return (
-    <div className="overflow-x-auto" role="group" aria-label="Figures by family, scrolls sideways" tabIndex={0}>
+    <div
+      className="relative overflow-x-auto"
+      role="group"
+      aria-label="Figures by family, scrolls sideways"
+      tabIndex={0}
+    >
       <table className="w-full border-collapse text-left text-[0.9375rem]">
         <caption className="sr-only">Figures by family</caption>
         <thead>

@@ -62,7 +62,7 @@ export function LogicFields() {
         <FormQuantityField name="logic.inputsPerGate" label="Inputs a gate" inputMode="numeric" />
         <FormQuantityField name="logic.outputsPerGate" label="Outputs a gate" inputMode="numeric" />
         <FormQuantityField name="logic.bitsPerGate" label="Bits a gate" inputMode="numeric" />
-        <FormQuantityField name="logic.inputPf" label="Of an input" placeholder="3.5 pF" />
+        <FormQuantityField name="logic.inputPf" label="Capacitance" placeholder="3.5 pF" />
       </div>
       <div className="grid gap-4 sm:grid-cols-2">
         <FormTextArea

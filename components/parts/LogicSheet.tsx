@@ -10,12 +10,12 @@ export function LogicSheet({ part, isOwn }: { part: LogicPart; isOwn: boolean })
   return (
     <article aria-label={label} className="flex flex-col gap-4">
       <header>
-        <h3 className="flex flex-wrap items-baseline gap-x-3 gap-y-1 text-xl">
+        <h2 className="flex flex-wrap items-baseline gap-x-3 gap-y-1 text-xl">
           <span className="mono text-[0.85em]">{label}</span> {part.name} {isOwn && <Badge tone="copper">own</Badge>}
-        </h3>
+        </h2>
       </header>
       <div className="flex flex-wrap items-start gap-x-8 gap-y-4">
-        <div className="grid-paper w-64 max-w-full rounded-md border border-rule px-1 py-2">
+        <div className="w-64 max-w-full rounded-md border border-rule px-1 py-2">
           {part.pinout ? (
             <PinoutDrawing part={part} title={label} />
           ) : (

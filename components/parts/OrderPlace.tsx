@@ -3,8 +3,8 @@
 import { useQueryState } from "nuqs";
 import { PrintButton } from "@/components/traveler/PrintButton";
 import { Page } from "@/components/shell/Page";
+import { buttonStyle } from "@/components/ui/button-style";
 import { ButtonLink } from "@/components/ui/ButtonLink";
-import { writeDate } from "@/components/ui/DateTime";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { Kbd } from "@/components/ui/Kbd";
 import { Notice } from "@/components/ui/Notice";
@@ -21,9 +21,6 @@ import { useStockEdits } from "./use-stock-edits";
 
 type Props = {
   project: string;
-  projectName: string;
-  zone: string;
-  printedAt: string;
   view: PartsListView;
   canEdit: boolean;
   acts: { stock: StockAct; spares: SparesAct };
@@ -31,7 +28,7 @@ type Props = {
 
 const ALL = "all";
 
-export function OrderPlace({ project, projectName, zone, printedAt, view, canEdit, acts }: Props) {
+export function OrderPlace({ project, view, canEdit, acts }: Props) {
   const [, setBoard] = useQueryState("board", { shallow: false, history: "push" });
   const edits = useStockEdits(project, acts.stock);
   const { lines, boards, board, problems, currency, spares } = view;
@@ -49,18 +46,14 @@ export function OrderPlace({ project, projectName, zone, printedAt, view, canEdi
       actions={
         !isEmpty && (
           <>
-            <ButtonLink href={file} prefetch={false}>
+            <a href={file} download className={buttonStyle()}>
               CSV out
-            </ButtonLink>
+            </a>
             <PrintButton />
           </>
         )
       }
     >
-      <p className="mb-4 hidden text-sm print:block">
-        Parts list of {projectName}
-        {board && `, board ${board}`}. Printed {writeDate(printedAt, zone)}.
-      </p>
       <div className="flex flex-col gap-5">
         {problems.length > 0 && (
           <Notice kind="failed" role="status" title="The list is not whole">
@@ -123,7 +116,7 @@ export function OrderPlace({ project, projectName, zone, printedAt, view, canEdi
                 empty={<p className="py-4 text-ink-soft">{board} carries no parts yet.</p>}
               />
               {canEdit && lines.length > 0 && (
-                <p className="mt-3 flex flex-wrap items-center gap-x-2 gap-y-1 text-sm text-ink-soft max-sm:hidden print:hidden">
+                <p className="mt-3 flex flex-wrap items-center gap-x-2 gap-y-1 text-sm text-ink-soft max-sm:hidden">
                   <Kbd>Enter</Kbd> keep and go down <span>·</span> <Kbd>↑</Kbd> <Kbd>↓</Kbd> move <span>·</span>{" "}
                   <Kbd>Esc</Kbd> take back
                 </p>

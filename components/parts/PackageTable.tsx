@@ -14,7 +14,7 @@ export function PackageTable({ packing }: { packing: Packing }) {
               <th className="py-1.5 pr-4 text-right font-semibold">Count</th>
               <th className="py-1.5 pr-4 font-semibold">Package</th>
               <th className="py-1.5 pr-4 font-semibold max-sm:hidden">What it is</th>
-              {apart && <th className="py-1.5 pr-4 font-semibold">For</th>}
+              {apart && <th className="py-1.5 pr-4 font-semibold max-sm:hidden">For</th>}
               <th className="py-1.5 pr-4 text-right font-semibold">Gates used</th>
               <th className="py-1.5 text-right font-semibold">Spare</th>
             </tr>
@@ -25,10 +25,15 @@ export function PackageTable({ packing }: { packing: Packing }) {
                 <td className="mono py-1.5 pr-4 text-right text-sm">{line.count}</td>
                 <th scope="row" className="mono whitespace-nowrap py-1.5 pr-4 text-sm">
                   {line.part}
-                  <span className="block whitespace-normal font-text font-normal sm:hidden">{line.partName}</span>
+                  <span className="block whitespace-normal font-text font-normal sm:hidden">
+                    {line.partName}
+                    {apart && <span className="block text-sm text-ink-soft">for {line.forBlock ?? "the board"}</span>}
+                  </span>
                 </th>
                 <td className="py-1.5 pr-4 max-sm:hidden">{line.partName}</td>
-                {apart && <td className="py-1.5 pr-4 text-sm text-ink-soft">{line.forBlock ?? "the board"}</td>}
+                {apart && (
+                  <td className="py-1.5 pr-4 text-sm text-ink-soft max-sm:hidden">{line.forBlock ?? "the board"}</td>
+                )}
                 <td className="mono whitespace-nowrap py-1.5 pr-4 text-right text-sm">
                   {line.gatesUsed} of {line.count * line.gatesPerPackage}
                 </td>

@@ -10,7 +10,8 @@ type Props = { line: OrderLine; field: StockField; edits: StockEdits; label: str
 /** A figure one types over where it stands. Enter keeps it and goes down, the arrows go up and down, Escape takes it back. */
 export function StockCell({ line, field, edits, label }: Props) {
   const value = edits.value(line, field);
-  const isWrong = edits.errorOf(line) !== undefined;
+  const failure = edits.failureOf(line);
+  const isWrong = failure !== undefined && (failure.field ?? field) === field;
 
   function press(event: KeyboardEvent<HTMLInputElement>) {
     if (event.key === "Escape") return edits.revert(line);

@@ -99,10 +99,10 @@ function Boards({ project, line }: { project: string; line: OrderLine }) {
 }
 
 const Failure = ({ line, edits }: { line: OrderLine; edits: StockEdits }) => {
-  const error = edits.errorOf(line);
-  return error ? (
+  const failure = edits.failureOf(line);
+  return failure ? (
     <span role="alert" className="text-sm font-medium text-failed">
-      {error}
+      {failure.text}
     </span>
   ) : null;
 };
@@ -123,11 +123,13 @@ export function PhoneOrder({ line, project, currency, canEdit, edits }: Sheet & 
         </span>
       </span>
       {line.description && <span className="text-sm text-ink-soft">{line.description}</span>}
-      <Boards project={project} line={line} />
-      <span className="flex flex-wrap items-center gap-x-4 gap-y-1.5 text-sm">
+      <span className="flex flex-wrap gap-x-4 text-sm">
         <span className="text-ink-soft">
-          {line.needed} needed{line.spares > 0 && ` + ${line.spares}`}
+          {line.needed} needed{line.spares > 0 && `, ${line.spares} spare`}
         </span>
+        <Boards project={project} line={line} />
+      </span>
+      <span className="flex flex-wrap items-center gap-x-4 gap-y-1.5 text-sm">
         <span className="flex items-center gap-1.5">
           in stock {canEdit ? <StockCell line={line} field="stock" edits={edits} label="In stock" /> : line.stock}
         </span>

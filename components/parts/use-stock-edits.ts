@@ -9,7 +9,10 @@ import type { StockAct } from "./parts-acts";
 
 export type StockField = "stock" | "price";
 type Known = { stock: string; price: string; version: number };
-type Edit = { typed: Partial<Record<StockField, string>>; own?: Known; error?: string; isPending?: boolean };
+type Typed = Partial<Record<StockField, string>>;
+/** What was refused, and in which cell; undefined: in both. */
+type Failure = { text: string; field: StockField | undefined };
+type Edit = { typed: Typed; own?: Known; failure?: Failure | undefined; isPending?: boolean };
 
 const current = z.object({ stock: z.number(), price: z.string(), version: z.int() });
 
@@ -33,7 +36,7 @@ export function useStockEdits(project: string, save: StockAct) {
     change(line.part, { typed: { ...edits[line.part]?.typed, [field]: text } });
 
   function revert(line: OrderLine) {
-    setEdits((before) => ({ ...before, [line.part]: { ...before[line.part], typed: {}, error: undefined } as Edit }));
+    change(line.part, { typed: {}, failure: undefined });
   }
 
   async function commit(line: OrderLine) {
@@ -48,13 +51,14 @@ export function useStockEdits(project: string, save: StockAct) {
     const reply = await reach(() => save(asked)).finally(() => pending.current.delete(part));
     if (reply.ok) {
       const { stock, price, version } = reply.value;
-      setEdits((all) => ({ ...all, [part]: { typed: {}, own: { stock: String(stock), price, version } } }));
+      const own = { stock: String(stock), price, version };
+      setEdits((all) => ({ ...all, [part]: { typed: typedSince(all[part]?.typed ?? {}, typed), own } }));
       router.refresh();
       return;
     }
     const theirs = reply.error.code === "conflict" ? current.safeParse(detailsOf(reply.error)).data : undefined;
     const own = theirs ? { ...theirs, stock: String(theirs.stock) } : undefined;
-    change(part, { isPending: false, error: sentenceOf(reply.error), ...(own ? { own } : {}) });
+    change(part, { isPending: false, failure: failureOf(reply.error), ...(own ? { own } : {}) });
   }
 
   return {
@@ -62,7 +66,7 @@ export function useStockEdits(project: string, save: StockAct) {
     type,
     revert,
     commit,
-    errorOf: (line: OrderLine) => edits[line.part]?.error,
+    failureOf: (line: OrderLine) => edits[line.part]?.failure,
     isPending: (line: OrderLine) => edits[line.part]?.isPending ?? false,
   };
 }
@@ -71,4 +75,15 @@ export type StockEdits = ReturnType<typeof useStockEdits>;
 
 const detailsOf = (error: Refused & { details?: Record<string, unknown> }) => error.details?.current;
 
-const sentenceOf = ({ message, fields }: Refused) => Object.values(fields ?? {})[0] ?? message;
+function failureOf({ message, fields = {} }: Refused): Failure {
+  if (fields.stock) return { text: fields.stock, field: "stock" };
+  if (fields.price) return { text: fields.price, field: "price" };
+  return { text: message, field: undefined };
+}
+
+/** What was typed on while the row was being saved stays. */
+function typedSince(now: Typed, sent: Record<StockField, string>): Typed {
+  return Object.fromEntries(
+    Object.entries(now).filter(([field, text]) => text !== sent[field === "stock" ? "stock" : "price"]),
+  );
+}
