@@ -75,6 +75,7 @@ export const pages: Record<string, PageRow> = {
     path: of("/wiring/signals"),
   },
   "app/(workshop)/projects/[project]/wiring/take/page.tsx": { permission: "wiring.edit", path: of("/wiring/take") },
+  "app/(workshop)/projects/[project]/wiring/page.tsx": { permission: "project.see", path: of("/wiring") },
   "app/(workshop)/projects/[project]/captures/page.tsx": { permission: "project.see", path: of("/captures") },
   "app/(workshop)/projects/[project]/parts/page.tsx": { permission: "project.see", path: of("/parts") },
   "app/(workshop)/projects/[project]/parts/boards/page.tsx": { permission: "project.see", path: of("/parts/boards") },

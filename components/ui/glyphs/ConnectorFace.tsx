@@ -29,7 +29,7 @@ export type ConnectorFaceProps = {
 
 /** Room for letters and figures beside the body, and how large a millimetre is drawn at most. */
 const MARGIN = 2.1;
-const PX_PER_MM = { lying: 5.9, standing: 6.6 };
+const PX_PER_MM = { lying: 5.9, standing: 6.2 };
 
 /** A connector's face to scale, as its standard has it: body, rows, positions. */
 export function ConnectorFace(props: ConnectorFaceProps) {

@@ -19,7 +19,8 @@ type PinProps = {
 };
 
 export function ConnectorPin({ x, y, room, isLying, isLit, isMarked, role, patterns, onPoint, onPick }: PinProps) {
-  const [width, height] = isLying ? [room * 0.6, room * 0.8] : [room * 0.8, room * 0.6];
+  const [across, along] = role === undefined ? [0.8, 0.6] : [0.84, 0.72];
+  const [width, height] = isLying ? [room * along, room * across] : [room * across, room * along];
   const box = (more: number) => ({
     x: x - width / 2 - more,
     y: y - height / 2 - more,
@@ -30,7 +31,7 @@ export function ConnectorPin({ x, y, room, isLying, isLit, isMarked, role, patte
   const isBare = role === undefined;
   return (
     <g onPointerEnter={onPoint} onPointerDown={onPick ?? onPoint} className={onPick && "cursor-pointer"}>
-      {isMarked && <rect {...box(room * 0.17)} className="fill-copper-ground" />}
+      {isMarked && <rect {...box(room * 0.12)} className="fill-copper-ground" />}
       {isBare ? (
         <rect
           {...box(isLit ? room * 0.04 : 0)}
@@ -42,10 +43,10 @@ export function ConnectorPin({ x, y, room, isLying, isLit, isMarked, role, patte
       )}
       {(isMarked || (isLit && !isBare)) && (
         <rect
-          {...box(room * (isMarked ? 0.17 : 0.13))}
+          {...box(room * (isMarked ? 0.12 : 0.07))}
           fill="none"
           className="stroke-copper"
-          strokeWidth={room * (isMarked ? 0.17 : 0.09)}
+          strokeWidth={room * (isMarked ? 0.2 : 0.12)}
         />
       )}
       {/* The whole pitch is sensitive: a pin is small under a finger. */}
@@ -71,9 +72,9 @@ function RolePin({ role, box, at, patterns }: RolePinProps) {
       {pattern !== undefined && <rect {...box} fill={`url(#${patternId(patterns, role)})`} opacity="0.7" />}
       <text
         x={at.x}
-        y={at.y + at.room * 0.19}
+        y={at.y + at.room * 0.22}
         textAnchor="middle"
-        fontSize={at.room * 0.54}
+        fontSize={at.room * 0.62}
         className={clsx("mono font-semibold", isSolid ? "fill-paper" : "fill-ink stroke-raised")}
         strokeWidth={at.room * 0.13}
         strokeLinejoin="round"

@@ -42,33 +42,43 @@ export function FacePanel(props: Props) {
       onPin={props.onPin}
       onPick={props.onPick}
       label={`Connector ${name}`}
-      className="mx-auto"
+      className={orientation === "lying" ? "mx-auto min-w-[35rem]" : "mx-auto"}
     />
   );
   return (
     <section aria-label={`Face of ${name}`} className="flex flex-col gap-3">
-      <RadioGroup
-        label="Seen from"
-        isLabelHidden
-        isInRow
-        options={SIDES}
-        value={props.side}
-        onChange={(side) => props.onSide(side === "solder" ? "solder" : "card")}
-      />
-      {placements.length > 1 && (
-        <Select
-          label="Where it sits"
+      <div className="flex flex-wrap items-center gap-x-5 gap-y-2.5">
+        <RadioGroup
+          label="Seen from"
           isLabelHidden
-          options={placements.map(({ id, label, slot }) => ({
-            id,
-            label,
-            ...(slot === null ? {} : { description: `slot ${slot}` }),
-          }))}
-          value={props.placement ?? null}
-          onChange={props.onPlacement}
+          isInRow
+          options={SIDES}
+          value={props.side}
+          onChange={(side) => props.onSide(side === "solder" ? "solder" : "card")}
         />
+        {placements.length > 1 && (
+          <Select
+            label="Where it sits"
+            isLabelHidden
+            options={placements.map(({ id, label, slot }) => ({
+              id,
+              label,
+              ...(slot === null ? {} : { description: `slot ${slot}` }),
+            }))}
+            value={props.placement ?? null}
+            onChange={props.onPlacement}
+            className="w-full min-w-36 max-w-56 flex-1"
+          />
+        )}
+      </div>
+      {orientation === "lying" ? (
+        // On a phone the drawing keeps its size and moves under the finger.
+        <div role="group" aria-label={`Drawing of ${name}`} tabIndex={0} className="overflow-x-auto rounded">
+          {drawing}
+        </div>
+      ) : (
+        drawing
       )}
-      {drawing}
       <RoleLegend roles={[...new Set(Object.values(props.roles))]} />
     </section>
   );

@@ -7,6 +7,7 @@ import { Button } from "@/components/ui/Button";
 import type { Edit, PinAt } from "@/lib/calc/interconnect";
 import { canBeDoneHere } from "../editor/edit-changes";
 import { WEIGHT_WORDS, WeightMark } from "../WeightMark";
+import { placeWords } from "./net-words";
 import type { ShownFinding } from "./shown-findings";
 
 type Props = {
@@ -15,6 +16,7 @@ type Props = {
   /** Touches the pin one is at. */
   isAtPin: boolean;
   canEdit: boolean;
+  hasSeveral: (board: string) => boolean;
   accept: ReactNode;
   onJump: (pin: PinAt) => void;
   onDo: (finding: ShownFinding) => void;
@@ -23,7 +25,7 @@ type Props = {
 const FEW = 4;
 
 /** One finding beside the table: what, why, what mends it, and the way to its pins. */
-export function FindingLine({ project, finding, isAtPin, canEdit, accept, onJump, onDo }: Props) {
+export function FindingLine({ project, finding, isAtPin, canEdit, hasSeveral, accept, onJump, onDo }: Props) {
   const { weight, title, why, mend, pins, edits, accepted } = finding;
   const [first] = pins;
   const places = [...new Map(pins.map((pin) => [`${pin.connectorId} ${pin.pin}`, pin])).values()];
@@ -59,7 +61,7 @@ export function FindingLine({ project, finding, isAtPin, canEdit, accept, onJump
                 onClick={() => onJump(pin)}
                 className="mono rounded-sm border border-rule-strong bg-raised px-1.5 py-0.5 text-2xs hover:border-copper hover:text-copper"
               >
-                {pin.label} <b className="font-semibold">{pin.pin}</b>
+                {placeWords(pin, hasSeveral)} <b className="font-semibold">{pin.pin}</b>
               </button>
             ))}
             {places.length > FEW && <span className="text-xs text-ink-soft">and {places.length - FEW} more</span>}

@@ -14,6 +14,7 @@ type Props = {
   connector: { id: string; name: string } | undefined;
   at: { connectorId: string; pin: string } | undefined;
   canEdit: boolean;
+  hasSeveral: (board: string) => boolean;
   acceptOf: (finding: ShownFinding) => ReactNode;
   onJump: (pin: PinAt) => void;
   onDo: (finding: ShownFinding) => void;

@@ -11,6 +11,12 @@ export function labelsOf(pins: readonly { label: string }[], most = 3): string {
   return labels.length > most ? `${labels.length} boards` : labels.join(", ");
 }
 
+/** "CON-01 a10"; with the connector's name where the board has several of them. */
+export const placeWords = (
+  { label, board, connector }: Pick<NetPin, "label" | "board" | "connector">,
+  hasSeveral: (board: string) => boolean,
+): string => (hasSeveral(board) ? `${label} ${connector}` : label);
+
 export type NetPart = { words: string; pins: NetPin[] };
 
 /** Who is on the net and what each does there: drivers, then receivers, supplies and what only passes on. */

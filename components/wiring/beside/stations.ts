@@ -7,8 +7,9 @@ export type Station = {
   key: string;
   /** "slot 3", or the board where it stands in no slot. */
   label: string;
-  /** Who sits there: "CON-01"; empty where nobody does. */
+  /** Who sits there: "CON-01", or the board that is meant for it; empty where none is. */
   who: string;
+  isSlot: boolean;
   face: Connector;
   /** Connectors that are this place, at their placements: the slot's and the one plugged into it. */
   at: readonly { placement: string; connectorId: string }[];
@@ -32,9 +33,12 @@ export function stationsOf({ machine, connectors, slots }: Given): Station[] {
     });
     const here = [{ placement: own.id, connector: connector.id }, ...met];
     for (const { placement, connector: id } of here) plugged.add(`${placement} ${id}`);
-    const who = machine.placements.find((one) => one.slot === slot.position)?.label ?? "";
+    const sitting = machine.placements.find((one) => one.slot === slot.position);
+    const who = sitting?.label.includes(" in slot ") ? sitting.board : (sitting?.label ?? "");
     const at = here.map(({ placement, connector: connectorId }) => ({ placement, connectorId }));
-    return [{ key: `slot ${slot.position} ${connector.id}`, label: `slot ${slot.position}`, who, face, at }];
+    return [
+      { key: `slot ${slot.position} ${connector.id}`, label: `slot ${slot.position}`, who, isSlot: true, face, at },
+    ];
   });
   const others = connectors.flatMap((connector): Station[] => {
     const face = designs.get(connector.id)?.face;
@@ -45,6 +49,7 @@ export function stationsOf({ machine, connectors, slots }: Given): Station[] {
         key: `${id} ${connector.id}`,
         label: `${label} ${connector.reference}`,
         who: "",
+        isSlot: false,
         face,
         at: [{ placement: id, connectorId: connector.id }],
       }));
@@ -53,12 +58,13 @@ export function stationsOf({ machine, connectors, slots }: Given): Station[] {
   return [...inSlots.sort((one, other) => number(one) - number(other)), ...others];
 }
 
-/** Pins of the net at this place. */
-export const litAt = ({ at }: Station, net: Net | undefined): string[] =>
-  net === undefined
-    ? []
-    : net.pins
-        .filter(({ placement, connectorId }) =>
-          at.some((one) => one.placement === placement && one.connectorId === connectorId),
-        )
-        .map(({ pin }) => pin);
+/** Pins of the net at this place; a slot's pin and the card's on it are one. */
+export const litAt = ({ at }: Station, net: Net | undefined): string[] => [
+  ...new Set(
+    (net?.pins ?? [])
+      .filter(({ placement, connectorId }) =>
+        at.some((one) => one.placement === placement && one.connectorId === connectorId),
+      )
+      .map(({ pin }) => pin),
+  ),
+];

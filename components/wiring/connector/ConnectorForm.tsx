@@ -109,7 +109,7 @@ function Fields({ boards, slots, connectors, connector }: Given & { connector?: 
             options={boards.map(({ id, code, name }) => ({ id, label: `${code} ${name}` }))}
           />
         )}
-        <FormTextField name="reference" label="Reference" mono maxLength={20} description="As printed on the board." />
+        <FormTextField name="reference" label="Reference" mono maxLength={20} />
       </div>
       <FormComboBox name="type" label="Face" options={[...connectorChoices, GRID]} />
       {type === GRID.id && (

@@ -6,7 +6,7 @@ import type { Weight } from "@/lib/calc/interconnect";
 import type { PinColumn } from "@/lib/pin-map/pin-columns";
 import { impliedRole } from "@/lib/pin-map/pin-role";
 import { WEIGHT_WORDS, WeightMark } from "../WeightMark";
-import type { DrawnColumn } from "./grid-columns";
+import type { DrawnColumn, RowShape } from "./grid-columns";
 import type { RowView } from "./row-views";
 
 export type RowProps = {
@@ -14,38 +14,39 @@ export type RowProps = {
   index: number;
   label: string;
   columns: readonly DrawnColumn[];
-  template: string;
+  shape: RowShape;
   height: number;
   top: number;
-  /** Chosen columns of this row, as places. */
-  chosen: { from: number; to: number } | undefined;
+  /** Chosen columns of this row, as places; −1 when there are none. */
+  chosenFrom: number;
+  chosenTo: number;
   /** The place one is in, when one is in this row. */
-  active: number | undefined;
+  active?: number | undefined;
   weight: Weight | undefined;
   drivers: string;
   rails: readonly string[];
   isReadOnly: boolean;
   /** The field, while this row's active cell is typed into. */
-  editor: ReactNode;
+  editor?: ReactNode;
   /** The sentence beside the active cell, and its id. */
-  note: { id: string; text: string; opens: "down" | "up" } | undefined;
+  note?: { id: string; text: string; opens: "down" | "up" } | undefined;
 };
 
 const MONO: readonly string[] = ["pin", "signal", "family", "loads", "enableGroup", "pullUpOhm", "net"];
 
 /** One row of the table. Drawn anew only when something in it changed. */
 export const GridRow = memo(function GridRow(props: RowProps) {
-  const { row, index, columns, template, height, top, active } = props;
+  const { row, index, columns, shape, height, top, active } = props;
   return (
     <div
       role="row"
       aria-rowindex={index + 2}
       className={clsx(
-        "absolute left-0 grid w-max min-w-full border-b border-rule",
+        "absolute left-0 grid border-b border-rule",
         active !== undefined && "z-[2]",
         active !== undefined ? "bg-copper-ground/45" : "bg-sheet",
       )}
-      style={{ gridTemplateColumns: template, height, transform: `translateY(${top}px)` }}
+      style={{ ...shape, height, transform: `translateY(${top}px)` }}
     >
       {columns.map((column, at) => (
         <Cell key={column.id} {...props} column={column} colIndex={at + 1} isChanged={row.isChanged} />
@@ -57,10 +58,10 @@ export const GridRow = memo(function GridRow(props: RowProps) {
 type CellProps = RowProps & { column: DrawnColumn; colIndex: number; isChanged: boolean };
 
 function Cell(props: CellProps) {
-  const { row, index, column, colIndex, chosen, active, editor, note } = props;
+  const { row, index, column, colIndex, active, editor, note } = props;
   const { id, place } = column;
   const isActive = place !== undefined && place === active;
-  const isChosen = place !== undefined && chosen !== undefined && place >= chosen.from && place <= chosen.to;
+  const isChosen = place !== undefined && place >= props.chosenFrom && place <= props.chosenTo;
   const problem = id === "net" ? undefined : row.problems[id];
   return (
     <div

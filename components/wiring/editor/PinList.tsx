@@ -1,5 +1,5 @@
 import clsx from "clsx";
-import { useId } from "react";
+import { useId, type ReactNode } from "react";
 import type { Weight } from "@/lib/calc/interconnect";
 import { isEmptyRow } from "@/lib/pin-map/pin-columns";
 import { impliedRole, readRole } from "@/lib/pin-map/pin-role";
@@ -10,15 +10,19 @@ import type { RowView } from "./row-views";
 type Props = {
   name: string;
   rows: readonly RowView[];
-  at: string | undefined;
+  labelAt: (index: number) => string;
+  /** The row one is at. */
+  at: number;
   rails: readonly string[];
   weightOf: (row: RowView) => Weight | undefined;
   driversOf: (row: RowView) => string;
   onPick: (index: number) => void;
+  /** Of the pin one is at. */
+  detail: ReactNode;
 };
 
 /** The pins for reading on a phone: what each carries; the empty ones in one line. */
-export function PinList({ name, rows, at, rails, weightOf, driversOf, onPick }: Props) {
+export function PinList({ name, rows, labelAt, at, rails, weightOf, driversOf, onPick, detail }: Props) {
   const id = useId();
   const carrying = rows.map((row, index) => ({ row, index })).filter(({ row }) => !isEmptyRow(row.texts));
   const bare = rows.length - carrying.length;
@@ -33,17 +37,17 @@ export function PinList({ name, rows, at, rails, weightOf, driversOf, onPick }: 
             (text) => text !== "",
           );
           return (
-            <li key={row.pin}>
+            <li key={`${row.connectorId} ${row.pin}`}>
               <button
                 type="button"
                 onClick={() => onPick(index)}
-                aria-pressed={row.pin === at}
+                aria-expanded={index === at}
                 className={clsx(
                   "grid min-h-12 w-full grid-cols-[3.25rem_minmax(0,1fr)_auto] items-center gap-x-2 px-1 py-2 text-left",
-                  row.pin === at && "bg-copper-ground",
+                  index === at && "bg-copper-ground",
                 )}
               >
-                <span className="mono text-sm font-semibold">{row.pin}</span>
+                <span className="mono text-sm font-semibold">{labelAt(index)}</span>
                 <span className="min-w-0">
                   <span className="mono block truncate font-semibold">{signal === "" ? "no signal" : signal}</span>
                   <span className="block truncate text-sm text-ink-soft">{[role, ...more].join(" · ")}</span>
@@ -55,9 +59,10 @@ export function PinList({ name, rows, at, rails, weightOf, driversOf, onPick }: 
                       <span className="sr-only">{WEIGHT_WORDS[weight]}</span>
                     </>
                   )}
-                  <RoleSwatch role={role} id={`${id}-${row.pin}`} />
+                  <RoleSwatch role={role} id={`${id}-${index}`} />
                 </span>
               </button>
+              {index === at && <div className="px-1 pb-4 pt-2">{detail}</div>}
             </li>
           );
         })}

@@ -7,6 +7,7 @@ import type { WiringView } from "@/lib/pin-map/load-wiring";
 import { FacePanel } from "../beside/FacePanel";
 import { FindingsBeside } from "../beside/FindingsBeside";
 import { driversOf, labelsOf } from "../beside/net-words";
+import { NetFacts } from "../beside/NetFacts";
 import { NetPanel } from "../beside/NetPanel";
 import { stationsOf } from "../beside/stations";
 import type { OpenDialog } from "../connector/ConnectorDialogs";
@@ -61,9 +62,12 @@ export function PinsView({ project, view, wiring, side, onSide, onOpen, acceptOf
       />
     );
 
+  const several = useMemo(() => boardsWithSeveral(connectors), [connectors]);
+  const facts = { net, stations, side, hasSeveral: (board: string) => several.has(board), onJump: goTo };
+
   return (
     <>
-      <div className="grid grid-cols-1 items-stretch gap-4 xl:grid-cols-[auto_minmax(0,1fr)_19rem] xl:grid-rows-[minmax(0,51rem)]">
+      <div className="grid grid-cols-1 items-stretch gap-4 xl:grid-cols-[auto_minmax(0,1fr)_19rem] xl:grid-rows-[minmax(0,54rem)]">
         {chosen && face && (
           <div className="rounded-lg border border-rule bg-sheet p-4 relative max-xl:hidden xl:w-44 xl:overflow-y-auto">
             {faceOf("standing")}
@@ -90,11 +94,13 @@ export function PinsView({ project, view, wiring, side, onSide, onOpen, acceptOf
           <div className="px-4 py-3 sm:hidden">
             <PinList
               {...{ name, rows }}
-              at={focused?.pin}
+              at={grid.selection.focus.row}
+              labelAt={table.table.labelAt}
               rails={known.rails}
               weightOf={wiring.weightOf}
               driversOf={driversAt}
               onPick={(row) => grid.go(at(row, placeOf("signal")))}
+              detail={<NetFacts {...facts} />}
             />
           </div>
           <div className="max-sm:hidden">
@@ -106,14 +112,21 @@ export function PinsView({ project, view, wiring, side, onSide, onOpen, acceptOf
           connector={chosen && { id: chosen.id, name }}
           at={focused}
           canEdit={!isReadOnly}
+          hasSeveral={facts.hasSeveral}
           acceptOf={(finding) => (acceptOf && finding.stored && !finding.accepted ? acceptOf(finding.stored) : null)}
           onJump={goTo}
           onDo={wiring.doWhatItSays}
         />
       </div>
-      {litName !== undefined && <NetPanel {...{ project, net, stations, side }} pin={litName} onJump={goTo} />}
+      {litName !== undefined && <NetPanel {...facts} project={project} pin={litName} />}
     </>
   );
+}
+
+/** Of these a pin is named with its connector. */
+function boardsWithSeveral(connectors: WiringView["connectors"]): ReadonlySet<string> {
+  const codes = connectors.map(({ code }) => code);
+  return new Set(codes.filter((code, index) => codes.indexOf(code) !== index));
 }
 
 const inOrder = (words: Iterable<string>) =>

@@ -1,7 +1,7 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useMemo, useRef, useState } from "react";
+import { useEffect, useMemo, useRef, useState } from "react";
 import { toast } from "@/components/ui/toast-store";
 import { netsByPin, type PinRole } from "@/lib/calc/interconnect";
 import type { WiringView } from "@/lib/pin-map/load-wiring";
@@ -98,6 +98,12 @@ export function useWiring({ view, shelf, save, isReadOnly, startPin }: Given) {
     if (await saving.saveAll(ids)) toast({ text: count === 1 ? "One pin is saved." : `${count} pins are saved.` });
     router.refresh();
   }
+
+  // Whoever came by a link to a pin wants to be at it.
+  const startRow = useRef(startPin === undefined ? undefined : grid.selection.focus.row);
+  useEffect(() => {
+    if (startRow.current !== undefined) focusCell(scroller, startRow.current, placeOf("signal"));
+  }, []);
 
   useSaveKey(() => void saveAll(), !isReadOnly);
 
