@@ -30,6 +30,26 @@ const MACHINE = [
     "/units/TIM-01",
     "/units/TIM-01/print",
   ],
+  ...[
+    "/wiring",
+    "/wiring?connector=CON.J1",
+    "/wiring/nets",
+    "/wiring/nets?net=BUSY_N",
+    "/wiring/findings",
+    "/wiring/signals",
+    "/wiring/families",
+    "/wiring/power",
+    "/wiring/take",
+  ],
+  ...[
+    "/parts",
+    "/parts/boards",
+    "/parts/boards/CON",
+    "/parts/blocks",
+    "/parts/logic",
+    "/parts/logic?part=283",
+    "/parts/delay",
+  ],
   ...["/bench", "/bench/TIM-01", "/captures", "/log", "/log/new", "/people", "/settings", "/search?q=clock", "/digest"],
 ];
 const THEMES = ["light", "dark"] as const;
