@@ -7,7 +7,7 @@ export type Week = {
   gained: number;
   /** Checks that ceased to hold: failed on repeat, reopened, doubtful. */
   lost: number;
-  /** Attempts at checks that held or failed already and did not change it. */
+  /** Attempts at checks that had been attempted before. */
   repeats: number;
   sessions: number;
 };
@@ -15,7 +15,7 @@ export type Week = {
 export type ForecastInput = {
   events: readonly CheckEvent[];
   sessions: readonly BenchSession[];
-  /** Checks that do not hold now. */
+  /** Checks that do not hold now: not the number that ever were. */
   remaining: number;
   nowMs: number;
   /** The same seed gives the same dates. */
