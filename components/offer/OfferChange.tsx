@@ -1,7 +1,12 @@
 import clsx from "clsx";
 import { Icon } from "@/components/ui/Icon";
 
-export type ChangeLine = { name: string; now: string; then: string; isProse?: boolean };
+export type ChangeLine = {
+  name: string; /** Null in a check that is not there yet. */
+  now: string | null;
+  then: string;
+  isProse?: boolean;
+};
 
 /** What stands in the check now, and what would stand there. Lines that stay the same are said quietly. */
 export function OfferChange({ lines }: { lines: readonly ChangeLine[] }) {
@@ -11,7 +16,7 @@ export function OfferChange({ lines }: { lines: readonly ChangeLine[] }) {
         <div key={name} className="contents">
           <dt className="text-ink-soft">{name}</dt>
           <dd className={clsx("flex flex-wrap items-baseline gap-x-2", !isProse && "mono text-sm")}>
-            {now !== then && (
+            {now !== null && now !== then && (
               <>
                 <span className="text-ink-soft">
                   <span className="sr-only">now </span>
@@ -21,7 +26,7 @@ export function OfferChange({ lines }: { lines: readonly ChangeLine[] }) {
               </>
             )}
             <span className={clsx(now !== then && "font-semibold")}>
-              <span className="sr-only">{now === then ? "stays " : "then "}</span>
+              <span className="sr-only">{now === then ? "stays " : now === null ? "" : "then "}</span>
               {then}
             </span>
             {now === then && <span className="font-text text-ink-soft">as it is</span>}

@@ -95,7 +95,7 @@ export function OfferToCheck({
         <p className="text-[0.9375rem] font-semibold">{options[0]?.label}</p>
       )}
       <OfferChange lines={lines} />
-      {note && !isThere && <Notice kind="doubtful">{note}</Notice>}
+      {note && <Notice kind="doubtful">{note}</Notice>}
       {error && <Notice kind="error">{error.message}</Notice>}
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 print:hidden">
         {canEdit && !isThere && (
@@ -137,8 +137,12 @@ function linesOf(
   caution: OfferInput["caution"],
   target: OfferTarget | undefined,
 ): ChangeLine[] {
-  const lines = fields.map(({ field, name, text }) => ({ name, now: target?.typed[field] ?? "", then: text }));
+  const lines = fields.map(({ field, name, text }) => ({
+    name,
+    now: target ? (target.typed[field] ?? "") : null,
+    then: text,
+  }));
   if (!caution) return lines;
-  const now = target?.caution.split("\n").find((line) => line.startsWith(caution.begins)) ?? "";
+  const now = target ? (target.caution.split("\n").find((line) => line.startsWith(caution.begins)) ?? "") : null;
   return [...lines, { name: "Caution", now, then: caution.text, isProse: true }];
 }

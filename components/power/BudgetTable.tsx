@@ -81,7 +81,7 @@ export function BudgetTable({ boards, rails, machine, chosen, addressOf }: Props
             </tr>
           ))}
         </tbody>
-        {machine && (
+        {machine && shown.length > 0 && (
           <tfoot>
             <tr className="font-semibold">
               <th scope="row" colSpan={1} className="py-2.5 pl-4 pr-3 font-semibold sm:pl-5">

@@ -73,7 +73,7 @@ function RailOffer({ window, rails, ...given }: RailOfferProps) {
   const { limits, expected, caution, fresh } = firstPowerOffer(window);
   return (
     <section
-      aria-label={`From ${rail}`}
+      aria-label={`First power from ${rail}`}
       className="flex flex-col gap-3 [&+section]:border-t [&+section]:border-rule [&+section]:pt-5"
     >
       <p className="text-[0.9375rem]">

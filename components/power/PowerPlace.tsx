@@ -90,7 +90,12 @@ export function PowerPlace({ project, view, chosen, place, can, acts }: Props) {
 
 function ledeOf({ boards, machine }: PowerView): string {
   const known = boards.filter(({ power }) => power !== null).length;
-  const of = `${known} of ${boards.length} boards ${known === 1 ? "has" : "have"} a budget.`;
+  const of =
+    known === 0
+      ? "No board has a budget yet."
+      : known === boards.length
+        ? "Every board has a budget."
+        : `${known} of ${boards.length} boards ${known === 1 ? "has" : "have"} a budget.`;
   if (!machine.ok) return of;
   const short = machine.value.margins.filter(({ verdict }) => verdict === "too little").map(({ rail }) => rail);
   const hot = machine.value.contacts.filter(({ verdict }) => verdict !== "fits").length;

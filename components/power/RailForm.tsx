@@ -7,7 +7,7 @@ import { Form } from "@/components/ui/form/Form";
 import { TheirVersion } from "@/components/workshop/TheirVersion";
 import { useStaleEdit } from "@/components/workshop/use-stale-edit";
 import type { PowerView } from "@/lib/power/power-view";
-import { railNow, saveRailInput, type RailNow } from "@/lib/rail/schema";
+import { INLET, railNow, saveRailInput, type RailNow } from "@/lib/rail/schema";
 import { typedRail } from "@/lib/rail/typed-rail";
 import type { PowerActs } from "./power-acts";
 
@@ -73,7 +73,7 @@ export function RailForm({ project, rail, begin, sources, save, onDone, onCancel
               name="source"
               label="Fed by"
               options={[
-                { id: "", label: "The backplane's own inlet" },
+                { id: INLET, label: "The backplane's own inlet" },
                 ...sources.map(({ id, code, name }) => ({ id, label: `${code} ${name}` })),
               ]}
             />

@@ -38,7 +38,7 @@ export function Panel({ title, note, actions, level = 2, padding = "md", classNa
             )}
             {note && <span className="text-sm text-ink-soft">{note}</span>}
           </div>
-          {actions && <div className="flex flex-wrap gap-2">{actions}</div>}
+          {actions && <div className="flex flex-wrap gap-2 print:hidden">{actions}</div>}
         </header>
       )}
       <div

@@ -6,6 +6,9 @@ import { writeId } from "@/lib/form/write-id";
 const toMm = (metres: number | null) => (metres === null ? null : Number((metres * 1e3).toPrecision(9)));
 const toUm = (metres: number | null) => (metres === null ? null : Number((metres * 1e6).toPrecision(9)));
 
+/** Fed by no board of the machine. */
+export const INLET = "inlet";
+
 /** A rail as typed. `rail` is its id, or "" for a new one. */
 export const saveRailInput = z
   .object({
@@ -20,14 +23,14 @@ export const saveRailInput = z
     ),
     tolerancePercent: figure("%", "Say how far it may be off.", { least: 0, most: 50, example: "5 %" }),
     capacityA: optionalFigure("A", { least: 1e-6, most: 1000, example: "3 A" }),
-    /** Id of the board that feeds it into the backplane, or "". */
-    source: z.union([z.uuid(), z.literal("")], { message: "Choose the board that feeds it." }),
+    /** Id of the board that feeds it into the backplane, or the backplane's own inlet. */
+    source: z.union([z.uuid(), z.literal(INLET)], { message: "Choose what feeds it." }),
     segmentMm: optionalFigure("m", { least: 1e-4, most: 0.5, example: "20.32 mm" }).transform(toMm),
     widthMm: optionalFigure("m", { least: 5e-5, most: 0.5, example: "3 mm" }).transform(toMm),
     thicknessUm: optionalFigure("m", { least: 5e-6, most: 2e-3, example: "35 µm" }).transform(toUm),
   })
   .transform(({ segmentMm, widthMm, thicknessUm, source, ...rest }, context) => {
-    const sourceBoardId = source === "" ? null : source;
+    const sourceBoardId = source === INLET ? null : source;
     if (segmentMm === null && widthMm === null && thicknessUm === null) return { ...rest, sourceBoardId, copper: null };
     if (segmentMm !== null && widthMm !== null && thicknessUm !== null) {
       return { ...rest, sourceBoardId, copper: { segmentMm, widthMm, thicknessUm } };

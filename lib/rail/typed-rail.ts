@@ -1,5 +1,5 @@
 import { formatQuantity, type Unit } from "@/lib/calc/units";
-import type { RailNow, SaveRailTyped } from "./schema";
+import { INLET, type RailNow, type SaveRailTyped } from "./schema";
 
 type Typed = Omit<SaveRailTyped, "project" | "writeId" | "rail" | "version">;
 
@@ -9,7 +9,7 @@ const write = (value: number | null | undefined, unit: Unit) =>
 /** A rail as its form holds it; without one the form of a new rail. */
 export function typedRail(rail?: RailNow): Typed {
   if (!rail) {
-    const blank = { name: "", volts: "", capacityA: "", source: "", segmentMm: "", widthMm: "", thicknessUm: "" };
+    const blank = { name: "", volts: "", capacityA: "", source: INLET, segmentMm: "", widthMm: "", thicknessUm: "" };
     return { ...blank, tolerancePercent: "5 %" } satisfies Typed;
   }
   const { copper } = rail;
@@ -18,7 +18,7 @@ export function typedRail(rail?: RailNow): Typed {
     volts: write(rail.volts, "V"),
     tolerancePercent: write(rail.tolerancePercent, "%"),
     capacityA: write(rail.capacityA, "A"),
-    source: rail.sourceBoardId ?? "",
+    source: rail.sourceBoardId ?? INLET,
     segmentMm: write(copper && copper.segmentMm / 1e3, "m"),
     widthMm: write(copper && copper.widthMm / 1e3, "m"),
     thicknessUm: write(copper && copper.thicknessUm / 1e6, "m"),

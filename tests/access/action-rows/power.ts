@@ -16,7 +16,7 @@ const rail = {
   volts: "12 V",
   tolerancePercent: "5 %",
   capacityA: "1 A",
-  source: "",
+  source: "inlet",
   segmentMm: "",
   widthMm: "",
   thicknessUm: "",
