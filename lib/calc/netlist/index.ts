@@ -1,4 +1,5 @@
 export { type NetlistDifference } from "./difference";
+export { type IpcScale } from "./ipc/scale";
 export {
   type Net,
   type Netlist,
@@ -11,4 +12,6 @@ export {
   type Side,
   type ToolingHole,
 } from "./netlist";
+export { pinName } from "./pin-name";
+export { readIpcD356 } from "./read-ipc-d356";
 export { type LineNote, type NetlistReading } from "./reading";
