@@ -1,5 +1,5 @@
 import { readGraph, type CheckState } from "../check-graph";
-import type { Paces } from "../forecast";
+import { NO_PACES, type Paces } from "../forecast";
 import { boardBook, EMPTY_BOOK, type BoardBook } from "./board-book";
 import type { DoubtAfter, DoubtLine, DoubtReason } from "./doubt-line";
 import { impliedCover, statesNothing } from "./implied-cover";
@@ -8,8 +8,6 @@ import { repeatWork } from "./repeat-work";
 import type { BoardMap, CoveringCheck, DoubtChoices, Rework } from "./rework";
 import { describeWay, spreadDoubt } from "./spread-doubt";
 import { touchSet, type TouchSet } from "./touch-set";
-
-const NO_PACES: Paces = { inspection: null, continuity: null, "power-on": null, function: null, integration: null };
 
 export type DoubtContext = {
   /** Of the boards whose units have checks among these; a board without a map is found by names alone. */

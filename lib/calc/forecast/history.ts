@@ -27,3 +27,11 @@ export type BenchSession = {
 
 /** Seconds a check takes, by stage; null: not known. */
 export type Paces = Readonly<Record<CheckStage, number | null>>;
+
+export const NO_PACES: Paces = {
+  inspection: null,
+  continuity: null,
+  "power-on": null,
+  function: null,
+  integration: null,
+};

@@ -17,3 +17,5 @@ export {
   type ScheduledCheck,
   type ScheduleRequest,
 } from "./check-order";
+export { orderChecks } from "./order-checks";
+export { scheduleChecks } from "./schedule-checks";
