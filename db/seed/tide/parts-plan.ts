@@ -138,9 +138,9 @@ export const PLANS: BoardPlan[] = [
     board: "CON",
     packing: "pooled",
     family: "HC",
-    clockHz: "1.8432 MHz",
-    activity: 0.25,
-    loadPf: 50,
+    clockHz: "3.6864 MHz",
+    activity: 0.5,
+    loadPf: 80,
     unitsPlanned: 3,
     sparesTied: true,
     blocks: [
