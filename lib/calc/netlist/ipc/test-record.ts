@@ -1,5 +1,6 @@
 import type { NetPoint, PointKind } from "../netlist";
 import { digitsAt, signedDigitsAt } from "./fields";
+import { isNoNet } from "../no-net";
 import { findShift } from "./shifted-columns";
 
 /** Holes smaller than this are not drilled: the figure is in other units than the coordinates (seen: mils). */
@@ -60,7 +61,7 @@ export function readTestRecord(line: string, kind: PointKind, context: RecordCon
   const wall = line.charAt(37 + shift);
   if (point.kind !== "surface" && (wall === "P" || wall === "U")) point.isPlated = wall === "P";
   const net = line.slice(3, 17).trim();
-  return { net: net === "N/C" ? "" : net, point, access: Number.isNaN(access) ? undefined : access };
+  return { net: isNoNet(net) ? "" : net, point, access: Number.isNaN(access) ? undefined : access };
 }
 
 type MaybePlace = { xMm: number | null; yMm: number | null };
