@@ -7,6 +7,7 @@ const HEADINGS: Record<SearchHit["kind"], string> = {
   unit: "Units",
   check: "Checks",
   signal: "Signals, pins and rails",
+  fault: "Faults",
   log: "Log",
 };
 

@@ -1,7 +1,8 @@
-import { and, eq, isNull } from "drizzle-orm";
+import { and, asc, eq, isNull } from "drizzle-orm";
 import type { Queryable } from "@/db/client";
 import { units } from "@/db/schema/boards";
 import { attachments, logEntries } from "@/db/schema/evidence";
+import { faults, reworks } from "@/db/schema/faults";
 import { users } from "@/db/schema/people";
 import { procedureChecks } from "@/db/schema/procedures";
 import { checks } from "@/db/schema/travelers";
@@ -77,4 +78,44 @@ export async function findTargetEntry(db: Queryable, scope: InProject, logEntryI
     .where(and(eq(logEntries.projectId, scope.projectId), eq(logEntries.id, logEntryId), isNull(logEntries.archivedAt)))
     .limit(1);
   return row;
+}
+
+export async function findTargetFault(db: Queryable, scope: InProject, faultId: string) {
+  const [row] = await db
+    .select({ id: faults.id, unitId: faults.unitId })
+    .from(faults)
+    .where(and(eq(faults.projectId, scope.projectId), eq(faults.id, faultId)))
+    .limit(1);
+  return row;
+}
+
+export async function findTargetRework(db: Queryable, scope: InProject, reworkId: string) {
+  const [row] = await db
+    .select({ id: reworks.id, unitId: reworks.unitId })
+    .from(reworks)
+    .where(and(eq(reworks.projectId, scope.projectId), eq(reworks.id, reworkId)))
+    .limit(1);
+  return row;
+}
+
+export async function findFaultEvidence(db: Queryable, scope: InProject, faultId: string) {
+  return db
+    .select(evidenceColumns)
+    .from(attachments)
+    .leftJoin(users, eq(users.id, attachments.uploadedBy))
+    .where(
+      and(eq(attachments.projectId, scope.projectId), eq(attachments.faultId, faultId), isNull(attachments.archivedAt)),
+    )
+    .orderBy(asc(attachments.createdAt));
+}
+
+/** Pictures of the reworks of one unit, each with its rework and side. */
+export async function findReworkEvidence(db: Queryable, scope: InProject, unitId: string) {
+  return db
+    .select({ ...evidenceColumns, reworkId: attachments.reworkId, side: attachments.reworkSide })
+    .from(attachments)
+    .innerJoin(reworks, and(eq(reworks.id, attachments.reworkId), eq(reworks.unitId, unitId)))
+    .leftJoin(users, eq(users.id, attachments.uploadedBy))
+    .where(and(eq(attachments.projectId, scope.projectId), isNull(attachments.archivedAt)))
+    .orderBy(asc(attachments.createdAt));
 }

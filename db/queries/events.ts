@@ -16,6 +16,8 @@ export type EventFilter = {
   /** Serial. */
   unit?: string | undefined;
   actorId?: string | undefined;
+  /** What the event is about: a fault, an entry. */
+  subjectId?: string | undefined;
   /** Events older than this one. */
   before?: number | undefined;
 };
@@ -51,6 +53,7 @@ export async function findEvents(db: Queryable, scope: InProject, filter: EventF
         filter.withoutEntryPictures ? notOfEntry : undefined,
         filter.unit === undefined ? undefined : eq(units.serial, filter.unit),
         filter.actorId === undefined ? undefined : eq(events.actorId, filter.actorId),
+        filter.subjectId === undefined ? undefined : eq(events.subjectId, filter.subjectId),
         filter.before === undefined ? undefined : lt(events.id, filter.before),
       ),
     )

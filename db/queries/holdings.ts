@@ -45,7 +45,7 @@ export async function findHoldings(
     from held`);
 }
 
-/** Units outside the given ones with a check that waits for one of theirs. */
+/** Units outside the given ones with a check that waits for one of theirs, or that a rework of theirs put in doubt. */
 export async function findWaitingUnits(db: Queryable, scope: InProject, unitIds: readonly string[]): Promise<string[]> {
   const rows = await db.execute<{ id: string }>(sql`
     select distinct waiting.unit_id as id from checks needed
@@ -53,6 +53,12 @@ export async function findWaitingUnits(db: Queryable, scope: InProject, unitIds:
       join checks waiting on waiting.id = edge.check_id
     where needed.project_id = ${scope.projectId} and needed.unit_id in ${listed(unitIds)}
       and waiting.unit_id not in ${listed(unitIds)}
+    union
+    select distinct doubted.unit_id from reworks
+      join rework_doubts d on d.rework_id = reworks.id
+      join checks doubted on doubted.id = d.check_id
+    where reworks.project_id = ${scope.projectId} and reworks.unit_id in ${listed(unitIds)}
+      and doubted.unit_id not in ${listed(unitIds)}
     order by 1`);
   return rows.map((row) => row.id);
 }

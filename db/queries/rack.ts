@@ -92,7 +92,7 @@ export async function findRackChecks(db: Queryable, scope: InProject) {
 
 export type RackCheck = Awaited<ReturnType<typeof findRackChecks>>[number];
 
-/** How many checks of the units in work fail or wait to be repeated, and what must be mended in the wiring. */
+/** How many checks of the units in work fail or wait to be repeated, what must be mended in the wiring, standing faults. */
 export async function countOpenChecks(db: Queryable, scope: InProject) {
   const [row] = await db
     .select({
@@ -102,6 +102,8 @@ export async function countOpenChecks(db: Queryable, scope: InProject) {
         where found.project_id = ${scope.projectId} and found.state = 'open' and found.weight = 'must')`.mapWith(
         Number,
       ),
+      faults: sql<number>`(select count(*) from faults
+        where faults.project_id = ${scope.projectId} and faults.state in ('open', 'traced'))`.mapWith(Number),
     })
     .from(checks)
     .innerJoin(units, and(eq(units.id, checks.unitId), isNull(units.archivedAt)))
@@ -112,7 +114,7 @@ export async function countOpenChecks(db: Queryable, scope: InProject) {
         inArray(checks.state, ["failed", "doubtful", "reopened"]),
       ),
     );
-  return row ?? { failing: 0, doubtful: 0, toMend: 0 };
+  return row ?? { failing: 0, doubtful: 0, toMend: 0, faults: 0 };
 }
 
 /** What happened since the viewer's last digest, or since Sunday 00:00 in the project's zone. */

@@ -3,6 +3,7 @@ import type { PgColumn } from "drizzle-orm/pg-core";
 import type { Queryable } from "@/db/client";
 import { boards, revisions, units } from "@/db/schema/boards";
 import { logEntries } from "@/db/schema/evidence";
+import { faults } from "@/db/schema/faults";
 import { procedureChecks } from "@/db/schema/procedures";
 import { checks } from "@/db/schema/travelers";
 
@@ -111,5 +112,40 @@ export async function searchLog(db: Queryable, scope: InProject, { words, limit 
       ),
     )
     .orderBy(desc(logEntries.createdAt))
+    .limit(limit);
+}
+
+export async function searchFaults(db: Queryable, scope: InProject, { words, limit }: Wanted) {
+  const names = sql`(${faults.signals} || ${faults.pins})::text`;
+  return db
+    .select({
+      id: faults.id,
+      number: faults.number,
+      title: faults.title,
+      state: faults.state,
+      serial: units.serial,
+      says: sql<string>`concat_ws(' ', ${faults.symptom}, ${faults.cause}, ${faults.mend})`,
+    })
+    .from(faults)
+    .innerJoin(units, eq(units.id, faults.unitId))
+    .where(
+      and(
+        eq(faults.projectId, scope.projectId),
+        everyWord(
+          words,
+          sql`concat('F', ${faults.number})`,
+          faults.title,
+          faults.symptom,
+          faults.suspected,
+          faults.tried,
+          faults.cause,
+          faults.mend,
+          faults.lesson,
+          names,
+          units.serial,
+        ),
+      ),
+    )
+    .orderBy(desc(faults.number))
     .limit(limit);
 }

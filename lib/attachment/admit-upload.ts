@@ -1,6 +1,6 @@
 import { database } from "@/db/client";
-import { findTargetCheck, findTargetEntry } from "@/db/queries/attachments";
-import type { AttachmentKind } from "@/db/schema/evidence";
+import { findTargetCheck, findTargetEntry, findTargetFault, findTargetRework } from "@/db/queries/attachments";
+import type { AttachmentKind, ReworkSide } from "@/db/schema/evidence";
 import { grant } from "@/lib/access/grant";
 import type { Viewer } from "@/lib/access/scope";
 import { ok, refuse, type Answer } from "@/lib/actions/answer";
@@ -18,6 +18,9 @@ export type UploadMetadata = {
   fileName: string;
   checkId: string | null;
   logEntryId: string | null;
+  faultId: string | null;
+  reworkId: string | null;
+  reworkSide: ReworkSide | null;
 };
 
 /** Whether the person may send this file to this place; asked before a link to send it to is given out. */
@@ -50,16 +53,22 @@ export async function admitUpload(
     fileName: name.value,
     checkId: input.checkId ?? null,
     logEntryId: input.logEntryId ?? null,
+    faultId: input.faultId ?? null,
+    reworkId: input.reworkId ?? null,
+    reworkSide: input.reworkId ? (input.reworkSide ?? "after") : null,
   });
 }
 
 type InProject = { projectId: string };
-type Target = { checkId?: string | null | undefined; logEntryId?: string | null | undefined };
+type Target = {
+  [Place in "checkId" | "logEntryId" | "faultId" | "reworkId"]?: string | null | undefined;
+};
 
-/** The unit the file will belong to, through its check or log entry. */
+/** The unit the file will belong to, through its check, log entry, fault or rework. */
 export async function checkTarget(scope: InProject, target: Target): Promise<Answer<{ unitId: string | null }>> {
-  if (target.checkId && target.logEntryId)
-    return refuse("invalid", "A file belongs to a check or to a log entry, not to both.");
+  const places = [target.checkId, target.logEntryId, target.faultId, target.reworkId].filter(Boolean);
+  if (places.length > 1)
+    return refuse("invalid", "A file belongs to one place: a check, a log entry, a fault or a rework.");
   if (target.checkId) {
     const check = await findTargetCheck(database(), scope, target.checkId);
     return check
@@ -71,6 +80,18 @@ export async function checkTarget(scope: InProject, target: Target): Promise<Ans
     return entry
       ? ok({ unitId: entry.unitId })
       : refuse("not-found", "There is no such log entry in this project. Nothing was kept.");
+  }
+  if (target.faultId) {
+    const fault = await findTargetFault(database(), scope, target.faultId);
+    return fault
+      ? ok({ unitId: fault.unitId })
+      : refuse("not-found", "There is no such fault in this project. Nothing was kept.");
+  }
+  if (target.reworkId) {
+    const rework = await findTargetRework(database(), scope, target.reworkId);
+    return rework
+      ? ok({ unitId: rework.unitId })
+      : refuse("not-found", "There is no such rework in this project. Nothing was kept.");
   }
   return ok({ unitId: null });
 }

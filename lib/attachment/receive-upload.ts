@@ -89,7 +89,7 @@ function insert(
   objectKey: string,
 ): Promise<Answer<EvidenceView>> {
   const { projectId, viewer } = scope;
-  const { uploadId, checkId, logEntryId } = metadata;
+  const { uploadId, checkId, logEntryId, faultId, reworkId, reworkSide } = metadata;
   return change({ writeId: uploadId, userId: viewer.userId, action: "attach-evidence" }, async (tx) => {
     const target = await checkTarget(scope, metadata);
     if (!target.ok) return reject(target.error.code, target.error.message);
@@ -112,6 +112,9 @@ function insert(
         unitId,
         checkId,
         logEntryId,
+        faultId,
+        reworkId,
+        reworkSide,
       })
       .returning({ id: attachments.id });
     const evidence = row && (await findEvidence(tx, scope, row.id));

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import type { AttachmentKind } from "@/db/schema/evidence";
+import type { AttachmentKind, ReworkSide } from "@/db/schema/evidence";
 import { optionalLine } from "@/lib/form/text";
 import { writeId } from "@/lib/form/write-id";
 import { FILE_LIMITS } from "@/lib/storage/limits";
@@ -7,8 +7,14 @@ import type { EvidenceView } from "@/lib/traveler/traveler-view";
 
 export const ATTACHMENT_KINDS = ["photo", "scope-picture", "scope-data"] as const satisfies readonly AttachmentKind[];
 
-/** What the file is evidence of: a check, a log entry, or nothing yet. */
-export type EvidenceTarget = { checkId?: string; logEntryId?: string };
+/** What the file is evidence of: a check, a log entry, a fault, one side of a rework, or nothing yet. */
+export type EvidenceTarget = {
+  checkId?: string;
+  logEntryId?: string;
+  faultId?: string;
+  reworkId?: string;
+  reworkSide?: ReworkSide;
+};
 
 /** What a client sends along with a file. */
 export const uploadInput = z.object({
@@ -19,6 +25,9 @@ export const uploadInput = z.object({
   kinds: z.array(z.enum(ATTACHMENT_KINDS)).min(1).max(3),
   checkId: z.uuid().optional(),
   logEntryId: z.uuid().optional(),
+  faultId: z.uuid().optional(),
+  reworkId: z.uuid().optional(),
+  reworkSide: z.enum(["before", "after"]).optional(),
 });
 export type UploadInput = z.infer<typeof uploadInput>;
 

@@ -43,6 +43,10 @@ export function phrases(context: SentenceContext) {
     block: (name: string) => link(name, context.subjectId ? `${home}/parts/blocks/${context.subjectId}` : undefined),
     unit,
     check,
+    fault: (number: number, title: string) => link(`F${number} ${title}`, `${home}/faults/${number}`),
+    rework: (number: number) => link(`rework R${number}`, unitHref && `${unitHref}/reworks#R${number}`),
+    punchList: (code: string, letter: string) =>
+      link(`punch list of ${code} rev ${letter}`, `${home}/boards/${encodeURIComponent(code)}#punch-${letter}`),
     entry: (title: string) => link(`“${title}”`, context.subjectId ? `${home}/log/${context.subjectId}` : undefined),
     file: (text: string) => link(text, context.subjectId ? `/api${home}/files/${context.subjectId}` : undefined),
     /** Where a file belongs, when it belongs anywhere. */

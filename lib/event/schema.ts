@@ -97,6 +97,22 @@ export const eventPayloads = {
   "delay.edited": z.object({ name: text }),
   "delay.archived": z.object({ name: text }),
   "delay.restored": z.object({ name: text }),
+  "fault.opened": z.object({ number: z.number(), title: text, serial: text }),
+  /** what: the parts of the record that were written, in words. */
+  "fault.edited": z.object({ number: z.number(), title: text, what: text }),
+  "fault.stated": z.object({ number: z.number(), title: text, from: text, to: text }),
+  /** what: "bodge wire W3, U6-12 to U9-3"; doubtful: checks that it put in doubt. */
+  "rework.recorded": z.object({
+    serial: text,
+    number: z.number(),
+    what: text,
+    fault: z.number().nullable(),
+    doubtful: z.number(),
+    spared: z.number(),
+  }),
+  "punch.taken": z.object({ code: text, letter: text, items: z.number() }),
+  "punch.dealt": z.object({ code: text, letter: text, item: text, how: text }),
+  "punch.reopened": z.object({ code: text, letter: text, item: text }),
 } as const satisfies Record<string, z.ZodType>;
 
 export type EventKind = keyof typeof eventPayloads;

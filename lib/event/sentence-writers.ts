@@ -312,6 +312,54 @@ export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
   "delay.edited": ({ name }, { who, parts }) => [who, " changed the delay path ", parts(name, "/delay"), "."],
   "delay.archived": ({ name }, { who, parts }) => [who, " archived the delay path ", parts(name, "/delay"), "."],
   "delay.restored": ({ name }, { who, parts }) => [who, " restored the delay path ", parts(name, "/delay"), "."],
+  "fault.opened": ({ number, title, serial }, { who, fault, unit }) => [
+    who,
+    " opened the fault ",
+    fault(number, title),
+    " of ",
+    unit(serial),
+    ".",
+  ],
+  "fault.edited": ({ number, title, what }, { who, fault }) => [
+    who,
+    " wrote on the fault ",
+    fault(number, title),
+    `: ${endSentence(what)}`,
+  ],
+  "fault.stated": ({ number, title, from, to }, { who, fault }) => [
+    who,
+    " called the fault ",
+    fault(number, title),
+    ` ${to}, before ${from}.`,
+  ],
+  "rework.recorded": ({ serial, number, what, fault, doubtful, spared }, { who, rework, unit }) => [
+    who,
+    " recorded ",
+    rework(number),
+    " of ",
+    unit(serial),
+    `${fault === null ? "" : ` for F${fault}`}: ${what}. `,
+    doubtful === 0 ? "It puts nothing in doubt" : `It puts ${count(doubtful, "check")} in doubt`,
+    spared === 0 ? "." : `; ${count(spared, "check")} spared.`,
+  ],
+  "punch.taken": ({ code, letter, items }, { who, punchList }) => [
+    who,
+    ` took ${count(items, "item")} into the `,
+    punchList(code, letter),
+    ".",
+  ],
+  "punch.dealt": ({ code, letter, item, how }, { who, punchList }) => [
+    who,
+    ` ticked “${item}” off the `,
+    punchList(code, letter),
+    `: ${endSentence(how)}`,
+  ],
+  "punch.reopened": ({ code, letter, item }, { who, punchList }) => [
+    who,
+    ` put “${item}” back on the `,
+    punchList(code, letter),
+    ".",
+  ],
 };
 
 type Gone = { checks: number; attempts: number; files: number; waits: number };

@@ -6,7 +6,7 @@ export const searchInput = z.object({
 });
 export type SearchInput = z.output<typeof searchInput>;
 
-export const HIT_KINDS = ["board", "unit", "check", "signal", "log"] as const;
+export const HIT_KINDS = ["board", "unit", "check", "signal", "fault", "log"] as const;
 
 export const searchHit = z.object({
   kind: z.enum(HIT_KINDS),

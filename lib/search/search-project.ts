@@ -1,7 +1,8 @@
 import { database } from "@/db/client";
-import { searchBoards, searchChecks, searchCovered, searchLog, searchUnits } from "@/db/queries/search";
+import { searchBoards, searchChecks, searchCovered, searchFaults, searchLog, searchUnits } from "@/db/queries/search";
 import type { ProjectScope } from "@/lib/access/scope";
 import { ok, type Answer } from "@/lib/actions/answer";
+import { STATE_WORDS } from "@/lib/fault/fault-words";
 import { stageName } from "@/lib/procedure/stages";
 import { excerpt } from "./excerpt";
 import type { SearchAnswer, SearchHit, SearchInput } from "./schema";
@@ -64,6 +65,16 @@ export async function searchProject(
         detail: `${COVERED[row.what]}, ${row.count === 1 ? "1 check" : `${row.count} checks`} on ${row.serials.slice(0, 3).join(", ")}${row.serials.length > 3 ? " …" : ""}`,
         state: null,
         href: `${base}/units/${encodeURIComponent(row.serials[0] ?? "")}?check=${row.first}`,
+      })),
+    ),
+    searchFaults(db, scope, wanted).then((rows) =>
+      rows.map((row): SearchHit => ({
+        kind: "fault",
+        id: row.id,
+        title: `F${row.number} ${row.title}`,
+        detail: [`${row.serial}, ${STATE_WORDS[row.state]}`, excerpt(row.says, words)].filter(Boolean).join(" · "),
+        state: null,
+        href: `${base}/faults/${row.number}`,
       })),
     ),
     searchLog(db, scope, wanted).then((rows) =>

@@ -10,6 +10,7 @@ import { makeViewer } from "../support/people";
 import { accountRows } from "./action-rows/account";
 import { boardRows } from "./action-rows/boards";
 import { evidenceRows } from "./action-rows/evidence";
+import { faultRows } from "./action-rows/faults";
 import { partsRows } from "./action-rows/parts";
 import { peopleRows } from "./action-rows/people";
 import { pinMapRows } from "./action-rows/pin-maps";
@@ -29,6 +30,7 @@ const table: Record<string, Rows> = {
   ...accountRows,
   ...boardRows,
   ...evidenceRows,
+  ...faultRows,
   ...partsRows,
   ...peopleRows,
   ...pinMapRows,

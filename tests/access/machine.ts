@@ -2,6 +2,7 @@ import { randomUUID } from "node:crypto";
 import { database } from "@/db/client";
 import { slots, units } from "@/db/schema/boards";
 import { logEntries } from "@/db/schema/evidence";
+import { faults } from "@/db/schema/faults";
 import { memberships } from "@/db/schema/projects";
 import type { Role } from "@/db/schema/projects";
 import { checkOf, must, send } from "../support/bench";
@@ -60,6 +61,12 @@ export async function makeLogEntry({ id: projectId, viewers }: Machine): Promise
   };
   await database().insert(logEntries).values(entry);
   return entry.id;
+}
+
+export async function makeFault({ id: projectId, unit }: Machine): Promise<{ id: string; number: number }> {
+  const number = Math.floor(Math.random() * 1_000_000_000);
+  const row = { projectId, unitId: unit.id, number, title: "Clock does not run" };
+  return one(await database().insert(faults).values(row).returning({ id: faults.id, number: faults.number }));
 }
 
 /** A unit that nobody has given a traveler. */

@@ -90,6 +90,24 @@ export const pages: Record<string, PageRow> = {
   },
   "app/(workshop)/projects/[project]/parts/logic/page.tsx": { permission: "project.see", path: of("/parts/logic") },
   "app/(workshop)/projects/[project]/parts/delay/page.tsx": { permission: "project.see", path: of("/parts/delay") },
+  "app/(workshop)/projects/[project]/faults/page.tsx": { permission: "project.see", path: of("/faults") },
+  "app/(workshop)/projects/[project]/faults/new/page.tsx": { permission: "fault.write", path: of("/faults/new") },
+  "app/(workshop)/projects/[project]/faults/[number]/page.tsx": {
+    permission: "project.see",
+    path: (place) => of(`/faults/${place.fault}`)(place),
+  },
+  "app/(workshop)/projects/[project]/units/[unit]/reworks/page.tsx": {
+    permission: "project.see",
+    path: of("/units/TIM-01/reworks"),
+  },
+  "app/(workshop)/projects/[project]/units/[unit]/reworks/new/page.tsx": {
+    permission: "rework.record",
+    path: of("/units/TIM-01/reworks/new"),
+  },
+  "app/(workshop)/projects/[project]/units/[unit]/reworks/print/page.tsx": {
+    permission: "project.see",
+    path: of("/units/TIM-01/reworks/print"),
+  },
   "app/(workshop)/projects/[project]/log/page.tsx": { permission: "project.see", path: of("/log") },
   "app/(workshop)/projects/[project]/log/new/page.tsx": { permission: "log.write", path: of("/log/new") },
   "app/(workshop)/projects/[project]/log/[entry]/page.tsx": {

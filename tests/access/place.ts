@@ -7,7 +7,7 @@ import { must } from "../support/bench";
 import { FULL_ADDER, keepBlock } from "../support/parts";
 import { makeEvidence } from "../support/project";
 import { appUrl, sessionCookie } from "../support/session";
-import { makeLogEntry, makeMachine } from "./machine";
+import { makeFault, makeLogEntry, makeMachine } from "./machine";
 
 export type Asker = Role | "stranger" | "nobody";
 export const ASKERS: readonly Asker[] = ["maintainer", "builder", "collaborator", "stranger", "nobody"];
@@ -21,6 +21,7 @@ export async function makePlace() {
   return {
     ...machine,
     entry: await makeLogEntry(machine),
+    fault: (await makeFault(machine)).number,
     block: (await must(keepBlock(scopes.maintainer, FULL_ADDER))).id,
     file: await makeEvidence(machine),
     invitation: tokenFor("invitation", invited.id),

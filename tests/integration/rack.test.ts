@@ -87,7 +87,7 @@ describe("the rack", () => {
   test("counts what fails, in the sentence and beside the places", async () => {
     const { scope, record } = await machine(1);
     await record("C1-01", "Joints", false);
-    expect(await loadPlaceCounts(scope)).toEqual({ failing: 1, doubtful: 0, toMend: 0 });
+    expect(await loadPlaceCounts(scope)).toEqual({ failing: 1, doubtful: 0, toMend: 0, faults: 0 });
     expect(rackSentence(await loadRack(scope))).toBe("1 slot, 1 card, 3 checks. 0 hold, 1 fails.");
   });
 

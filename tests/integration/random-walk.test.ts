@@ -9,6 +9,7 @@ import { conforms, fails, send } from "../support/bench";
 import { useDatabase } from "../support/database";
 import { concede, lift, reopen, tie, untie, voiding, withdraw } from "../support/decisions";
 import { makeBoard, makeProject, makeUnit } from "../support/project";
+import { rework } from "../support/reworks";
 
 const db = useDatabase();
 
@@ -30,6 +31,7 @@ const version = (from: number) =>
   Array.from({ length: 6 }, (_, n) => ({
     title: title(n + from),
     holdPoint: n % 3 === 1,
+    covers: { signals: [`D${(n + from) % 4}`] },
     needs: n > 3 ? [title(n + from - 2)] : [],
   }));
 
@@ -100,6 +102,13 @@ describe("whatever people do, in whatever order", () => {
         const edge = pick(edges)?.edge;
         return edge && untie(maintainer, edge.checkId, edge.needsCheckId);
       },
+      rework: async () => {
+        const [one, line, check] = [pick(made), pick([0, 1, 2, 3]), pick(await live())];
+        if (!one || line === undefined || !check) return undefined;
+        const spared = next() < 0.3 ? [{ checkId: check.id, reason: "Measured just now." }] : [];
+        const added = next() < 0.2 ? [{ checkId: check.id, reason: "The iron was there." }] : [];
+        return rework(builder, one.unit, { signals: [`D${line}`], spared, added });
+      },
       move: async () => {
         const one = pick(made);
         if (!one || next() > 0.3) return undefined;
@@ -130,6 +139,7 @@ describe("whatever people do, in whatever order", () => {
       "lift",
       "tie",
       "untie",
+      "rework",
       "move",
     ];
 
@@ -140,6 +150,7 @@ describe("whatever people do, in whatever order", () => {
       expect(await recomputeAll(db, project.id), `after step ${step}, ${name}`).toEqual([]);
     }
     expect(done.get("record")).toBeGreaterThan(5);
+    expect(done.get("rework")).toBeGreaterThan(0);
     expect([...done.keys()].length).toBeGreaterThan(5);
   });
 });

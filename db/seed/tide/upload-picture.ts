@@ -1,11 +1,12 @@
 import type { AttachmentKind } from "@/db/schema/evidence";
 import type { ProjectScope } from "@/lib/access/scope";
+import type { EvidenceTarget } from "@/lib/attachment/schema";
 import { makeThumbnails } from "@/lib/attachment/make-thumbnails";
 import { receiveUpload } from "@/lib/attachment/receive-upload";
 import { putObject } from "@/lib/storage/object-store";
 import { drawPicture, rippleText } from "./pictures";
 
-export type Upload = (scope: ProjectScope, target: { checkId?: string }, name: string) => Promise<string>;
+export type Upload = (scope: ProjectScope, target: EvidenceTarget, name: string) => Promise<string>;
 
 const drawn = new Map<string, Promise<Buffer>>();
 
@@ -25,7 +26,7 @@ export const uploadRipple: Upload = (scope, target) =>
 
 async function receive(
   scope: ProjectScope,
-  target: { checkId?: string },
+  target: EvidenceTarget,
   bytes: Buffer,
   file: { fileName: string; type: string },
   kinds: AttachmentKind[],
@@ -40,6 +41,9 @@ async function receive(
       fileName: file.fileName,
       checkId: target.checkId ?? null,
       logEntryId: null,
+      faultId: target.faultId ?? null,
+      reworkId: target.reworkId ?? null,
+      reworkSide: target.reworkSide ?? null,
     },
     rawKey,
   );

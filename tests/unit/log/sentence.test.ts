@@ -141,6 +141,28 @@ const SAID: { [Kind in EventKind]: [EventPayload<Kind>, string] } = {
   "delay.edited": [{ name: "Ripple carry" }, "Mira changed the delay path Ripple carry."],
   "delay.archived": [{ name: "Ripple carry" }, "Mira archived the delay path Ripple carry."],
   "delay.restored": [{ name: "Ripple carry" }, "Mira restored the delay path Ripple carry."],
+  "fault.opened": [
+    { number: 3, title: "Bit 8 never comes on", serial: "CON-01" },
+    "Mira opened the fault F3 Bit 8 never comes on of CON-01.",
+  ],
+  "fault.edited": [
+    { number: 3, title: "Bit 8 never comes on", what: "cause, hours" },
+    "Mira wrote on the fault F3 Bit 8 never comes on: cause, hours.",
+  ],
+  "fault.stated": [
+    { number: 3, title: "Bit 8 never comes on", from: "open", to: "traced" },
+    "Mira called the fault F3 Bit 8 never comes on traced, before open.",
+  ],
+  "rework.recorded": [
+    { serial: "CON-01", number: 2, what: "Bodge wire W3, U6-12 to U9-3, white", fault: 3, doubtful: 5, spared: 1 },
+    "Mira recorded rework R2 of CON-01 for F3: Bodge wire W3, U6-12 to U9-3, white. It puts 5 checks in doubt; 1 check spared.",
+  ],
+  "punch.taken": [{ code: "CON", letter: "B", items: 4 }, "Mira took 4 items into the punch list of CON rev B."],
+  "punch.dealt": [
+    { code: "CON", letter: "B", item: "W3", how: "PH7 routed to U9-3" },
+    "Mira ticked “W3” off the punch list of CON rev B: PH7 routed to U9-3.",
+  ],
+  "punch.reopened": [{ code: "CON", letter: "B", item: "W3" }, "Mira put “W3” back on the punch list of CON rev B."],
 };
 const KINDS = Object.entries(SAID);
 

@@ -1,0 +1,67 @@
+import { and, asc, eq, isNull } from "drizzle-orm";
+import { database } from "@/db/client";
+import { boards, units } from "@/db/schema/boards";
+import { procedureChecks } from "@/db/schema/procedures";
+import { checks } from "@/db/schema/travelers";
+import type { ProjectScope } from "@/lib/access/scope";
+import { loadBoardNames, type BoardNames } from "@/lib/board/load-board-names";
+import { attemptsOf } from "./attempts-of";
+
+export type NewFaultView = {
+  units: { serial: string; board: string }[];
+  unit: string;
+  /** The check that it was seen at, when it is of the unit. */
+  check: { id: string; title: string } | null;
+  attemptId: string | null;
+  /** What can be written before anybody types. */
+  title: string;
+  symptom: string;
+  signals: string[];
+  pins: string[];
+  names: BoardNames;
+};
+
+const NO_NAMES: BoardNames = { signals: [], pins: [], parts: [], blocks: [], rails: [] };
+const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i;
+
+/** A fresh record, filled in from the unit and the failing check that it begins with. */
+export async function loadNewFault(
+  scope: ProjectScope,
+  wanted: { unit: string; check: string },
+): Promise<NewFaultView> {
+  const db = database();
+  const rows = await db
+    .select({ id: units.id, serial: units.serial, boardId: boards.id, code: boards.code, board: boards.name })
+    .from(units)
+    .innerJoin(boards, eq(boards.id, units.boardId))
+    .where(and(eq(units.projectId, scope.projectId), isNull(units.archivedAt)))
+    .orderBy(asc(units.serial));
+  const unit = rows.find(({ serial }) => serial === wanted.unit);
+  const [names, seen] = await Promise.all([
+    unit ? loadBoardNames(scope, { id: unit.boardId, code: unit.code }) : NO_NAMES,
+    unit && UUID.test(wanted.check) ? seenAt(scope, unit.id, wanted.check) : undefined,
+  ]);
+  return {
+    units: rows.map(({ serial, board }) => ({ serial, board })),
+    unit: unit?.serial ?? "",
+    check: seen ? { id: seen.check.id, title: seen.check.title } : null,
+    attemptId: seen?.attempt?.id ?? null,
+    title: seen ? `${seen.check.title}: does not conform` : "",
+    symptom: seen?.attempt ? [seen.attempt.summary, seen.attempt.note].filter(Boolean).join(". ") : "",
+    signals: seen?.check.covers.signals ?? [],
+    pins: seen?.check.covers.pins ?? [],
+    names,
+  };
+}
+
+async function seenAt(scope: ProjectScope, unitId: string, checkId: string) {
+  const db = database();
+  const [check] = await db
+    .select({ id: checks.id, title: procedureChecks.title, covers: procedureChecks.covers })
+    .from(checks)
+    .innerJoin(procedureChecks, eq(procedureChecks.id, checks.procedureCheckId))
+    .where(and(eq(checks.projectId, scope.projectId), eq(checks.unitId, unitId), eq(checks.id, checkId)));
+  if (!check) return undefined;
+  const attempts = await attemptsOf(db, scope, check.id, 20);
+  return { check, attempt: attempts.find(({ verdict }) => verdict === "does-not-conform") };
+}
