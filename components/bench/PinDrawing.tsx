@@ -1,12 +1,17 @@
 import { ConnectorFace } from "@/components/ui/glyphs/ConnectorFace";
-import { findConnector, findPin } from "@/lib/calc/connector";
+import { faceOf, findPin, type ConnectorGrid } from "@/lib/calc/connector";
 
-export type BoardFace = { connectorType: string | null; connectorReference: string };
+export type BoardFace = {
+  connectorType: string | null;
+  /** Of a face of one's own. */
+  connectorGrid?: ConnectorGrid | null;
+  connectorReference: string;
+};
 
 /** The connector with the pins lit that the check names. Pins of other connectors are named in words. */
 export function PinDrawing({ pins, board }: { pins: readonly string[]; board: BoardFace }) {
   if (pins.length === 0) return null;
-  const connector = findConnector(board.connectorType);
+  const connector = faceOf({ type: board.connectorType ?? "", grid: board.connectorGrid ?? null });
   const lit = connector ? pins.flatMap((pin) => findPin(connector, board.connectorReference, pin) ?? []) : [];
   const names = <p className="mono text-base">{pins.join("  ")}</p>;
   if (!connector || lit.length === 0)

@@ -12,6 +12,8 @@ import { createBoardInput } from "@/lib/board/schema";
 import { connectorChoices } from "@/lib/calc/connector";
 
 const NONE = "none";
+/** Kept as it is here; its rows are changed under Wiring. */
+const GRID = { id: "grid", label: "Face of one's own" };
 const fields = createBoardInput
   .omit({ project: true, writeId: true, connectorType: true })
   .extend({ connectorType: z.string() });
@@ -79,7 +81,12 @@ export function BoardForm<Value extends object>({ board, save, onDone, onCancel 
             <FormSelect
               name="connectorType"
               label="Edge connector"
-              options={[{ id: NONE, label: "None, or not in the list" }, ...connectorChoices]}
+              options={[
+                { id: NONE, label: "None yet" },
+                ...(board?.connectorType === GRID.id ? [GRID] : []),
+                ...connectorChoices,
+              ]}
+              description="More of them, and faces of one's own, under Wiring."
             />
             <FormTextField name="connectorReference" label="Its reference" mono maxLength={20} />
           </div>

@@ -9,7 +9,7 @@ import { ConfirmDialog } from "@/components/ui/ConfirmDialog";
 import { Dialog } from "@/components/ui/Dialog";
 import type { BoardSpares } from "@/lib/board-plan/load-board-spares";
 import type { BoardView } from "@/lib/board/load-board";
-import { findConnector } from "@/lib/calc/connector";
+import { faceOf } from "@/lib/calc/connector";
 import type { BoardActs, RevisionActs, UnitActs } from "./board-acts";
 import { ArchivedBoard } from "./ArchivedBoard";
 import { BoardForm } from "./BoardForm";
@@ -111,7 +111,7 @@ export function BoardPlace({
         <Badge>{board.kind}</Badge>
         <Badge>
           <span className="mono">{board.connectorReference}</span>{" "}
-          {findConnector(board.connectorType)?.label ?? "no connector drawn"}
+          {faceOf({ type: board.connectorType ?? "", grid: board.connectorGrid })?.label ?? "no connector drawn"}
         </Badge>
       </p>
       <UnitsPanel
@@ -121,7 +121,7 @@ export function BoardPlace({
         canPurge={can.purge}
         acts={unitActs}
       />
-      <ConnectorPanel board={board} />
+      <ConnectorPanel board={board} project={project} />
       {spares && <PackagesPanel project={project} zone={zone} code={board.code} spares={spares} />}
       {firstPower}
       <Dialog title="Change the board" isOpen={isEditing} onOpenChange={setEditing}>

@@ -1,20 +1,24 @@
 "use client";
 
+import Link from "next/link";
 import { useState, type KeyboardEvent } from "react";
 import { ConnectorFace } from "@/components/ui/glyphs/ConnectorFace";
 import { Panel } from "@/components/ui/Panel";
 import type { BoardView } from "@/lib/board/load-board";
-import { findConnector } from "@/lib/calc/connector";
+import { faceOf } from "@/lib/calc/connector";
 
-type Props = { board: Pick<BoardView, "connectorType" | "connectorReference" | "covered" | "issued"> };
+type Props = {
+  board: Pick<BoardView, "code" | "connectorType" | "connectorGrid" | "connectorReference" | "covered" | "issued">;
+  project: string;
+};
 
 const STEPS: Record<string, number> = { ArrowRight: 1, ArrowDown: 1, ArrowLeft: -1, ArrowUp: -1 };
 
 /** The connector as it is; lit are the pins that checks of the procedure cover, and each says by which. */
-export function ConnectorPanel({ board }: Props) {
+export function ConnectorPanel({ board, project }: Props) {
   const { covered, connectorReference: reference } = board;
   const [shown, setShown] = useState<string>();
-  const connector = findConnector(board.connectorType);
+  const connector = faceOf({ type: board.connectorType ?? "", grid: board.connectorGrid });
   if (!connector) return null;
   const at = covered.findIndex(({ pin }) => pin === shown);
   const one = covered[at];
@@ -28,7 +32,18 @@ export function ConnectorPanel({ board }: Props) {
   }
 
   return (
-    <Panel title={`Connector ${reference}`} note={`checks cover ${covered.length} of ${connector.pins.length} pins`}>
+    <Panel
+      title={`Connector ${reference}`}
+      note={`checks cover ${covered.length} of ${connector.pins.length} pins`}
+      actions={
+        <Link
+          href={`/projects/${project}/wiring?connector=${encodeURIComponent(`${board.code}.${reference}`)}`}
+          className="link text-sm font-semibold"
+        >
+          Its pin map
+        </Link>
+      }
+    >
       <div className="flex flex-wrap items-center gap-x-6 gap-y-2">
         <div
           role="group"

@@ -24,10 +24,10 @@ export function columnsFor(project: string): TableColumn<BoardLine>[] {
     {
       id: "connector",
       header: "Edge connector",
-      sortBy: (board) => findConnector(board.connectorType)?.label,
+      sortBy: (board) => edgeWords(board.connectorType),
       cell: (board) => (
         <span className="text-sm text-ink-soft">
-          {board.kind === "backplane" ? "backplane" : (findConnector(board.connectorType)?.label ?? "none")}
+          {board.kind === "backplane" ? "backplane" : edgeWords(board.connectorType)}
         </span>
       ),
     },
@@ -77,3 +77,6 @@ export function PhoneBoard({ board, project }: { board: BoardLine; project: stri
     </div>
   );
 }
+
+const edgeWords = (type: string | null): string =>
+  type === "grid" ? "face of one's own" : (findConnector(type)?.label ?? "none");

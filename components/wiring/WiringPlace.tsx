@@ -1,6 +1,6 @@
 "use client";
 
-import { useState } from "react";
+import { useCallback, useState } from "react";
 import type { z } from "zod";
 import { Page } from "@/components/shell/Page";
 import { Button } from "@/components/ui/Button";
@@ -49,9 +49,11 @@ export function WiringPlace(props: Props) {
   const nets = check?.nets.length;
   const file = `/api/projects/${project}/pin-map${table.chosen ? `?connector=${table.chosen.id}` : ""}`;
   const take = `/projects/${project}/wiring/take${table.chosen ? `?connector=${encodeURIComponent(addressOf(table.chosen))}` : ""}`;
-  const acceptOf = props.canAccept
-    ? (finding: FindingView) => <AcceptFinding {...{ project, finding }} accept={props.accept} />
-    : undefined;
+  const { accept, canAccept } = props;
+  const acceptOf = useCallback(
+    (finding: FindingView) => (canAccept ? <AcceptFinding {...{ project, finding, accept }} /> : null),
+    [canAccept, project, accept],
+  );
   const pinsOf = (id: string) => Object.keys(state.kept[id]?.rows ?? {}).length;
   const unsavedOf = (id: string) => Object.keys(state.drafts[id]?.pins ?? {}).length;
   const figures = `${table.rows.length} pins, ${slots.length} slots${nets === undefined ? "" : `, ${nets} nets`}.`;

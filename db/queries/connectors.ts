@@ -1,6 +1,6 @@
 import { and, asc, eq, sql } from "drizzle-orm";
 import type { Queryable } from "@/db/client";
-import { connectors } from "@/db/schema/wiring";
+import { connectors, type ConnectorGrid } from "@/db/schema/wiring";
 
 type InProject = { projectId: string };
 
@@ -10,6 +10,9 @@ type InProject = { projectId: string };
  */
 export const edgeColumns = {
   connectorType: sql<string | null>`(select edge.type from connectors edge
+    where edge.board_id = boards.id and edge.position = 1)`,
+  /** Rows and positions of a face of one's own; see ConnectorGrid. */
+  connectorGrid: sql<ConnectorGrid | null>`(select edge.grid from connectors edge
     where edge.board_id = boards.id and edge.position = 1)`,
   connectorReference: sql<string>`coalesce((select edge.reference from connectors edge
     where edge.board_id = boards.id and edge.position = 1), 'J1')`,

@@ -6,6 +6,7 @@ import { revisions, slotOccupancies, slots, units, type BoardKind } from "@/db/s
 import { procedures } from "@/db/schema/procedures";
 import { checks, travelers } from "@/db/schema/travelers";
 import type { ProjectScope } from "@/lib/access/scope";
+import type { ConnectorGrid } from "@/lib/calc/connector";
 import { STAGES } from "@/lib/procedure/stages";
 import type { RackUnit } from "@/lib/rack/rack-view";
 import type { Holdings } from "@/lib/unit/holdings";
@@ -41,6 +42,7 @@ export type BoardView = {
   summary: string;
   kind: BoardKind;
   connectorType: string | null;
+  connectorGrid: ConnectorGrid | null;
   connectorReference: string;
   version: number;
   archived: boolean;
@@ -84,7 +86,7 @@ export async function loadBoard(scope: ProjectScope, code: string): Promise<Boar
   const archived = unitRows.flatMap(({ unit }) => (unit.archivedAt ? [unit.id] : []));
   const holdings = await findHoldings(db, scope, archived);
   const issued = procedureRows.find((row) => row.state === "issued");
-  const { id, name, summary, kind, connectorType, connectorReference, version } = board;
+  const { id, name, summary, kind, connectorType, connectorGrid, connectorReference, version } = board;
   const rackBoard = {
     id,
     code: board.code,
@@ -97,7 +99,7 @@ export async function loadBoard(scope: ProjectScope, code: string): Promise<Boar
     toMend: 0,
   };
   return {
-    ...{ id, code: board.code, name, summary, kind, connectorType, connectorReference, version },
+    ...{ id, code: board.code, name, summary, kind, connectorType, connectorGrid, connectorReference, version },
     archived: board.archivedAt !== null,
     revisions: revisionRows.map((row) => ({
       id: row.id,

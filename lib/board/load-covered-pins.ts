@@ -1,14 +1,19 @@
 import { and, asc, eq, sql } from "drizzle-orm";
 import type { Queryable } from "@/db/client";
 import { procedureChecks, procedures } from "@/db/schema/procedures";
-import { findConnector } from "@/lib/calc/connector";
+import { faceOf, type ConnectorGrid } from "@/lib/calc/connector";
 import { coveredPins, type CoveredPin } from "./covered-pins";
 
-type Board = { id: string; connectorType: string | null; connectorReference: string };
+type Board = {
+  id: string;
+  connectorType: string | null;
+  connectorGrid: ConnectorGrid | null;
+  connectorReference: string;
+};
 
 /** What the newest issued procedure of a board of the granted project covers of its connector. */
 export async function loadCoveredPins(db: Queryable, board: Board): Promise<CoveredPin[]> {
-  const connector = findConnector(board.connectorType);
+  const connector = faceOf({ type: board.connectorType ?? "", grid: board.connectorGrid });
   if (!connector) return [];
   const rows = await db
     .select({ title: procedureChecks.title, covers: procedureChecks.covers })

@@ -1,3 +1,4 @@
+import type { ConnectorGrid } from "@/lib/calc/connector";
 import type { Coverage, Stage } from "@/db/schema/procedures";
 import type { CheckState, Verdict } from "@/db/schema/travelers";
 import type { AttachmentKind } from "@/db/schema/evidence";
@@ -94,7 +95,14 @@ export type CheckView = {
 
 export type TravelerView = {
   unit: { id: string; serial: string; note: string; archived: boolean; version: number };
-  board: { id: string; code: string; name: string; connectorType: string | null; connectorReference: string };
+  board: {
+    id: string;
+    code: string;
+    name: string;
+    connectorType: string | null;
+    connectorGrid: ConnectorGrid | null;
+    connectorReference: string;
+  };
   revision: { id: string; letter: string };
   slot: { position: number; label: string } | null;
   procedure: { id: string; number: number; newestNumber: number };

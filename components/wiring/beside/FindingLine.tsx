@@ -2,13 +2,16 @@
 
 import clsx from "clsx";
 import Link from "next/link";
-import type { ReactNode } from "react";
+import { memo, type ReactNode } from "react";
 import { Button } from "@/components/ui/Button";
 import type { Edit, PinAt } from "@/lib/calc/interconnect";
+import type { FindingView } from "@/lib/finding/load-findings";
 import { canBeDoneHere } from "../editor/edit-changes";
 import { WEIGHT_WORDS, WeightMark } from "../WeightMark";
 import { placeWords } from "./net-words";
 import type { ShownFinding } from "./shown-findings";
+
+export type AcceptOf = ((finding: FindingView) => ReactNode) | undefined;
 
 type Props = {
   project: string;
@@ -17,17 +20,28 @@ type Props = {
   isAtPin: boolean;
   canEdit: boolean;
   hasSeveral: (board: string) => boolean;
-  accept: ReactNode;
+  /** The button that accepts it, for those who may. */
+  acceptOf: AcceptOf;
   onJump: (pin: PinAt) => void;
   onDo: (finding: ShownFinding) => void;
 };
 
 const FEW = 4;
 
-/** One finding beside the table: what, why, what mends it, and the way to its pins. */
-export function FindingLine({ project, finding, isAtPin, canEdit, hasSeveral, accept, onJump, onDo }: Props) {
+/** One finding beside the table: what, why, what mends it, and the way to its pins. Not drawn anew while one moves. */
+export const FindingLine = memo(function FindingLine({
+  project,
+  finding,
+  isAtPin,
+  canEdit,
+  hasSeveral,
+  acceptOf,
+  onJump,
+  onDo,
+}: Props) {
   const { weight, title, why, mend, pins, edits, accepted } = finding;
   const [first] = pins;
+  const accept = accepted || !finding.stored ? null : acceptOf?.(finding.stored);
   const places = [...new Map(pins.map((pin) => [`${pin.connectorId} ${pin.pin}`, pin])).values()];
   return (
     <li className={clsx("flex gap-3 px-4 py-3 sm:px-5", isAtPin && "bg-copper-ground/60")}>
@@ -83,7 +97,7 @@ export function FindingLine({ project, finding, isAtPin, canEdit, hasSeveral, ac
       </div>
     </li>
   );
-}
+});
 
 /** What mends it stands in another place. */
 function Elsewhere({ project, edit }: { project: string; edit: Edit }) {

@@ -2,9 +2,8 @@
 
 import clsx from "clsx";
 import Link from "next/link";
-import type { ReactNode } from "react";
 import type { PinAt } from "@/lib/calc/interconnect";
-import { FindingLine } from "./FindingLine";
+import { FindingLine, type AcceptOf } from "./FindingLine";
 import { openOf, splitByConnector, type ShownFinding } from "./shown-findings";
 
 type Props = {
@@ -15,23 +14,27 @@ type Props = {
   at: { connectorId: string; pin: string } | undefined;
   canEdit: boolean;
   hasSeveral: (board: string) => boolean;
-  acceptOf: (finding: ShownFinding) => ReactNode;
+  acceptOf: AcceptOf;
   onJump: (pin: PinAt) => void;
   onDo: (finding: ShownFinding) => void;
   className?: string;
 };
 
+/** More than anybody reads beside a table. */
+const MOST = 40;
+
 /** What the check found, as one types; the shown connector's first. */
-export function FindingsBeside({ project, findings, connector, at, acceptOf, className, ...acts }: Props) {
+export function FindingsBeside({ project, findings, connector, at, className, ...acts }: Props) {
   const ordered = [...openOf(findings), ...findings.filter(({ accepted }) => accepted !== null)];
   const { here, elsewhere } = splitByConnector(ordered, connector?.id);
+  const others = elsewhere.slice(0, Math.max(0, MOST - here.length));
+  const left = ordered.length - Math.min(here.length, MOST) - others.length;
   const line = (finding: ShownFinding) => (
     <FindingLine
       key={finding.key}
       project={project}
       finding={finding}
       isAtPin={finding.pins.some((pin) => pin.connectorId === at?.connectorId && pin.pin === at.pin)}
-      accept={acceptOf(finding)}
       {...acts}
     />
   );
@@ -57,14 +60,19 @@ export function FindingsBeside({ project, findings, connector, at, acceptOf, cla
           </p>
         )}
         {connector && here.length > 0 && <p className={heading}>On {connector.name}</p>}
-        {here.length > 0 && <ul className="divide-y divide-rule">{here.map(line)}</ul>}
-        {elsewhere.length > 0 && (
+        {here.length > 0 && <ul className="divide-y divide-rule">{here.slice(0, MOST).map(line)}</ul>}
+        {others.length > 0 && (
           <>
             <p className={clsx(heading, here.length > 0 && "border-t border-rule")}>
               {here.length > 0 ? "Elsewhere in the machine" : "In the machine; nothing on this connector"}
             </p>
-            <ul className="divide-y divide-rule">{elsewhere.map(line)}</ul>
+            <ul className="divide-y divide-rule">{others.map(line)}</ul>
           </>
+        )}
+        {left > 0 && (
+          <p className="border-t border-rule px-4 py-3 text-sm text-ink-soft sm:px-5">
+            And {left} more. Mend these first; many of the others often go with them.
+          </p>
         )}
       </div>
     </section>

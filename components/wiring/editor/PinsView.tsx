@@ -1,22 +1,24 @@
 "use client";
 
-import { useMemo, type ReactNode } from "react";
+import { useCallback, useMemo } from "react";
+import { useMedia } from "@/components/ui/use-media";
 import type { Side } from "@/lib/calc/connector";
-import type { FindingView } from "@/lib/finding/load-findings";
 import type { WiringView } from "@/lib/pin-map/load-wiring";
 import { FacePanel } from "../beside/FacePanel";
+import type { AcceptOf } from "../beside/FindingLine";
 import { FindingsBeside } from "../beside/FindingsBeside";
 import { driversOf, labelsOf } from "../beside/net-words";
 import { NetFacts } from "../beside/NetFacts";
 import { NetPanel } from "../beside/NetPanel";
 import { stationsOf } from "../beside/stations";
 import type { OpenDialog } from "../connector/ConnectorDialogs";
-import { placeOf } from "../grid/table-text";
+import { placeOf, type PinKey } from "../grid/table-text";
 import { at } from "../grid/selection";
 import { GridFoot } from "./GridFoot";
 import { PinGrid } from "./PinGrid";
 import { PinList } from "./PinList";
 import type { RowView } from "./row-views";
+import { useSteady } from "./use-steady";
 import type { useWiring } from "./use-wiring";
 import { WiringToolbar } from "./WiringToolbar";
 
@@ -27,7 +29,7 @@ type Props = {
   side: Side;
   onSide: (side: Side) => void;
   onOpen: (open: OpenDialog) => void;
-  acceptOf: ((finding: FindingView) => ReactNode) | undefined;
+  acceptOf: AcceptOf;
 };
 
 /** Face, table and findings, and under them the net of the pin one is at. */
@@ -63,7 +65,12 @@ export function PinsView({ project, view, wiring, side, onSide, onOpen, acceptOf
     );
 
   const several = useMemo(() => boardsWithSeveral(connectors), [connectors]);
-  const facts = { net, stations, side, hasSeveral: (board: string) => several.has(board), onJump: goTo };
+  const hasSeveral = useCallback((board: string) => several.has(board), [several]);
+  const jump = useSteady((pin: PinKey) => goTo(pin));
+  const doIt = useSteady(wiring.doWhatItSays);
+  const facts = { net, stations, side, hasSeveral, onJump: jump };
+  // Drawn for a phone only: hundreds of rows that nobody sees would be drawn with every key.
+  const isNarrow = useMedia("(width < 40rem)");
 
   return (
     <>
@@ -91,18 +98,20 @@ export function PinsView({ project, view, wiring, side, onSide, onOpen, acceptOf
             driversOf={driversAt}
             className="max-h-[34rem] min-h-60 flex-1 border-t border-rule max-sm:hidden xl:max-h-none"
           />
-          <div className="px-4 py-3 sm:hidden">
-            <PinList
-              {...{ name, rows }}
-              at={grid.selection.focus.row}
-              labelAt={table.table.labelAt}
-              rails={known.rails}
-              weightOf={wiring.weightOf}
-              driversOf={driversAt}
-              onPick={(row) => grid.go(at(row, placeOf("signal")))}
-              detail={<NetFacts {...facts} />}
-            />
-          </div>
+          {isNarrow && (
+            <div className="px-4 py-3">
+              <PinList
+                {...{ name, rows }}
+                at={grid.selection.focus.row}
+                labelAt={table.table.labelAt}
+                rails={known.rails}
+                weightOf={wiring.weightOf}
+                driversOf={driversAt}
+                onPick={(row) => grid.go(at(row, placeOf("signal")))}
+                detail={<NetFacts {...facts} />}
+              />
+            </div>
+          )}
           <div className="max-sm:hidden">
             <GridFoot said={grid.said} isReadOnly={isReadOnly} unsaved={Object.keys(state.drafts).length} />
           </div>
@@ -112,10 +121,10 @@ export function PinsView({ project, view, wiring, side, onSide, onOpen, acceptOf
           connector={chosen && { id: chosen.id, name }}
           at={focused}
           canEdit={!isReadOnly}
-          hasSeveral={facts.hasSeveral}
-          acceptOf={(finding) => (acceptOf && finding.stored && !finding.accepted ? acceptOf(finding.stored) : null)}
-          onJump={goTo}
-          onDo={wiring.doWhatItSays}
+          hasSeveral={hasSeveral}
+          acceptOf={acceptOf}
+          onJump={jump}
+          onDo={doIt}
         />
       </div>
       {litName !== undefined && <NetPanel {...facts} project={project} pin={litName} />}

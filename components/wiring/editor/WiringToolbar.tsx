@@ -3,12 +3,15 @@
 import { Button as AriaButton } from "react-aria-components";
 import { Button } from "@/components/ui/Button";
 import { buttonStyle } from "@/components/ui/button-style";
-import { ComboBox } from "@/components/ui/ComboBox";
 import { Icon } from "@/components/ui/Icon";
 import { IconButton } from "@/components/ui/IconButton";
 import { Menu, type MenuEntry } from "@/components/ui/Menu";
 import type { WiringView } from "@/lib/pin-map/load-wiring";
 import type { OpenDialog } from "../connector/ConnectorDialogs";
+import { at } from "../grid/selection";
+import { placeOf } from "../grid/table-text";
+import { ConnectorChooser } from "./ConnectorChooser";
+import { useSteady } from "./use-steady";
 import { addressOf, ALL } from "./use-chosen";
 import type { useWiring } from "./use-wiring";
 
@@ -22,18 +25,10 @@ type Props = {
 export function WiringToolbar({ view, wiring, onOpen }: Props) {
   const { table, state, grid, unsaved, saving, isReadOnly, saveAll } = wiring;
   const { connectors, machine, slots } = view;
-  const whereOf = (code: string) => machine.placements.filter(({ board }) => board === code).map(({ label }) => label);
-  const draftOf = (id: string) => Object.keys(state.drafts[id]?.pins ?? {}).length;
-  const options = [
-    ...connectors.map((one) => {
-      const slot = slots.find(({ id }) => id === one.slotId);
-      const changed = draftOf(one.id);
-      const where = slot ? `slot ${slot.position}` : whereOf(one.code).join(", ");
-      const parts = [one.boardName, where, changed > 0 ? `${changed} not saved` : ""].filter((part) => part !== "");
-      return { id: addressOf(one), label: `${one.code} ${one.reference}`, description: parts.join(" · ") };
-    }),
-    { id: ALL, label: "All connectors", description: "The whole machine in one table" },
-  ];
+  const show = useSteady((address: string) => {
+    void table.setAddress(address);
+    grid.go(at(0, placeOf("signal")));
+  });
   const entries: MenuEntry[] = [
     { id: "edit", label: "Change the connector", onAction: () => onOpen("edit") },
     ...(table.chosen?.slotId
@@ -44,18 +39,11 @@ export function WiringToolbar({ view, wiring, onOpen }: Props) {
   ];
   return (
     <div className="flex flex-wrap items-end gap-x-3 gap-y-2.5">
-      <ComboBox
-        label="Connector"
-        isLabelHidden
-        mono
-        options={options}
+      <ConnectorChooser
+        {...{ connectors, machine, slots }}
+        drafts={state.drafts}
         value={table.isAll ? ALL : table.chosen ? addressOf(table.chosen) : null}
-        onChange={(id) => {
-          if (id === null) return;
-          void table.setAddress(id);
-          grid.go({ anchor: { row: 0, column: 1 }, focus: { row: 0, column: 1 } });
-        }}
-        className="w-full sm:w-52"
+        onChange={show}
       />
       {!isReadOnly && (
         <div className="flex flex-1 flex-wrap items-center gap-1.5 max-sm:hidden">
