@@ -20,6 +20,7 @@ import { PackageRack } from "./PackageRack";
 import { PackageTable } from "./PackageTable";
 import type { BoardPlanActs } from "./parts-acts";
 import { SparesPanel } from "./SparesPanel";
+import { usePlanActs } from "./use-plan-acts";
 
 type Props = {
   project: string;
@@ -31,6 +32,7 @@ type Props = {
 
 export function BoardPlanPlace({ project, zone, view, can, acts }: Props) {
   const { act } = useAct();
+  const planActs = usePlanActs(acts);
   const [draft, setDraft] = useState<Pick<BoardPlanView["plan"], "packing" | "family" | "blocks">>(view.plan);
   const { board } = view;
   const packed = packDraft(view, draft);
@@ -56,7 +58,7 @@ export function BoardPlanPlace({ project, zone, view, can, acts }: Props) {
               <BoardPlanForm
                 project={project}
                 view={view}
-                save={acts.save}
+                save={planActs.save}
                 onDraft={setDraft}
                 onSaved={({ tiesReopened }) =>
                   void act(
@@ -106,17 +108,16 @@ export function BoardPlanPlace({ project, zone, view, can, acts }: Props) {
             packing={packing}
             isDraft={isDraft}
             can={can}
-            tie={acts.tie}
+            tie={planActs.tie}
             offer={acts.offer}
           />
         )}
         <BomPanel
-          key={`bom ${view.version}`}
           project={project}
           view={view}
           packages={packing?.packages ?? []}
           canEdit={can.edit}
-          save={acts.saveBom}
+          save={planActs.saveBom}
         />
       </div>
     </Page>

@@ -8,6 +8,7 @@ import { Notice } from "@/components/ui/Notice";
 import { Panel } from "@/components/ui/Panel";
 import type { DelayPathLine, DelayView } from "@/lib/delay-path/load-delay-paths";
 import { windowLimits } from "@/lib/delay-path/window-limits";
+import type { OfferPlace } from "@/lib/offer/schema";
 import { workOut } from "@/lib/delay-path/work-out";
 import { DelayResult } from "./DelayResult";
 
@@ -66,9 +67,9 @@ export function DelaySheet({ project, view, line, can, offer, onEdit, onArchive 
             <h3 className="mb-2 text-base">Hand the window to a capture check</h3>
             {place ? (
               <OfferToCheck
-                key={`${place.board} ${place.draftVersion} ${limits}`}
+                key={`${place.board} ${limits}`}
                 project={project}
-                place={place}
+                place={likelyFirst(place, measure)}
                 fields={[
                   { field: "windowOf", name: "Measured", text: measure },
                   { field: "window", name: "Within", text: limits },
@@ -89,6 +90,14 @@ export function DelaySheet({ project, view, line, can, offer, onEdit, onArchive 
     </Panel>
   );
 }
+
+/** A check that measures the same stands first, so that it is the one that is offered. */
+const likelyFirst = (place: OfferPlace, measure: string): OfferPlace => ({
+  ...place,
+  checks: [...place.checks].sort(
+    (one, other) => Number(other.typed.windowOf === measure) - Number(one.typed.windowOf === measure),
+  ),
+});
 
 const freshCheck = (name: string, windowOf: string, window: string) => ({
   stage: "function" as const,

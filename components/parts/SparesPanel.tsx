@@ -61,11 +61,7 @@ export function SparesPanel({ project, view, packing, isDraft, can, tie, offer }
             isDisabled={!can.edit || isDraft || isPending}
             onChange={(tied) => void say(tied)}
             description={
-              isDraft
-                ? "Save the plan first: other gates may be spare."
-                : technology === "CMOS"
-                  ? "Until then the rule check asks for them: an open CMOS input drifts, takes current and may oscillate."
-                  : "An open bipolar input reads high but catches noise."
+              isDraft ? "Save the plan first: other gates may be spare." : tieText(view.sparesTied, technology)
             }
           />
           {!isDraft && (
@@ -75,4 +71,11 @@ export function SparesPanel({ project, view, packing, isDraft, can, tie, offer }
       </div>
     </Panel>
   );
+}
+
+function tieText(isTied: boolean, technology: "CMOS" | "bipolar"): string {
+  if (isTied) return "Said of these gates. When a change leaves others over, the question is open again.";
+  return technology === "CMOS"
+    ? "Until then the rule check asks for them: an open CMOS input drifts, takes current and may oscillate."
+    : "An open bipolar input reads high but catches noise.";
 }

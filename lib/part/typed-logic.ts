@@ -4,6 +4,7 @@ import { readFigure } from "@/lib/form/figure";
 import { line, optionalLine, optionalLines } from "@/lib/form/text";
 import { readCount } from "@/lib/form/whole-count";
 import { readGateLines, readPins } from "./pin-lines";
+import { sayTwice } from "./pins-twice";
 
 const MOST_FAMILIES = 20;
 const text = z.string().max(400, "This is too long.");
@@ -68,7 +69,7 @@ export const typedLogic = typedFields.transform((typed, context): Omit<LogicPart
     powerPins: list("powerPins"),
     groundPins: list("groundPins"),
   };
-  sayTwice(pinout, lists, say);
+  sayTwice(pinout, lists, (field, message) => say([field], message));
   return {
     name: typed.name,
     gateFunction: typed.gateFunction,
@@ -98,27 +99,6 @@ function gatePins(typed: Fields, pins: number, gates: number, say: Say): GatePin
     say(["gates"], `There are ${read.value.length} lines for ${gates} gates. Write one line a gate, or none.`);
   }
   return read.value;
-}
-
-/** A pin does one thing. */
-function sayTwice(pinout: GatePins[] | null, lists: Record<string, number[]>, say: Say): void {
-  const taken = new Map<number, string>();
-  const take = (pin: number, what: string, field: string) => {
-    const before = taken.get(pin);
-    if (before !== undefined) say([field], `Pin ${pin} belongs to ${before} already.`);
-    else taken.set(pin, what);
-  };
-  pinout?.forEach(({ inputs, outputs }, index) =>
-    [...inputs, ...outputs].forEach((pin) => take(pin, `gate ${index + 1}`, "gates")),
-  );
-  const words: Record<string, string> = {
-    sharedInputs: "the shared inputs",
-    sharedOutputs: "the shared outputs",
-    unconnectedPins: "the unconnected pins",
-    powerPins: "the supply pins",
-    groundPins: "the ground pins",
-  };
-  for (const [field, pins] of Object.entries(lists)) pins.forEach((pin) => take(pin, words[field] ?? field, field));
 }
 
 function figuresOf(rows: Fields["figures"], say: Say): Record<string, FamilyFigures> {
