@@ -6,6 +6,7 @@ import { Button } from "@/components/ui/Button";
 import { FormQuantityField, FormTextField } from "@/components/ui/form/bound-fields";
 import { IconButton } from "@/components/ui/IconButton";
 import { Kbd } from "@/components/ui/Kbd";
+import { quietError, RowError } from "./RowError";
 import { pastedLines } from "./pasted-lines";
 
 type Line = { partNumber: string; description: string; count: string; designators: string };
@@ -52,7 +53,7 @@ export function BomRows() {
             onPaste={(event) => paste(event, index)}
             className="grid grid-cols-[4.75rem_minmax(0,1fr)_2rem] items-start gap-2 border-b border-rule pb-3 md:grid-cols-[4.75rem_minmax(0,1.1fr)_minmax(0,1.4fr)_minmax(0,1fr)_2rem] md:border-0 md:pb-0"
           >
-            <div onKeyDown={(event) => goDown(event, index, "count")}>
+            <div className={quietError} onKeyDown={(event) => goDown(event, index, "count")}>
               <FormQuantityField
                 name={`lines.${index}.count`}
                 label={`Count, row ${index + 1}`}
@@ -104,6 +105,7 @@ export function BomRows() {
               className="mt-1"
               onPress={() => remove(index)}
             />
+            <RowError name={`lines.${index}.count`} />
           </li>
         ))}
       </ol>

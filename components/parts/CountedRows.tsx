@@ -6,6 +6,7 @@ import { Button } from "@/components/ui/Button";
 import { FormComboBox, FormQuantityField } from "@/components/ui/form/bound-fields";
 import { IconButton } from "@/components/ui/IconButton";
 import type { Option } from "@/components/ui/option";
+import { quietError, RowError } from "./RowError";
 
 type Props = {
   /** Field of the form that holds the rows, and the field of a row that names what is counted. */
@@ -42,7 +43,7 @@ export function CountedRows({ name, of, legend, what, options, addLabel, whenEmp
         <ol className="mt-1.5 flex flex-col gap-2">
           {fields.map((field, index) => (
             <li key={field.id} className="grid grid-cols-[4.75rem_minmax(0,1fr)_2rem] items-start gap-2">
-              <div onKeyDown={(event) => goOn(event, index)}>
+              <div className={quietError} onKeyDown={(event) => goOn(event, index)}>
                 <FormQuantityField
                   name={`${name}.${index}.count`}
                   label={`Count, row ${index + 1}`}
@@ -66,6 +67,7 @@ export function CountedRows({ name, of, legend, what, options, addLabel, whenEmp
                 className="mt-1"
                 onPress={() => remove(index)}
               />
+              <RowError name={`${name}.${index}.count`} />
             </li>
           ))}
         </ol>

@@ -8,6 +8,7 @@ import { stepOfPart } from "@/lib/calc/delay";
 import { formatQuantity } from "@/lib/calc/units";
 import type { DelayView } from "@/lib/delay-path/load-delay-paths";
 import type { DelayFields } from "./DelayEditor";
+import { quietError, RowError } from "./RowError";
 import { EMPTY_STEP, partChoices, partOf } from "./delay-draft";
 
 const FIGURES = [
@@ -36,7 +37,13 @@ export function StepRows({ view }: { view: DelayView }) {
               key={row.id}
               className="grid grid-cols-3 items-start gap-2 border-b border-rule py-2.5 lg:grid-cols-[4.5rem_minmax(0,1.5fr)_5.5rem_repeat(3,minmax(0,1fr))_2rem]"
             >
-              <FormQuantityField name={`path.steps.${index}.count`} label="Count" inputMode="numeric" maxLength={8} />
+              <FormQuantityField
+                name={`path.steps.${index}.count`}
+                label="Count"
+                inputMode="numeric"
+                maxLength={8}
+                className={quietError}
+              />
               <div className="col-span-2 flex flex-col gap-2 lg:col-span-1">
                 <FormComboBox
                   name={`path.steps.${index}.part`}
@@ -77,6 +84,7 @@ export function StepRows({ view }: { view: DelayView }) {
                 className="justify-self-end lg:mt-8"
                 onPress={() => remove(index)}
               />
+              <RowError name={`path.steps.${index}.count`} />
             </li>
           );
         })}
