@@ -75,7 +75,7 @@ function Cell(props: CellProps) {
       data-row={place === undefined ? undefined : index}
       data-place={place}
       className={clsx(
-        "relative flex min-w-0 scroll-mx-4 scroll-mt-10 items-center border-r border-rule/50 px-2 text-sm last:border-r-0 focus-visible:outline-none",
+        "relative flex min-w-0 scroll-mx-4 scroll-mt-10 items-center border-r border-rule/50 px-2 text-sm last:border-r-0",
         MONO.includes(id) && "mono",
         id === "pin" && "sticky left-0 z-[1] gap-1.5 font-semibold",
         id === "pin" && (active !== undefined ? "bg-copper-ground" : "bg-sheet"),
@@ -83,7 +83,7 @@ function Cell(props: CellProps) {
         (id === "loads" || id === "pullUpOhm") && "justify-end",
         isChosen && !isActive && "bg-copper-ground!",
         problem && "bg-failed-ground! text-failed",
-        isActive && "outline-2! -outline-offset-2 outline-copper!",
+        isActive && "outline-2! outline-solid! -outline-offset-2! outline-copper! focus:outline-[3px]!",
       )}
     >
       {id === "pin" && props.isChanged && (

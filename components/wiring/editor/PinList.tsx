@@ -41,6 +41,7 @@ export function PinList({ name, rows, labelAt, at, rails, weightOf, driversOf, o
               <button
                 type="button"
                 onClick={() => onPick(index)}
+                data-list-row={index}
                 aria-expanded={index === at}
                 className={clsx(
                   "grid min-h-12 w-full grid-cols-[3.25rem_minmax(0,1fr)_auto] items-center gap-x-2 px-1 py-2 text-left",
