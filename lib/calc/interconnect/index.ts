@@ -22,3 +22,4 @@ export {
 } from "./machine";
 export { type Net, type NetPin } from "./net";
 export { netFacts, netFactsOf, type NetFacts, type NetParty, type WorstMargin } from "./net-facts";
+export { studyNet } from "./study-net";

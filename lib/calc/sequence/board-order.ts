@@ -9,27 +9,32 @@ export type BoardOrderInput = {
   overrides: readonly BoardOverride[];
 };
 
-/** By codes; stronger than what the machine says. */
+/** By codes: `board` comes before `before`, whatever the machine says. */
 export type BoardOverride = { board: string; before: string; reason: string };
 
 export type BoardLink = {
   from: string;
   to: string;
-  /** carries: a backplane, through which all boards meet; said: an override. */
+  /** carries: a backplane, through which the boards meet; said: an override. */
   kind: "supplies" | "drives" | "carries" | "said";
-  /** Names of the nets that say so, in natural order. */
+  /** Names of the nets that say so, in natural order; empty for carries and said. */
   nets: string[];
   sentence: string;
 };
 
+/** Lines between a board on the extender and other boards. */
+export type Apart = { boards: string[]; nets: string[]; sentence: string };
+
 export type BoardStep = {
   board: string;
-  /** Where it stands: labels of its placements. */
+  /** Where it stands; empty: nowhere in the machine yet. */
   units: { label: string; proven: boolean }[];
-  /** Boards that supply or drive it and come before it. */
+  /** Boards that carry, supply or drive it and are proven by then, or said to come before it. */
   after: string[];
-  /** Prove it on the extender, with what the named boards would drive held by the bench; null: not needed. */
-  apart: { from: string[]; nets: string[]; sentence: string } | null;
+  /** What boards that are not proven by then would give it: the bench holds these lines instead. Null: nothing. */
+  held: Apart | null;
+  /** What it would give to boards that are proven by then: the extender leaves these lines open. Null: nothing. */
+  open: Apart | null;
   reason: string;
 };
 
@@ -39,10 +44,12 @@ export type BoardRisk = { unproven: string; proven: string; nets: string[]; sent
 export type BoardOrder = {
   /** Unproven boards in the order of proving them. */
   steps: BoardStep[];
+  /** In natural order. */
   proven: string[];
+  /** All that the machine and the overrides say, by names of the boards. */
   links: BoardLink[];
   risks: BoardRisk[];
-  /** Overrides that go against what the machine says, and what to mind. */
+  /** Overrides that go against the machine, and what cannot be used. */
   remarks: string[];
 };
 

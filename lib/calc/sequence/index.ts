@@ -1,4 +1,5 @@
 export {
+  type Apart,
   type BoardLink,
   type BoardOrder,
   type BoardOrderInput,
@@ -19,3 +20,4 @@ export {
 } from "./check-order";
 export { orderChecks } from "./order-checks";
 export { scheduleChecks } from "./schedule-checks";
+export { orderBoards } from "./order-boards";
