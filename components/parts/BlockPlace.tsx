@@ -8,9 +8,9 @@ import { ButtonLink } from "@/components/ui/ButtonLink";
 import { ConfirmDialog } from "@/components/ui/ConfirmDialog";
 import { Notice } from "@/components/ui/Notice";
 import { Panel } from "@/components/ui/Panel";
-import { counted } from "@/components/workshop/counted";
 import type { BlockLine } from "@/lib/block/load-blocks";
 import type { BlockView } from "@/lib/block/load-block";
+import { BlockContents } from "./BlockContents";
 import { BlockEditor } from "./BlockEditor";
 import { BlockUses } from "./BlockUses";
 import { GateTotals } from "./GateTotals";
@@ -104,7 +104,7 @@ export function BlockPlace({ project, zone, view, canEdit, acts }: Props) {
           />
         </Panel>
       ) : (
-        block && <Contents block={block} />
+        block && <BlockContents home={home} block={block} />
       )}
     </Page>
   );
@@ -118,31 +118,3 @@ function savedText(block: BlockLine | undefined, outdated: string[], tiesReopene
   ];
   return parts.filter(Boolean).join(" ");
 }
-
-function Contents({ block }: { block: BlockLine }) {
-  const rows = [...block.gates, ...block.children];
-  return (
-    <Panel title="Holds">
-      {rows.length === 0 ? (
-        <p className="text-[0.9375rem] text-ink-soft">Nothing is counted in it yet.</p>
-      ) : (
-        <ul className="flex flex-col">
-          {block.gates.map(({ gateFunction, name, count }) => (
-            <Row key={gateFunction} count={count} name={name} note={counted(count, "gate")} />
-          ))}
-          {block.children.map(({ block: id, name, count }) => (
-            <Row key={id} count={count} name={name} note="block" />
-          ))}
-        </ul>
-      )}
-    </Panel>
-  );
-}
-
-const Row = ({ count, name, note }: { count: number; name: string; note: string }) => (
-  <li className="grid grid-cols-[3rem_minmax(0,1fr)_auto] gap-3 border-b border-rule py-1.5 last:border-b-0">
-    <span className="mono text-right text-sm">{count} ×</span>
-    <span>{name}</span>
-    <span className="text-sm text-ink-soft">{note}</span>
-  </li>
-);

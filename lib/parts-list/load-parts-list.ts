@@ -53,7 +53,8 @@ export async function loadPartsList(scope: ProjectScope, board: string | null): 
   });
   const wanted = boards.find(({ code }) => code === board?.toUpperCase())?.code ?? null;
   const rows = new Map(designs.parts.map((part) => [part.number, part]));
-  const spares = { percent: conditions.sparesPercent, minimum: LEAST_SPARES };
+  // The column keeps about seven digits: 12.3 comes back as 12.300000190734863.
+  const spares = { percent: Number(conditions.sparesPercent.toPrecision(6)), minimum: LEAST_SPARES };
   const result = listParts({
     boards: boards.filter(({ code }) => wanted === null || code === wanted),
     spares,
