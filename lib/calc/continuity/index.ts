@@ -1,4 +1,6 @@
+export { estimateTime } from "./estimate-time";
 export { type ContinuityFinding, type ContinuityReport, type FindingKind } from "./finding";
+export { isolationWays } from "./isolation-ways";
 export { PROBE_LIMIT_CLASSES, type LimitClass, type ProbeLimits } from "./limits";
 export {
   type PlanOptions,
@@ -8,3 +10,7 @@ export {
   type ProbePlan,
   type ProbeResult,
 } from "./plan";
+export { planProbes } from "./plan-probes";
+export { pointBook, type PointBook } from "./point-book";
+export { effectiveLimits } from "./populated";
+export { isRailName } from "./rail-name";
