@@ -14,7 +14,7 @@ export const digestSubject = ({ projectName, headline }: DigestMailProps): strin
 
 /** The week of one project: how the boards stand, what happened, what is open and what comes next. */
 export function DigestMail(props: DigestMailProps) {
-  const { projectName, projectLink, logLink, period, summary, standing, isQuiet } = props;
+  const { projectName, projectLink, logLink, period, summary, standing, outlook, isQuiet } = props;
   const { boards, passed, failed, decided, entries, also, open, next, wiring } = props;
   return (
     <Sheet preheader={`${summary} ${standing}`} footer={<Footer {...props} />}>
@@ -23,6 +23,7 @@ export function DigestMail(props: DigestMailProps) {
       <Line>
         <b>{summary}</b> {standing}
       </Line>
+      {outlook !== "" && <Line soft>{outlook}</Line>}
       {isQuiet ? null : (
         <>
           <Act href={projectLink}>Open the rack</Act>

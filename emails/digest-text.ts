@@ -11,9 +11,9 @@ const WORDS: Record<Mark, string> = {
 
 /** The digest as plain text: written for reading, not what is left of a page when its markup is taken away. */
 export function digestText(props: DigestMailProps): string {
-  const { projectName, period, summary, standing, projectLink, logLink, isQuiet } = props;
+  const { projectName, period, summary, standing, outlook, projectLink, logLink, isQuiet } = props;
   const { boards, failed, decided, passed, entries, also, open, next, wiring } = props;
-  const head = [projectName, period, "", summary, standing];
+  const head = [projectName, period, "", summary, standing, ...(outlook === "" ? [] : [outlook])];
   const first = { items: next.items.slice(0, 1), more: 0 };
   const body = isQuiet
     ? section("Next on the bench", items(first, projectLink))

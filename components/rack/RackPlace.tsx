@@ -16,6 +16,7 @@ import { RackTable } from "./RackTable";
 import { SinceThen } from "./SinceThen";
 import { StandingDrawing } from "./StandingDrawing";
 import { StateLegend } from "./StateLegend";
+import { WhenItRuns } from "./WhenItRuns";
 import { TowerDrawing } from "./TowerDrawing";
 
 type Props = {
@@ -45,6 +46,7 @@ export function RackPlace({ rack, project, zone, canEditBoards, canPlace, canRec
   const drawing = { rack, project, nextSerial };
   const beside = [
     <NextOnTheBench key="next" steps={rack.next} total={rack.total} project={project} />,
+    <WhenItRuns key="outlook" outlook={rack.outlook} />,
     <SinceThen key="since" since={rack.since} zone={zone} />,
   ];
   // A standing rack and the table want the whole width.

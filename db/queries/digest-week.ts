@@ -106,7 +106,7 @@ export async function findOpenFailures(db: Queryable, { projectId }: InProject) 
 
 export async function findProjectToMail(db: Queryable, { projectId }: InProject) {
   const [row] = await db
-    .select({ slug: projects.slug, name: projects.name })
+    .select({ id: projects.id, slug: projects.slug, name: projects.name })
     .from(projects)
     .where(eq(projects.id, projectId));
   return row;

@@ -7,6 +7,7 @@ import { digestDeliveries, digestSubscriptions, projects } from "@/db/schema/pro
 import { checkPrerequisites, checks, holdLifts } from "@/db/schema/travelers";
 import { ruleFindings } from "@/db/schema/wiring";
 import { edgeColumns } from "./connectors";
+import { workHistory, type WorkHistory } from "./work-history";
 
 type InProject = { projectId: string };
 
@@ -117,7 +118,7 @@ export async function countOpenChecks(db: Queryable, scope: InProject) {
   return row ?? { failing: 0, doubtful: 0, toMend: 0, faults: 0 };
 }
 
-/** What happened since the viewer's last digest, or since Sunday 00:00 in the project's zone. */
+/** What happened since the viewer's last digest, or since Sunday 00:00 in the project's zone; and the history of the work. */
 export async function findHappenedSince(
   db: Queryable,
   scope: InProject & { timeZone: string; viewer: { userId: string } },
@@ -134,6 +135,7 @@ export async function findHappenedSince(
     failures: number;
     photos: number;
     captures: number;
+    history: WorkHistory;
   }>(sql`
     with digest as (
       select max(${digestDeliveries.dueAt}) as at from ${digestDeliveries}
@@ -153,7 +155,8 @@ export async function findHappenedSince(
       (count(*) filter (where ${kind("attempt.recorded")} and ${payload("firstPass")} = 'true'))::int as first_passes,
       (count(*) filter (where ${kind("attempt.recorded")} and ${payload("verdict")} = 'does-not-conform'))::int as failures,
       (count(*) filter (where ${kind("evidence.attached")} and ${payload("kind")} = 'photo'))::int as photos,
-      (count(*) filter (where ${kind("evidence.attached")} and ${payload("kind")} <> 'photo'))::int as captures
+      (count(*) filter (where ${kind("evidence.attached")} and ${payload("kind")} <> 'photo'))::int as captures,
+      ${workHistory(scope.projectId)} as history
     from start left join ${events} on ${events.projectId} = ${scope.projectId} and ${events.at} >= start.at
     group by start.at, start.from_digest`);
   if (!row) throw new Error("an aggregate without grouping keys gave no row");

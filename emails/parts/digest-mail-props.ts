@@ -66,6 +66,8 @@ export type DigestMailProps = {
   summary: string;
   /** How the machine stands, in a sentence. */
   standing: string;
+  /** When the rest will hold, in a sentence; empty while there is nothing to say. */
+  outlook: string;
   /** Nothing happened: only the summary and what is next are said. */
   isQuiet: boolean;
   boards: BoardLine[];

@@ -8,6 +8,7 @@ import {
 } from "@/db/queries/digest-week";
 import { findOpenFindings } from "@/db/queries/findings";
 import { findBoardsWithUnits, findRackChecks, findSlotsOfProject } from "@/db/queries/rack";
+import { findWorkHistory } from "@/db/queries/work-history";
 
 /** More than any week has; a script that records without end does not fill the worker's memory. */
 const MOST_EVENTS = 5_000;
@@ -22,7 +23,7 @@ export type EntryRow = Awaited<ReturnType<typeof findEntriesBetween>>[number];
 export async function loadProjectWeek(projectId: string, span: Span) {
   const db = database();
   const scope = { projectId };
-  const [project, slots, boards, checks, events, entries, failures, findings] = await Promise.all([
+  const [project, slots, boards, checks, events, entries, failures, findings, history] = await Promise.all([
     findProjectToMail(db, scope),
     findSlotsOfProject(db, scope),
     findBoardsWithUnits(db, scope),
@@ -31,9 +32,10 @@ export async function loadProjectWeek(projectId: string, span: Span) {
     findEntriesBetween(db, scope, span),
     findOpenFailures(db, scope),
     findOpenFindings(db, scope),
+    findWorkHistory(db, scope),
   ]);
   if (!project) return undefined;
-  return { project, slots, boards, checks, events, entries, failures, findings };
+  return { project, slots, boards, checks, events, entries, failures, findings, history };
 }
 
 export type ProjectWeek = NonNullable<Awaited<ReturnType<typeof loadProjectWeek>>>;

@@ -2,6 +2,7 @@ import type { DigestMailProps, EntryLine } from "@/emails/parts/digest-mail-prop
 import { appLink } from "@/lib/mail/app-link";
 import type { Message } from "@/lib/mail/message";
 import { writeDay } from "@/lib/mail/write-day";
+import { outlookSentence } from "./outlook-sentence";
 import { boardLines } from "./board-lines";
 import type { createPictures, MailPicture } from "./digest-pictures";
 import { plainExcerpt } from "./plain-excerpt";
@@ -36,6 +37,7 @@ export async function writeDigest(week: ProjectWeek, span: Span, zone: string, p
     period: `${writeDay(span.since, zone)} to ${writeDay(span.until, zone)}`,
     ...summarise({ attempts, events }, written.total, also.sentences.length + (wiring?.fresh.length ?? 0)),
     standing: standingSentence(week),
+    outlook: outlookSentence(week, span, zone),
     boards: boardLines(week),
     passed: passedLines(attempts, reader),
     failed: failedItems(attempts, reader),

@@ -8,6 +8,8 @@ import {
 } from "@/db/queries/rack";
 import type { ProjectScope } from "@/lib/access/scope";
 import { nextChecks } from "@/lib/check/next-checks";
+import { forecastWork } from "@/lib/forecast/forecast-work";
+import { sayForecast } from "@/lib/forecast/say-forecast";
 import { buildUnit } from "./build-unit";
 import type { RackBoard, RackUnit, RackView, SinceView } from "./rack-view";
 
@@ -58,6 +60,9 @@ export async function loadRack(scope: ProjectScope): Promise<RackView> {
   const backplaneUnit = all.find((unit) => unit.board.id === backplaneBoard?.id) ?? null;
   const sum = (pick: (unit: RackUnit) => number) => all.reduce((total, unit) => total + pick(unit), 0);
   const project = slotRows[0];
+  const [total, holding] = [sum((unit) => unit.total), sum((unit) => unit.holding)];
+  const { history } = happened;
+  const found = forecastWork({ projectId: scope.projectId, history, remaining: total - holding, now: new Date() });
   return {
     name: project?.name ?? scope.projectName,
     summary: project?.summary ?? "",
@@ -68,9 +73,10 @@ export async function loadRack(scope: ProjectScope): Promise<RackView> {
     boards: [...boards.values()],
     next,
     since: sinceView(happened),
+    outlook: total === 0 ? null : sayForecast(found, scope.viewer.timeZone),
     toMend: project?.toMend ?? 0,
-    total: sum((unit) => unit.total),
-    holding: sum((unit) => unit.holding),
+    total,
+    holding,
     failing: sum((unit) => unit.failing),
     doubtful: sum((unit) => unit.doubtful),
     reopened: sum((unit) => unit.reopened),

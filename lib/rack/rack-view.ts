@@ -2,6 +2,7 @@ import type { BoardKind } from "@/db/schema/boards";
 import type { Stage } from "@/db/schema/procedures";
 import type { MachineLayout } from "@/db/schema/projects";
 import type { CheckState } from "@/db/schema/travelers";
+import type { Outlook } from "@/lib/forecast/say-forecast";
 
 export type StageView = { stage: Stage; states: CheckState[] };
 
@@ -79,6 +80,8 @@ export type RackView = {
   boards: RackBoard[];
   next: RackStep[];
   since: SinceView;
+  /** When the rest will hold; null while there is no check. */
+  outlook: Outlook | null;
   /** Open findings of the wiring that must be mended, each counted once however many boards it names. */
   toMend: number;
   total: number;

@@ -34,6 +34,7 @@ const fullest: DigestMailProps = {
   headline: "8 checks passed",
   summary: "8 checks passed: 7 for the first time, 1 on repeat.",
   standing: "118 of 180 checks hold.",
+  outlook: "When will it run? About 9 evenings left: 50 % by Sat 16 Jan 2027, 85 % by Tue 2 Feb 2027.",
   wiring: {
     sentence: "9 findings are open in the wiring: 6 must be mended, 2 should be, 1 is worth a look. 5 are new.",
     link: `${HOME}/wiring/findings`,
