@@ -72,6 +72,15 @@ export const BLOCKS: DemoBlock[] = [
     ],
   },
   {
+    name: "Reset stretcher",
+    summary: "Holds RESET_N for 200 ms and lets it go with the clock.",
+    gates: [
+      { gateFunction: "inv", count: 2 },
+      { gateFunction: "nand2", count: 2 },
+      { gateFunction: "dff", count: 1 },
+    ],
+  },
+  {
     name: "Slot select",
     summary: "One of three constituents is let onto the bus.",
     gates: [{ gateFunction: "decoder3to8", count: 1 }],
@@ -126,6 +135,7 @@ export const PLANS: BoardPlan[] = [
     blocks: [
       { block: "Divider chain", count: 1 },
       { block: "Two-phase clock", count: 1 },
+      { block: "Reset stretcher", count: 1 },
       { block: "Slot select", count: 1 },
     ],
     lines: [
@@ -165,7 +175,7 @@ export const PLANS: BoardPlan[] = [
         partNumber: "Memory 32K × 8, 70 ns",
         description: "Sine table, low and high byte",
         count: 2,
-        designators: "U1, U2",
+        designators: "U7, U8",
       },
     ],
   },
@@ -249,4 +259,36 @@ export const STOCK: { number: string; stock: number; price: string }[] = [
   { number: "DIN 41612 B 64 male", stock: 6, price: "3.40" },
   { number: "DIN 41612 B 64 female", stock: 8, price: "3.95" },
   { number: "LED 3 mm amber", stock: 50, price: "0.09" },
+];
+
+const hc = (name: string, part: string, count: number) => ({
+  part,
+  family: "HC",
+  name,
+  count: String(count),
+  minS: "",
+  typicalS: "",
+  maxS: "",
+});
+
+/** Ripple carry: one exclusive OR, then an AND and an OR for each bit. */
+export const DELAYS = [
+  {
+    name: "Carry through sixteen bits",
+    board: "SUM",
+    measure: "A0 rising to CARRY, all other bits of A at 1 and of B at 0",
+    steps: [hc("half sum of bit 0", "86", 1), hc("carry, AND", "08", 16), hc("carry, OR", "32", 16)],
+  },
+  {
+    name: "Phase bit 23 after the clock",
+    board: "CON",
+    measure: "CLK rising to PH23, increment 1 from FFFFFFh",
+    steps: [
+      hc("flip-flop of bit 0", "74", 1),
+      hc("carry, AND", "08", 23),
+      hc("carry, OR", "32", 23),
+      hc("sum of bit 23", "86", 1),
+      hc("onto the backplane", "541", 1),
+    ],
+  },
 ];

@@ -8,11 +8,13 @@ import { saveBoardPlan } from "@/lib/board-plan/save-board-plan";
 import { saveBom } from "@/lib/board-plan/save-bom";
 import { saveBoardPlanInput, saveBomInput, tieSparesInput } from "@/lib/board-plan/schema";
 import { tieSpares } from "@/lib/board-plan/tie-spares";
+import { saveDelayPath } from "@/lib/delay-path/save-delay-path";
+import { saveDelayPathInput } from "@/lib/delay-path/schema";
 import { stockPartInput } from "@/lib/part/schema";
 import { stockPart } from "@/lib/part/stock-part";
 import { eveningAt, type Happening } from "./calendar";
 import { granted } from "./granted";
-import { BLOCKS, LATER_CHANGE, PLANS, STOCK, type BoardPlan, type DemoBlock } from "./parts-plan";
+import { BLOCKS, DELAYS, LATER_CHANGE, PLANS, STOCK, type BoardPlan, type DemoBlock } from "./parts-plan";
 
 const write = (scope: ProjectScope) => ({ project: scope.slug, writeId: crypto.randomUUID() });
 
@@ -33,6 +35,17 @@ export function partsHappenings(db: Database, scope: ProjectScope, now: Date): H
         for (const { number, stock, price } of STOCK) {
           const typed = { ...write(scope), number, version: 0, stock: String(stock), price };
           granted(await stockPart(scope, stockPartInput.parse(typed)));
+        }
+      },
+    },
+    {
+      at: at(58, 10),
+      work: async () => {
+        for (const { name, board, measure, steps } of DELAYS) {
+          const shares = { unknownMinShare: "25 %", unknownMaxShare: "200 %" };
+          const path = { measure, steps, ...shares, derating: null, clock: null };
+          const typed = { ...write(scope), id: "", version: 0, name, board, path };
+          granted(await saveDelayPath(scope, saveDelayPathInput.parse(typed)));
         }
       },
     },
