@@ -73,20 +73,23 @@ export function useSavePins(project: string, store: PinStore, save: SavePins, kn
     return reply.error.message;
   }
 
-  /** True when everything that could be saved was. */
-  async function saveAll(connectorIds: readonly string[]): Promise<boolean> {
+  /** How many pins were saved. */
+  async function saveAll(connectorIds: readonly string[]): Promise<number> {
     setSaving(true);
     setFailure(undefined);
     const state = store.read();
     const failures: string[] = [];
+    let saved = 0;
     for (const id of connectorIds) {
       const draft = state.drafts[id];
-      const sentence = draft && (await saveOne(state, id, draft.version));
+      if (!draft) continue;
+      const sentence = await saveOne(state, id, draft.version);
       if (sentence) failures.push(sentence);
+      else saved += Object.keys(draft.pins).length;
     }
     setSaving(false);
     setFailure(failures.length > 0 ? [...new Set(failures)].join(" ") : undefined);
-    return failures.length === 0;
+    return saved;
   }
 
   return { saveAll, isSaving, failure };

@@ -94,8 +94,10 @@ export function useWiring({ view, shelf, save, isReadOnly, startPin }: Given) {
       );
     }
     if (ids.length === 0 || saving.isSaving) return;
-    const count = changedPins(drafts);
-    if (await saving.saveAll(ids)) toast({ text: count === 1 ? "One pin is saved." : `${count} pins are saved.` });
+    const saved = await saving.saveAll(ids);
+    if (saved === 0) return;
+    toast({ text: saved === 1 ? "One pin is saved." : `${saved} pins are saved.` });
+    // Only after an answer: without network the page would be left for one that cannot come.
     router.refresh();
   }
 
