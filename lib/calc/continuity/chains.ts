@@ -30,9 +30,9 @@ export function chainPairs(book: PointBook, nets: readonly (readonly number[])[]
 
 /** Points with a place by nearness, then those without one by name. */
 function chainOf(book: PointBook, points: readonly number[]): readonly number[] {
-  const known = points.filter((at) => isPlaced(book, at));
+  const known = points.every((at) => isPlaced(book, at)) ? points : points.filter((at) => isPlaced(book, at));
   const chain = known.length < 3 ? known : routed(book, known);
-  if (known.length === points.length) return chain;
+  if (known === points) return chain;
   const unknown = points.filter((at) => !isPlaced(book, at)).map((at) => ({ at, name: nameOf(book, at) }));
   return [...chain, ...unknown.sort((one, other) => byName(one.name, other.name)).map(({ at }) => at)];
 }

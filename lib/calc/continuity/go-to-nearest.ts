@@ -34,8 +34,8 @@ function amongFew(startX: Float64Array, startY: Float64Array, endX: Float64Array
     let bestSquared = Infinity;
     for (let way = 0; way < count; way += 1) {
       if (isTaken[way] === 1) continue;
-      const toStart = squared(startX[way], startY[way], x, y);
-      const toEnd = squared(endX[way], endY[way], x, y);
+      const toStart = squared(startX[way] ?? 0, startY[way] ?? 0, x, y);
+      const toEnd = squared(endX[way] ?? 0, endY[way] ?? 0, x, y);
       if (toStart < bestSquared) [best, bestSquared] = [way, toStart];
       if (toEnd < bestSquared) [best, bestSquared] = [way + count, toEnd];
     }

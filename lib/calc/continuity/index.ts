@@ -1,5 +1,7 @@
 export { estimateTime } from "./estimate-time";
+export { findContinuityFaults } from "./find-continuity-faults";
 export { type ContinuityFinding, type ContinuityReport, type FindingKind } from "./finding";
+export { followUpProbes } from "./follow-up-probes";
 export { isolationWays } from "./isolation-ways";
 export { PROBE_LIMIT_CLASSES, type LimitClass, type ProbeLimits } from "./limits";
 export {

@@ -1,4 +1,5 @@
 import type { Netlist } from "../netlist";
+import { addTo } from "./add-to";
 import type { Choice } from "./choose-points";
 import { neighboursByName } from "./neighbours-by-name";
 import { neighboursByPlace } from "./neighbours-by-place";
@@ -55,10 +56,7 @@ export function windowOf({ neighbourMm = USUAL_WINDOW_MM }: PlanOptions): number
 function candidatesByNet(book: PointBook, candidates: readonly number[]): Map<number, number[]> {
   const byNet = new Map<number, number[]>();
   for (const at of candidates) {
-    const net = book.netOf[at] ?? 0;
-    const points = byNet.get(net);
-    if (points) points.push(at);
-    else byNet.set(net, [at]);
+    addTo(byNet, book.netOf[at] ?? 0, at);
   }
   return byNet;
 }

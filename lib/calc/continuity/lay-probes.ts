@@ -8,35 +8,47 @@ import type { PointBook } from "./point-book";
  * together, null when no place is known.
  */
 export function layProbes(
-  { x, y }: PointBook,
+  book: PointBook,
   joined: PointPairs,
   apart: PointPairs,
   limits: ProbeLimits,
 ): { probes: Probe[]; travelMm: number | null } {
   const probes: Probe[] = [];
-  let travelMm = 0;
-  let isKnown = false;
-  let [lastA, lastB] = [-1, -1];
-  /** How far two places are apart; nothing is known of one that has none. */
-  const way = (one: number, other: number): number => {
-    const [dx, dy] = [(x[one] ?? Number.NaN) - (x[other] ?? 0), (y[one] ?? 0) - (y[other] ?? 0)];
-    return Number.isNaN(dx) ? 0 : Math.sqrt(dx * dx + dy * dy);
-  };
-  const lay = (kind: "continuity" | "isolation", pairs: PointPairs) => {
-    const [expect, limitOhm] =
-      kind === "continuity" ? (["joined", limits.continuityOhm] as const) : (["apart", limits.isolationOhm] as const);
-    for (let at = 0; at < pairs.a.length; at += 1) {
-      const [one, other] = [pairs.a[at] ?? 0, pairs.b[at] ?? 0];
-      const straight = way(lastA, one) + way(lastB, other);
-      const swapped = way(lastA, other) + way(lastB, one);
-      const [a, b] = swapped < straight ? [other, one] : [one, other];
-      travelMm += Math.min(straight, swapped);
-      isKnown ||= !Number.isNaN(x[one]);
-      probes.push({ id: probes.length, kind, a, b, expect, limitOhm });
-      [lastA, lastB] = [a, b];
-    }
-  };
-  lay("continuity", joined);
-  lay("isolation", apart);
-  return { probes, travelMm: isKnown ? travelMm : null };
+  const first = layKind(book, joined, { kind: "continuity", expect: "joined", limitOhm: limits.continuityOhm }, probes);
+  const second = layKind(book, apart, { kind: "isolation", expect: "apart", limitOhm: limits.isolationOhm }, probes);
+  const isKnown = probes.some(({ a }) => !Number.isNaN(book.x[a]));
+  return { probes, travelMm: isKnown ? first + second : null };
+}
+
+/** Adds the probes behind those that are there, and answers the way of both tips. */
+function layKind(
+  { x, y }: PointBook,
+  pairs: PointPairs,
+  { kind, expect, limitOhm }: Pick<Probe, "kind" | "expect" | "limitOhm">,
+  probes: Probe[],
+): number {
+  let travel = 0;
+  let lastA = probes.at(-1)?.a ?? -1;
+  let lastB = probes.at(-1)?.b ?? -1;
+  for (let at = 0; at < pairs.a.length; at += 1) {
+    const one = pairs.a[at] ?? 0;
+    const other = pairs.b[at] ?? 0;
+    const straight = way(x, y, lastA, one) + way(x, y, lastB, other);
+    const swapped = way(x, y, lastA, other) + way(x, y, lastB, one);
+    const isSwapped = swapped < straight;
+    travel += isSwapped ? swapped : straight;
+    lastA = isSwapped ? other : one;
+    lastB = isSwapped ? one : other;
+    probes.push({ id: probes.length, kind, a: lastA, b: lastB, expect, limitOhm });
+  }
+  return travel;
+}
+
+/** How far two points are apart; 0 when nothing is known of one of them. */
+function way(x: Float64Array, y: Float64Array, one: number, other: number): number {
+  if (one < 0) return 0;
+  const dx = (x[one] ?? 0) - (x[other] ?? 0);
+  const dy = (y[one] ?? 0) - (y[other] ?? 0);
+  const length = Math.sqrt(dx * dx + dy * dy);
+  return Number.isNaN(length) ? 0 : length;
 }

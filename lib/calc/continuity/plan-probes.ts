@@ -1,11 +1,11 @@
 import type { Netlist } from "../netlist";
 import { chainPairs, orderPairs, type PointPairs } from "./chains";
-import { choosePoints } from "./choose-points";
+import { choosePoints, type Choice } from "./choose-points";
 import { isolationPairs, type IsolationPairs } from "./isolation-pairs";
 import { isolationWays } from "./isolation-ways";
 import { layProbes } from "./lay-probes";
 import type { PlanOptions, ProbePlan } from "./plan";
-import { pointBook } from "./point-book";
+import { pointBook, type PointBook } from "./point-book";
 import { CAUTION, effectiveLimits, limitRemark } from "./populated";
 import { planRemarks } from "./plan-remarks";
 
@@ -26,16 +26,14 @@ export function planProbes(netlist: Netlist, options: PlanOptions): ProbePlan {
   const isolation = isolationPairs(netlist, book, choice, options);
   const apart = inOrder(isolation, choice.isWanted, (pairs) => orderPairs(book, pairs), book.netOf);
   const { probes, travelMm } = layProbes(book, joined, apart, limits);
-  const wanted = new Set(
-    choice.candidates.map((at) => book.netOf[at] ?? 0).filter((net) => choice.isWanted[net] === 1),
-  );
-  const [nets, others] = [wanted.size, options.railsOnly === true ? wanted.size : isolation.nets];
+  const { nets, points } = countProbed(book, choice, joined);
+  const others = options.railsOnly === true ? nets : isolation.nets;
   const everyPair = isolationWays(nets).everyPair + nets * (others - nets);
   return {
     probes,
     counts: {
       nets,
-      points: new Set([...joined.a, ...joined.b]).size,
+      points,
       continuity: joined.a.length,
       isolation: apart.a.length,
     },
@@ -49,6 +47,16 @@ export function planProbes(netlist: Netlist, options: PlanOptions): ProbePlan {
       ...(apart.a.length > 0 ? [limitRemark(limits, options.populated)] : []),
     ],
   };
+}
+
+/** Nets that the plan is about, and points that it joins. */
+function countProbed(book: PointBook, { candidates, isWanted }: Choice, { a, b }: PointPairs) {
+  const [isNet, isPoint] = [new Uint8Array(book.nets), new Uint8Array(book.points.length)];
+  for (const at of candidates) isNet[book.netOf[at] ?? 0] = isWanted[book.netOf[at] ?? 0] ?? 0;
+  for (const at of a) isPoint[at] = 1;
+  for (const at of b) isPoint[at] = 1;
+  const count = (flags: Uint8Array) => flags.reduce((sum, flag) => sum + flag, 0);
+  return { nets: count(isNet), points: count(isPoint) };
 }
 
 /** Rails first. Of each pair at least one net must be wanted. */

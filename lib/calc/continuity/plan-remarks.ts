@@ -7,12 +7,10 @@ import type { PointBook } from "./point-book";
 /** What the plan leaves out, and what it had to assume, a sentence each. */
 export function planRemarks(netlist: Netlist, book: PointBook, choice: Choice, options: PlanOptions): string[] {
   const { hidden, vias, unconnected } = choice.leftOut;
-  const points = choice.candidates.flatMap((at) => book.points[at] ?? []);
-  const placeless = points.filter(({ xMm }) => xMm === null).length;
-  const sizeless = points.filter(({ xMm, padWidthMm }) => xMm !== null && padWidthMm === null).length;
+  const { placeless, sizeless } = countUnknown(book, choice.candidates);
   const connector = options.connector?.trim();
   const remarks = [
-    connector !== undefined && points.length === 0 ? `No point of the netlist belongs to ${connector}.` : "",
+    connector !== undefined && choice.candidates.length === 0 ? `No point of the netlist belongs to ${connector}.` : "",
     options.signals && choice.isWanted.every((is) => is === 0)
       ? "None of these signals is a net of the netlist under this name."
       : "",
@@ -30,6 +28,16 @@ export function planRemarks(netlist: Netlist, book: PointBook, choice: Choice, o
       : "",
   ];
   return remarks.filter((remark) => remark !== "");
+}
+
+function countUnknown({ points }: PointBook, candidates: readonly number[]) {
+  let [placeless, sizeless] = [0, 0];
+  for (const at of candidates) {
+    const point = points[at];
+    if (point?.xMm === null) placeless += 1;
+    else if (point?.padWidthMm === null) sizeless += 1;
+  }
+  return { placeless, sizeless };
 }
 
 const count = (number: number, one: string, several: string): string =>

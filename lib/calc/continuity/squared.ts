@@ -1,3 +1,3 @@
 /** Distance of two places, squared. */
-export const squared = (ax = 0, ay = 0, bx: number, by: number): number =>
+export const squared = (ax: number, ay: number, bx: number, by: number): number =>
   (ax - bx) * (ax - bx) + (ay - by) * (ay - by);

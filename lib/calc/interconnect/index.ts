@@ -1,5 +1,6 @@
 export { applyEdits } from "./apply-edits";
 export { assembleNets } from "./assemble-nets";
+export { DisjointSets } from "./disjoint-sets";
 export { checkMachine, checkRules, type MachineCheck } from "./check";
 export { type Edit, type Finding, type PinAt, type Weight } from "./finding";
 export { netsByPin, pinKey } from "./look-up-net";

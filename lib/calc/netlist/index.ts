@@ -13,6 +13,7 @@ export {
   type Side,
   type ToolingHole,
 } from "./netlist";
+export { listed } from "./listed";
 export { netlistOfDesign } from "./netlist-of-design";
 export {
   PIN_LIST_COLUMNS,
