@@ -31,7 +31,15 @@ export function BenchPicker({ project, bench }: Props) {
       ) : (
         <div className="grid gap-5">
           {bench.next.length > 0 && (
-            <Panel title="Next on the bench" padding="none">
+            <Panel
+              title="Next on the bench"
+              padding="none"
+              actions={
+                <Link className="link text-sm" href={`/projects/${project}/order`}>
+                  Plan the evening
+                </Link>
+              }
+            >
               <ol>
                 {bench.next.map((check, index) => (
                   <NextLine key={check.checkId} project={project} check={check} isFirst={index === 0} />

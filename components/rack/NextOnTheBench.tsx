@@ -16,7 +16,16 @@ export function NextOnTheBench({
   project: string;
 }) {
   return (
-    <Panel title="Next on the bench">
+    <Panel
+      title="Next on the bench"
+      actions={
+        total > 0 && (
+          <Link className="link text-sm" href={`/projects/${project}/order`}>
+            Plan the evening
+          </Link>
+        )
+      }
+    >
       {steps.length === 0 ? (
         <p className="text-[0.9375rem] text-ink-soft">
           {total === 0 ? "Steps appear here when a unit has its traveler." : "Nothing is open. Every check holds."}

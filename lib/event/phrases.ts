@@ -28,6 +28,7 @@ export function phrases(context: SentenceContext) {
     who: context.actor,
     project: (text: string) => link(text, `${home}/settings`),
     people: (text: string) => link(text, `${home}/people`),
+    order: (text: string) => link(text, `${home}/order/boards`),
     slots: (text: string) => link(text, `${home}/boards`),
     board: (code: string, name?: string) =>
       link(name ? `${code} ${name}` : code, `${home}/boards/${encodeURIComponent(code)}`),
@@ -47,6 +48,9 @@ export function phrases(context: SentenceContext) {
     rework: (number: number) => link(`rework R${number}`, unitHref && `${unitHref}/reworks#R${number}`),
     punchList: (code: string, letter: string) =>
       link(`punch list of ${code} rev ${letter}`, `${home}/boards/${encodeURIComponent(code)}#punch-${letter}`),
+    netlists: (text: string, code: string) => link(text, `${home}/boards/${encodeURIComponent(code)}/netlists`),
+    probing: (text: string) =>
+      link(text, unitHref && context.subjectId ? `${unitHref}/probing/${context.subjectId}` : undefined),
     entry: (title: string) => link(`“${title}”`, context.subjectId ? `${home}/log/${context.subjectId}` : undefined),
     file: (text: string) => link(text, context.subjectId ? `/api${home}/files/${context.subjectId}` : undefined),
     /** Where a file belongs, when it belongs anywhere. */

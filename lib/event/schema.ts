@@ -56,6 +56,9 @@ export const eventPayloads = {
   "hold.lifted": check.merge(reason),
   "prerequisite.added": z.object({ check: text, needs: text }),
   "prerequisite.removed": z.object({ check: text, needs: text }),
+  /** needs: board waits for other; despite: it may come before other, whatever the machine says. */
+  "order.said": z.object({ board: text, other: text, rule: z.enum(["needs", "despite"]) }).merge(reason),
+  "order.withdrawn": z.object({ board: text, other: text, rule: z.enum(["needs", "despite"]) }),
   "evidence.attached": z.object({ kind: text, fileName: text }),
   "evidence.removed": z.object({ kind: text, fileName: text }),
   "evidence.restored": z.object({ kind: text, fileName: text }),
@@ -110,6 +113,10 @@ export const eventPayloads = {
     doubtful: z.number(),
     spared: z.number(),
   }),
+  "netlist.kept": z.object({ code: text, letter: text, number: z.number(), nets: z.number() }),
+  "probing.started": z.object({ serial: text, probes: z.number() }),
+  /** said: what the round came to, in words. */
+  "probing.closed": z.object({ serial: text, said: text }),
   "punch.taken": z.object({ code: text, letter: text, items: z.number() }),
   "punch.dealt": z.object({ code: text, letter: text, item: text, how: text }),
   "punch.reopened": z.object({ code: text, letter: text, item: text }),

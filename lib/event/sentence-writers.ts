@@ -168,6 +168,19 @@ export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
     check(title),
     ` no longer wait for ${needs}.`,
   ],
+  "order.said": ({ board, other, rule, reason }, { who, order }) => [
+    who,
+    " said in the ",
+    order("order of the boards"),
+    rule === "needs" ? ` that ${board} waits for ${other}` : ` that ${board} may come before ${other}`,
+    reason === "" ? "." : `: ${endSentence(reason)}`,
+  ],
+  "order.withdrawn": ({ board, other, rule }, { who, order }) => [
+    who,
+    " withdrew from the ",
+    order("order of the boards"),
+    rule === "needs" ? ` that ${board} waits for ${other}.` : ` that ${board} may come before ${other}.`,
+  ],
   "evidence.attached": ({ kind, fileName }, { who, file, place }) => [
     who,
     " attached ",
@@ -341,6 +354,28 @@ export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
     `${fault === null ? "" : ` for F${fault}`}: ${what}. `,
     doubtful === 0 ? "It puts nothing in doubt" : `It puts ${count(doubtful, "check")} in doubt`,
     spared === 0 ? "." : `; ${count(spared, "check")} spared.`,
+  ],
+  "netlist.kept": ({ code, letter, number, nets }, { who, netlists }) => [
+    who,
+    " took ",
+    netlists(`netlist ${number} of ${code} rev ${letter}`, code),
+    ` with ${count(nets, "net")}.`,
+  ],
+  "probing.started": ({ serial, probes }, { who, unit, probing }) => [
+    who,
+    " started ",
+    probing("a round of probing"),
+    " of ",
+    unit(serial),
+    `: ${count(probes, "probe")}.`,
+  ],
+  "probing.closed": ({ serial, said }, { who, unit, probing }) => [
+    who,
+    " closed ",
+    probing("a round of probing"),
+    " of ",
+    unit(serial),
+    `: ${endSentence(said)}`,
   ],
   "punch.taken": ({ code, letter, items }, { who, punchList }) => [
     who,

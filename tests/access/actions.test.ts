@@ -11,6 +11,7 @@ import { accountRows } from "./action-rows/account";
 import { boardRows } from "./action-rows/boards";
 import { evidenceRows } from "./action-rows/evidence";
 import { faultRows } from "./action-rows/faults";
+import { orderRows } from "./action-rows/order";
 import { partsRows } from "./action-rows/parts";
 import { peopleRows } from "./action-rows/people";
 import { pinMapRows } from "./action-rows/pin-maps";
@@ -31,6 +32,7 @@ const table: Record<string, Rows> = {
   ...boardRows,
   ...evidenceRows,
   ...faultRows,
+  ...orderRows,
   ...partsRows,
   ...peopleRows,
   ...pinMapRows,

@@ -76,6 +76,13 @@ export const pages: Record<string, PageRow> = {
   },
   "app/(workshop)/projects/[project]/wiring/take/page.tsx": { permission: "wiring.edit", path: of("/wiring/take") },
   "app/(workshop)/projects/[project]/wiring/page.tsx": { permission: "project.see", path: of("/wiring") },
+  "app/(workshop)/projects/[project]/order/page.tsx": { permission: "project.see", path: of("/order") },
+  "app/(workshop)/projects/[project]/order/boards/page.tsx": { permission: "project.see", path: of("/order/boards") },
+  "app/(workshop)/projects/[project]/order/checks/page.tsx": { permission: "project.see", path: of("/order/checks") },
+  "app/(workshop)/projects/[project]/order/sessions/page.tsx": {
+    permission: "project.see",
+    path: of("/order/sessions"),
+  },
   "app/(workshop)/projects/[project]/captures/page.tsx": { permission: "project.see", path: of("/captures") },
   "app/(workshop)/projects/[project]/parts/page.tsx": { permission: "project.see", path: of("/parts") },
   "app/(workshop)/projects/[project]/parts/boards/page.tsx": { permission: "project.see", path: of("/parts/boards") },

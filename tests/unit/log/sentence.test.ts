@@ -157,10 +157,24 @@ const SAID: { [Kind in EventKind]: [EventPayload<Kind>, string] } = {
     { serial: "CON-01", number: 2, what: "Bodge wire W3, U6-12 to U9-3, white", fault: 3, doubtful: 5, spared: 1 },
     "Mira recorded rework R2 of CON-01 for F3: Bodge wire W3, U6-12 to U9-3, white. It puts 5 checks in doubt; 1 check spared.",
   ],
+  "netlist.kept": [{ code: "CON", letter: "A", number: 2, nets: 64 }, "Mira took netlist 2 of CON rev A with 64 nets."],
+  "probing.started": [{ serial: "CON-01", probes: 1 }, "Mira started a round of probing of CON-01: 1 probe."],
+  "probing.closed": [
+    { serial: "CON-01", said: "1 open, 1 crossed pair" },
+    "Mira closed a round of probing of CON-01: 1 open, 1 crossed pair.",
+  ],
   "punch.taken": [{ code: "CON", letter: "B", items: 4 }, "Mira took 4 items into the punch list of CON rev B."],
   "punch.dealt": [
     { code: "CON", letter: "B", item: "W3", how: "PH7 routed to U9-3" },
     "Mira ticked “W3” off the punch list of CON rev B: PH7 routed to U9-3.",
+  ],
+  "order.said": [
+    { board: "CON", other: "SUP", rule: "despite", reason: "It has its own regulator." },
+    "Mira said in the order of the boards that CON may come before SUP: It has its own regulator.",
+  ],
+  "order.withdrawn": [
+    { board: "CON", other: "TIM", rule: "needs" },
+    "Mira withdrew from the order of the boards that CON waits for TIM.",
   ],
   "punch.reopened": [{ code: "CON", letter: "B", item: "W3" }, "Mira put “W3” back on the punch list of CON rev B."],
 };
