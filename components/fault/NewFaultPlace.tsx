@@ -3,7 +3,7 @@
 import { usePathname, useRouter } from "next/navigation";
 import { useEffect, useRef } from "react";
 import { useFormContext, useWatch } from "react-hook-form";
-import { z } from "zod";
+import type { z } from "zod";
 import { Page } from "@/components/shell/Page";
 import { ButtonLink } from "@/components/ui/ButtonLink";
 import { FormComboBox } from "@/components/ui/form/bound-fields";

@@ -6,6 +6,7 @@ import { Button, ComboBox, Input, ListBox, Popover } from "react-aria-components
 import { Field, fieldBox, type FieldTexts } from "./Field";
 import { dropList, inputBox } from "./field-style";
 import { Icon } from "./Icon";
+import type { Option } from "./option";
 import { OptionLine } from "./OptionLine";
 
 export type NameChoice = { name: string; says: string };
@@ -87,7 +88,7 @@ export function NamesField({ names, onChange, choices, placeholder, ...texts }: 
             </Button>
           </span>
           <Popover offset={4} className={dropList}>
-            <ListBox className="max-h-72 outline-none">{(option) => <OptionLine option={option} />}</ListBox>
+            <ListBox<Option> className="max-h-72 outline-none">{(option) => <OptionLine option={option} />}</ListBox>
           </Popover>
         </Field>
       </ComboBox>
