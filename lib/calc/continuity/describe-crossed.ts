@@ -8,7 +8,7 @@ export function describeCrossed(study: Study, { nets, joins, coppers }: CrossedG
   const { book, breaks, pieces, pieceOf } = study;
   const names = nets.map((net) => book.netName(net));
   const opens = nets.flatMap((net) => breaks.get(net) ?? []);
-  const ends = nets.map((net) => pieces.get(net)?.at(-1) ?? []);
+  const ends = nets.map((net) => smallest(pieces.get(net) ?? []));
   const leads = joins.map(({ probe }) => `${book.label(probe.a)} leads to ${book.label(probe.b)}`);
   const members = new Map<number, PointNumber[]>();
   for (const piece of nets.flatMap((net) => pieces.get(net) ?? [])) members.set(pieceOf(piece[0] ?? -1), piece);
@@ -19,12 +19,18 @@ export function describeCrossed(study: Study, { nets, joins, coppers }: CrossedG
     pins: [...new Set(joins.flatMap(({ probe }) => [book.label(probe.a), book.label(probe.b)]))],
     probes: [...opens, ...joins].map(({ probe }) => probe.id),
     sentence: `${listed(names)} change places: ${listed(leads, 6)}.`,
-    lookAt: `Look at ${listed(sharedParts(study, ends))}: the ${nets.length === 2 ? "two wires are" : "wires are"} the wrong way round there.`,
+    lookAt: `Look at ${sharedParts(study, ends).join(" or ")}: the ${nets.length === 2 ? "two wires are" : "wires are"} the wrong way round there.`,
     mendFirst: "",
   };
 }
 
-/** Parts that a small piece of every net hangs on; both connectors of a cable, one of them when the nets go further. */
+/** Points of the smallest piece, or of all that are as small: the end that is wrong, or both ends of a cable. */
+function smallest(pieces: readonly PointNumber[][]): PointNumber[] {
+  const size = pieces.at(-1)?.length;
+  return pieces.filter((piece) => piece.length === size).flat();
+}
+
+/** Parts that the smallest pieces of all nets hang on. */
 function sharedParts({ book }: Study, ends: readonly PointNumber[][]): string[] {
   const partsOf = (piece: readonly PointNumber[]) => new Set(piece.flatMap((point) => book.points[point]?.part || []));
   const [first = new Set<string>(), ...others] = ends.map(partsOf);

@@ -1,7 +1,8 @@
 import { signalKey } from "../signal-names";
 
 /** Names of supplies and grounds as people write them (common practice, no source). */
-const WORDS = /^(?:[ADPSC]?GND[A-Z0-9]{0,3}|GND[_-].*|[AD]?V(?:CC|DD|SS|EE|BAT|PP|REF)[A-Z0-9]{0,4}|0V|EARTH|CHASSIS)$/;
+const WORDS =
+  /^(?:[ADPSC]?GND[A-Z0-9]{0,3}|GND[_-].*|[AD]?V(?:CC|DD|SS|EE|BAT|PP|REF)[A-Z0-9_.]{0,6}|0V|EARTH|CHASSIS)$/;
 
 /** "+5V" by signalKey, and what some hang behind: "+5V_A". */
 const VOLTS = /^[+-]\d+(?:\.\d+)?V(?:[_-].*)?$/;
