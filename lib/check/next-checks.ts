@@ -12,7 +12,7 @@ export type NextCheck = {
   stage: Stage;
   title: string;
   state: CheckState;
-  /** Waiting checks that it holds back, directly or through others. */
+  /** Checks that do not hold and wait for it, directly or through others. */
   holdsBack: number;
   /** Why it comes here, in words. */
   reason: string;
@@ -28,7 +28,7 @@ const REASONS: Partial<Record<CheckState, string>> = {
   untested: "Free to do. Nothing waits for it.",
 };
 
-/** Ranks what the bench should do next by how many waiting checks it lets go. */
+/** Ranks what the bench should do next by how many open checks it lets go, as lib/calc/sequence does. */
 export function nextChecks(checks: readonly StandingCheck[]): NextCheck[] {
   const states = new Map(checks.map((check) => [check.id, check.state]));
   const blockers = findBlockers(checks, (id) => states.get(id) ?? "untested");
@@ -78,9 +78,9 @@ function countHeldBack(
     for (const next of dependants.get(current) ?? []) {
       if (seen.has(next)) continue;
       seen.add(next);
-      const state = states.get(next) ?? "untested";
-      if (state === "waiting") count += 1;
-      if (!holds(state)) open.push(next);
+      if (holds(states.get(next) ?? "untested")) continue;
+      count += 1;
+      open.push(next);
     }
   }
   return count;

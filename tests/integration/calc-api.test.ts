@@ -199,3 +199,43 @@ test("one connection gets so many calculations and no more, and others still the
   expect(Number(worn.answer.headers.get("retry-after"))).toBeGreaterThan(0);
   expect((await send("conformity", READING)).answer.status).toBe(200);
 });
+
+describe("the order and the forecast", () => {
+  const check = { unit: "SUM-01", stage: "function" };
+
+  test("name the members of a circle, and a prerequisite that is not there by its path", async () => {
+    const round = [
+      { ...check, id: "a", title: "Adds", needs: ["b"] },
+      { ...check, id: "b", title: "Carries", needs: ["a"] },
+    ];
+    const circle = await send("sequence", { checks: round });
+    expect(circle.answer.status).toBe(400);
+    expect(JSON.stringify(circle.json)).toMatch(/Adds.*Carries/);
+    const stray = await send("sequence", { checks: [{ ...check, id: "a", needs: ["c"] }] });
+    expect(JSON.stringify(stray.json)).toContain("There is no check c.");
+  });
+
+  test("plan two builders side by side and say what is free", async () => {
+    const checks = [
+      { id: "a", unit: "SUM-01", stage: "function", holdPoint: true },
+      { id: "b", unit: "SUM-01", stage: "function" },
+      { id: "c", unit: "TIM-01", stage: "function" },
+    ];
+    const { json } = await send("sequence", {
+      checks,
+      paces: { function: 600 },
+      evening: { builders: 2, seconds: 1200 },
+    });
+    expect(json.result.now).toEqual(["a", "c"]);
+    expect(json.result.plan).toMatchObject({ usedS: 1200, left: 0 });
+  });
+
+  test("give the same dates for the same seed, and none without three weeks", async () => {
+    const { example } = await (await GET(new Request(address("forecast")), at("forecast"))).json();
+    const [first, again] = [await send("forecast", example), await send("forecast", example)];
+    expect(first.json.result.kind).toBe("forecast");
+    expect(again.json.result).toEqual(first.json.result);
+    const early = await send("forecast", { ...example, nowMs: example.events[0].atMs + 86_400_000 });
+    expect(early.json.result.kind).toBe("not enough history");
+  });
+});
