@@ -2,6 +2,7 @@ import { existsSync } from "node:fs";
 import { join } from "node:path";
 import postgres from "postgres";
 import { benchPageScript } from "./bench/bench-page-script";
+import { benchContinuity } from "./bench/continuity";
 import { benchDigests } from "./bench/digests";
 import { benchRackPage } from "./bench/rack-page";
 import { benchRecordAttempt } from "./bench/record-attempt";
@@ -25,6 +26,7 @@ const isWanted = (name: string) => wanted.length === 0 || wanted.some((word) => 
 
 const rows: Row[] = [];
 if (isWanted("rules")) rows.push(...benchRules());
+if (isWanted("continuity")) rows.push(...benchContinuity());
 if (["record", "rack", "script", "digest"].some(isWanted)) await benchServed();
 printTable(rows);
 process.exit(rows.every((row) => row.reached) ? 0 : 1);
