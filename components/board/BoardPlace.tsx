@@ -27,6 +27,8 @@ type Props = {
   board: BoardView;
   /** Its packages by the plan of its parts; undefined while it uses no blocks. */
   spares: BoardSpares | undefined;
+  /** What each revision takes over from the ones before. */
+  punchLists: ReactNode;
   /** What its first power should show; nothing while its budget is not known. */
   firstPower: ReactNode;
   can: { editBoard: boolean; editUnits: boolean; editProcedure: boolean; purge: boolean };
@@ -40,6 +42,7 @@ export function BoardPlace({
   zone,
   board,
   spares,
+  punchLists,
   firstPower,
   can,
   boardActs,
@@ -124,6 +127,7 @@ export function BoardPlace({
       <ConnectorPanel board={board} project={project} />
       {spares && <PackagesPanel project={project} zone={zone} code={board.code} spares={spares} />}
       {firstPower}
+      {punchLists}
       <Dialog title="Change the board" isOpen={isEditing} onOpenChange={setEditing}>
         {(close) => (
           <BoardForm

@@ -1,6 +1,7 @@
 "use client";
 
 import { Button } from "@/components/ui/Button";
+import { ButtonLink } from "@/components/ui/ButtonLink";
 import type { CheckView } from "@/lib/traveler/traveler-view";
 import { ReasonDialog } from "./ReasonDialog";
 import type { TravelerFrame } from "./traveler-acts";
@@ -62,6 +63,15 @@ export function CheckActs({ check, frame }: Props) {
         said="Lifted for this unit. The reason stands on the traveler."
         send={(reason, writeId) => acts.lift({ ...on(writeId), reason })}
       />
+    ),
+    may.fault && check.state === "failed" && (
+      <ButtonLink
+        key="fault"
+        href={`/projects/${project}/faults/new?unit=${encodeURIComponent(frame.serial)}&check=${check.id}`}
+        prefetch={false}
+      >
+        Make a fault
+      </ButtonLink>
     ),
   ].filter(Boolean);
   return buttons.length > 0 ? <div className="flex flex-wrap gap-2">{buttons}</div> : null;

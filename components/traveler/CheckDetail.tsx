@@ -4,6 +4,7 @@ import Link from "next/link";
 import { BlockedBy } from "@/components/bench/BlockedBy";
 import { Instruction } from "@/components/bench/Instruction";
 import { PinDrawing, type BoardFace } from "@/components/bench/PinDrawing";
+import { FaultStateMark } from "@/components/fault/FaultStateMark";
 import { EvidenceGallery } from "@/components/evidence/EvidenceGallery";
 import { buttonStyle } from "@/components/ui/button-style";
 import { DateTime } from "@/components/ui/DateTime";
@@ -50,6 +51,18 @@ export function CheckDetail({ check, board, isRetired, frame }: Props) {
         </Link>
       )}
       {!isRetired && <CheckActs check={check} frame={frame} />}
+      {check.faults.length > 0 && (
+        <ul className="grid gap-1 text-sm">
+          {check.faults.map(({ number, title, state }) => (
+            <li key={number} className="flex flex-wrap items-baseline gap-x-2">
+              <Link href={`/projects/${frame.project}/faults/${number}`} className="link" prefetch={false}>
+                F{number} {title}
+              </Link>
+              <FaultStateMark state={state} />
+            </li>
+          ))}
+        </ul>
+      )}
       {check.instruction && (
         <div className="[&_p]:text-base">
           <Instruction text={check.instruction} />

@@ -1,6 +1,7 @@
+import Link from "next/link";
 import { DateTime } from "@/components/ui/DateTime";
 import { StateGlyph, type GlyphState } from "@/components/ui/glyphs/StateGlyph";
-import type { CheckView, PersonView } from "@/lib/traveler/traveler-view";
+import type { CheckDoubtView, CheckView, PersonView } from "@/lib/traveler/traveler-view";
 import { AttemptEntry } from "./AttemptEntry";
 import { historyOf, type HistoryEntry } from "./history-of";
 import type { TravelerFrame } from "./traveler-acts";
@@ -40,6 +41,8 @@ function keyOf(entry: HistoryEntry): string {
       return entry.concession.id;
     case "withdrawal":
       return entry.id;
+    case "doubt":
+      return entry.doubt.id;
     case "lift":
       return entry.lift.id;
   }
@@ -64,9 +67,42 @@ function Entry({ entry, check, frame }: Omit<Props, "isRetired"> & { entry: Hist
           zone={frame.zone}
         />
       );
+    case "doubt":
+      return <Reworked doubt={entry.doubt} frame={frame} />;
     case "lift":
       return <Decision state="waiting" what="Hold lifted" {...entry.lift} zone={frame.zone} />;
   }
+}
+
+/** What a rework did to the check, with the way to it. */
+function Reworked({ doubt, frame }: { doubt: CheckDoubtView; frame: TravelerFrame }) {
+  const { rework, serial, number, isSpared, by, at } = doubt;
+  // The reason of a doubt begins with the rework that it is of; the link names it already.
+  const reason = doubt.reason.startsWith(`${rework}: `) ? doubt.reason.slice(rework.length + 2) : doubt.reason;
+  return (
+    <div className="grid grid-cols-[1.75rem_1fr] gap-x-2">
+      <StateGlyph state={isSpared ? "waiting" : "doubtful"} size={14} className="mt-1" />
+      <div className="min-w-0">
+        <p>
+          <span className="font-semibold">
+            {isSpared ? "Spared by " : ""}
+            <Link
+              href={`/projects/${frame.project}/units/${encodeURIComponent(serial)}/reworks#R${number}`}
+              className="link"
+              prefetch={false}
+            >
+              {rework}
+            </Link>
+            :
+          </span>{" "}
+          {reason}
+        </p>
+        <p className="text-ink-soft text-sm">
+          {by.name}, <DateTime at={at} zone={frame.zone} />
+        </p>
+      </div>
+    </div>
+  );
 }
 
 type DecisionProps = { state: GlyphState; what: string; by: PersonView; at: string; reason: string; zone: string };

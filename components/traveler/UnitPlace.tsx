@@ -1,3 +1,4 @@
+import Link from "next/link";
 import type { UnitActs } from "@/components/board/board-acts";
 import { EditUnit } from "@/components/board/EditUnit";
 import { RestoreUnit } from "@/components/board/RestoreUnit";
@@ -15,7 +16,7 @@ import type { TravelerFrame } from "./traveler-acts";
 import { TravelerPlace } from "./TravelerPlace";
 
 type Props = {
-  unit: Pick<UnitWithoutTraveler, "unit" | "board" | "revision" | "slot">;
+  unit: Pick<UnitWithoutTraveler, "unit" | "board" | "revision" | "slot" | "reworks" | "faults">;
   traveler: TravelerView | undefined;
   move: MoveView | undefined;
   openCheck: string | undefined;
@@ -68,6 +69,11 @@ export function UnitPlace({ unit, traveler, move, openCheck, revisions, canEditU
               Print the sheet
             </ButtonLink>
           )}
+          {frame.may.rework && (
+            <ButtonLink href={`${self}/reworks/new`} prefetch={false}>
+              Record a rework
+            </ButtonLink>
+          )}
           {traveler && frame.may.record && (
             <ButtonLink kind="primary" href={`${base}/bench/${encodeURIComponent(serial)}`} prefetch={false}>
               Bench this unit
@@ -84,6 +90,20 @@ export function UnitPlace({ unit, traveler, move, openCheck, revisions, canEditU
           >
             This unit is archived. Its traveler can be read; nothing can be recorded on it.
           </Notice>
+        )}
+        {unit.reworks + unit.faults > 0 && (
+          <p className="-mt-2 flex flex-wrap gap-x-5 gap-y-1 print:hidden">
+            {unit.reworks > 0 && (
+              <Link href={`${self}/reworks`} className="link" prefetch={false}>
+                {unit.reworks === 1 ? "1 rework" : `${unit.reworks} reworks`}
+              </Link>
+            )}
+            {unit.faults > 0 && (
+              <Link href={`${base}/faults?unit=${encodeURIComponent(serial)}`} className="link" prefetch={false}>
+                {unit.faults === 1 ? "1 fault not mended" : `${unit.faults} faults not mended`}
+              </Link>
+            )}
+          </p>
         )}
         {note && <p className="text-ink-soft max-w-prose whitespace-pre-line">{note}</p>}
         {newest !== undefined && !archived && !frame.may.move && (

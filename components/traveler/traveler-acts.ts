@@ -33,6 +33,8 @@ export type TravelerMay = {
   voidAny: boolean;
   prerequisites: boolean;
   move: boolean;
+  fault: boolean;
+  rework: boolean;
 };
 
 export type TravelerFrame = {

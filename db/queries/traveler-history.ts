@@ -1,8 +1,9 @@
-import { and, asc, desc, eq, isNull } from "drizzle-orm";
+import { and, asc, desc, eq, isNotNull, isNull } from "drizzle-orm";
 import { alias } from "drizzle-orm/pg-core";
 import type { Queryable } from "@/db/client";
 import { units } from "@/db/schema/boards";
 import { attachments } from "@/db/schema/evidence";
+import { faults, reworkDoubts, reworks } from "@/db/schema/faults";
 import { users } from "@/db/schema/people";
 import { procedureChecks } from "@/db/schema/procedures";
 import {
@@ -90,6 +91,40 @@ export async function findTravelerHoldLifts(db: Queryable, projectId: string, un
     .leftJoin(users, eq(users.id, holdLifts.userId))
     .where(and(eq(checks.projectId, projectId), eq(checks.unitId, unitId)))
     .orderBy(desc(holdLifts.createdAt));
+}
+
+/** Reworks, of this unit or another, that put one of the unit's checks in doubt or spared it. */
+export async function findTravelerDoubts(db: Queryable, projectId: string, unitId: string) {
+  return db
+    .select({
+      checkId: reworkDoubts.checkId,
+      origin: reworkDoubts.origin,
+      reason: reworkDoubts.reason,
+      id: reworks.id,
+      number: reworks.number,
+      kind: reworks.kind,
+      wire: reworks.wire,
+      serial: units.serial,
+      userId: reworks.userId,
+      byName: users.name,
+      createdAt: reworks.createdAt,
+    })
+    .from(reworkDoubts)
+    .innerJoin(reworks, eq(reworks.id, reworkDoubts.reworkId))
+    .innerJoin(units, eq(units.id, reworks.unitId))
+    .innerJoin(checks, eq(checks.id, reworkDoubts.checkId))
+    .leftJoin(users, eq(users.id, reworks.userId))
+    .where(and(eq(checks.projectId, projectId), eq(checks.unitId, unitId)))
+    .orderBy(desc(reworks.arrival));
+}
+
+/** Faults that were seen at the unit's checks. */
+export async function findTravelerFaults(db: Queryable, projectId: string, unitId: string) {
+  return db
+    .select({ checkId: faults.checkId, number: faults.number, title: faults.title, state: faults.state })
+    .from(faults)
+    .where(and(eq(faults.projectId, projectId), eq(faults.unitId, unitId), isNotNull(faults.checkId)))
+    .orderBy(desc(faults.number));
 }
 
 /** What the unit's checks need, here and on other units, with the states these are in. */

@@ -37,6 +37,9 @@ export async function findUnitWithTraveler(db: Queryable, projectId: string, ser
       procedureId: travelers.procedureId,
       number: procedures.number,
       newest,
+      reworks: sql<number>`(select count(*) from reworks where reworks.unit_id = ${units.id})`.mapWith(Number),
+      faults: sql<number>`(select count(*) from faults
+        where faults.unit_id = ${units.id} and faults.state in ('open', 'traced'))`.mapWith(Number),
     })
     .from(units)
     .innerJoin(boards, eq(boards.id, units.boardId))

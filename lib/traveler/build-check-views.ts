@@ -3,7 +3,7 @@ import { evidenceView } from "@/lib/attachment/evidence-view";
 import { checkKind } from "@/lib/check-kinds/list";
 import { findBlockers } from "@/lib/check/find-blockers";
 import { attemptView } from "./attempt-view";
-import { concessionView, decisionView } from "./decision-view";
+import { concessionView, decisionView, doubtView } from "./decision-view";
 import { groupBy } from "./group-by";
 import type { History } from "./load-history";
 import type { BlockerView, CheckView } from "./traveler-view";
@@ -15,11 +15,11 @@ export function buildCheckViews(serial: string, history: History): { live: Check
   const live = history.checks.filter(({ check }) => check.retiredAt === null);
   const retired = history.checks.filter(({ check }) => check.retiredAt !== null);
   const blockers = blockersOf(serial, live, history);
-  const view = checkViewer(history, blockers);
+  const view = checkViewer(serial, history, blockers);
   return { live: live.map(view), retired: retired.map(view) };
 }
 
-function checkViewer(history: History, blockers: ReadonlyMap<string, BlockerView[]>) {
+function checkViewer(serial: string, history: History, blockers: ReadonlyMap<string, BlockerView[]>) {
   const readings = groupBy(history.readings, ({ reading }) => reading.attemptId);
   const evidence = groupBy(history.evidence, (row) => row.attemptId ?? row.checkId);
   const attempts = groupBy(history.attempts, ({ attempt }) => attempt.checkId);
@@ -58,6 +58,10 @@ function checkViewer(history: History, blockers: ReadonlyMap<string, BlockerView
     reopenings: history.reopenings.filter(({ row }) => row.checkId === check.id).map(decisionView),
     concessions: history.concessions.filter(({ row }) => row.checkId === check.id).map(concessionView),
     holdLifts: history.holdLifts.filter(({ row }) => row.checkId === check.id).map(decisionView),
+    doubts: history.doubts.filter((row) => row.checkId === check.id).map((row) => doubtView(row, serial)),
+    faults: history.faults
+      .filter((row) => row.checkId === check.id)
+      .map(({ number, title, state }) => ({ number, title, state })),
     evidence: (evidence.get(check.id) ?? []).map(evidenceView),
   });
 }

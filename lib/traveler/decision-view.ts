@@ -1,6 +1,7 @@
 import type { History } from "./load-history";
+import { nameRework } from "@/lib/rework/rework-words";
 import { personView } from "./person-view";
-import type { ConcessionView, HoldLiftView, ReopeningView } from "./traveler-view";
+import type { CheckDoubtView, ConcessionView, HoldLiftView, ReopeningView } from "./traveler-view";
 
 type Decision = { row: { id: string; userId: string | null; createdAt: Date; reason: string }; byName: string | null };
 
@@ -19,5 +20,17 @@ export function concessionView({ row, byName, withdrawnByName }: History["conces
           reason: row.withdrawnReason ?? "",
         }
       : null,
+  };
+}
+
+/** From the point of view of a unit: a rework of another one is named with its serial. */
+export function doubtView(row: History["doubts"][number], fromSerial: string): CheckDoubtView {
+  const { id, serial, number, origin, reason, userId, byName, createdAt } = row;
+  return {
+    ...{ id, serial, number, reason },
+    rework: serial === fromSerial ? nameRework(row) : `${nameRework(row)} on ${serial}`,
+    isSpared: origin === "spared",
+    by: personView(userId, byName),
+    at: createdAt.toISOString(),
   };
 }

@@ -5,12 +5,12 @@ import { buildCheckViews } from "./build-check-views";
 import { loadHistory } from "./load-history";
 import type { LoadedTraveler } from "./traveler-view";
 
-/** One unit with its traveler and the whole history of every check, in nine queries whatever the size. */
+/** One unit with its traveler and the whole history of every check, in eleven queries whatever the size. */
 export async function loadTraveler(scope: ProjectScope, serial: string): Promise<LoadedTraveler> {
   const db = database();
   const found = await findUnitWithTraveler(db, scope.projectId, serial);
   if (!found) return { kind: "missing" };
-  const { unit, board, revision, position, label, procedureId, number, newest } = found;
+  const { unit, board, revision, position, label, procedureId, number, newest, reworks, faults } = found;
   const head = {
     unit: {
       id: unit.id,
@@ -21,6 +21,8 @@ export async function loadTraveler(scope: ProjectScope, serial: string): Promise
     },
     board,
     revision,
+    reworks,
+    faults,
     slot: position === null ? null : { position, label: label ?? "" },
   };
   if (procedureId === null || number === null) return { kind: "none", unit: { ...head, newestNumber: newest } };

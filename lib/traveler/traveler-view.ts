@@ -1,5 +1,6 @@
 import type { ConnectorGrid } from "@/lib/calc/connector";
 import type { Coverage, Stage } from "@/db/schema/procedures";
+import type { FaultState } from "@/db/schema/faults";
 import type { CheckState, Verdict } from "@/db/schema/travelers";
 import type { AttachmentKind } from "@/db/schema/evidence";
 import type { JudgedReading } from "@/lib/check-kinds/kind";
@@ -51,6 +52,19 @@ export type ConcessionView = {
 };
 export type HoldLiftView = { id: string; by: PersonView; at: string; reason: string };
 
+/** A rework that put the check in doubt, or that spared it. */
+export type CheckDoubtView = {
+  id: string;
+  /** "Bodge wire W3", with the unit when it is another one's. */
+  rework: string;
+  serial: string;
+  number: number;
+  isSpared: boolean;
+  reason: string;
+  by: PersonView;
+  at: string;
+};
+
 /** Another check that this one waits for. */
 export type BlockerView = {
   checkId: string;
@@ -89,6 +103,10 @@ export type CheckView = {
   reopenings: ReopeningView[];
   concessions: ConcessionView[];
   holdLifts: HoldLiftView[];
+  /** Newest first. */
+  doubts: CheckDoubtView[];
+  /** Faults that were seen at it, the newest first. */
+  faults: { number: number; title: string; state: FaultState }[];
   /** Evidence attached to the check but to no attempt. */
   evidence: EvidenceView[];
 };
@@ -105,6 +123,9 @@ export type TravelerView = {
   };
   revision: { id: string; letter: string };
   slot: { position: number; label: string } | null;
+  /** How often it was reworked, and how many faults of it are not mended. */
+  reworks: number;
+  faults: number;
   procedure: { id: string; number: number; newestNumber: number };
   checks: CheckView[];
   /** Checks of earlier procedure versions that were changed or dropped, with their history. */
@@ -112,7 +133,7 @@ export type TravelerView = {
 };
 
 /** A unit that has no traveler yet: newestNumber is the issued procedure it could start with, if there is one. */
-export type UnitWithoutTraveler = Pick<TravelerView, "unit" | "board" | "revision" | "slot"> & {
+export type UnitWithoutTraveler = Pick<TravelerView, "unit" | "board" | "revision" | "slot" | "reworks" | "faults"> & {
   newestNumber: number | null;
 };
 

@@ -1,13 +1,16 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
 import { BoardPlace } from "@/components/board/BoardPlace";
+import { PunchPanel } from "@/components/punch/PunchPanel";
 import { FirstPower } from "@/components/power/FirstPower";
 import { can } from "@/lib/access/permissions";
 import { definePage } from "@/lib/actions/define-page";
 import { loadBoard } from "@/lib/board/load-board";
 import { loadBoardSpares } from "@/lib/board-plan/load-board-spares";
 import { loadFirstPower } from "@/lib/power/load-first-power";
+import { loadPunch } from "@/lib/punch/load-punch";
 import { archiveBoard, createRevision, editBoard, purgeBoard, releaseRevision, restoreBoard } from "../actions";
+import { dealPunch, reopenPunch, takePunch } from "./punch-actions";
 import { offerToCheck } from "./procedure/actions";
 import { archiveUnit, createUnit, editUnit, purgeUnit, restoreUnit } from "../unit-actions";
 
@@ -26,6 +29,7 @@ export default definePage({
       loadFirstPower(scope, code),
     ]);
     if (!board) notFound();
+    const punch = await loadPunch(scope, board.id);
     const open = !scope.archived;
     const editProcedure = open && can(scope.role, "procedure.edit");
     return (
@@ -45,6 +49,17 @@ export default definePage({
             />
           )
         }
+        punchLists={board.revisions.slice(0, -1).map((revision) => (
+          <PunchPanel
+            key={revision.id}
+            project={scope.slug}
+            zone={scope.viewer.timeZone}
+            revision={revision}
+            items={punch[revision.id] ?? []}
+            canEdit={open && !board.archived && can(scope.role, "board.edit")}
+            acts={{ take: takePunch, deal: dealPunch, reopen: reopenPunch }}
+          />
+        ))}
         can={{
           editBoard: open && can(scope.role, "board.edit"),
           editUnits: open && can(scope.role, "unit.edit"),

@@ -56,6 +56,8 @@ export default definePage({
             voidAny: allows("attempt.void-any"),
             prerequisites: allows("prerequisite.edit"),
             move: allows("procedure.edit"),
+            fault: allows("fault.write"),
+            rework: allows("rework.record"),
           },
           acts: {
             reopen: acts.reopenCheck,
