@@ -6,6 +6,7 @@ import { Panel } from "@/components/ui/Panel";
 import type { BoardOrderView } from "@/lib/order/board-order-view";
 import { BoardDrawing } from "./BoardDrawing";
 import type { BoardOrderActs } from "./order-acts";
+import { RiskPanel } from "./RiskPanel";
 import { SaidPanel } from "./SaidPanel";
 import { SayOrderDialog } from "./SayOrderDialog";
 import { StepTable } from "./StepTable";
@@ -37,36 +38,38 @@ export function BoardOrderPlace({ order, project, zone, acts }: Props) {
       title="Order of the boards"
       lede={ledeOf(order)}
       actions={acts && <SayOrderDialog boards={boards} project={project} say={acts.say} />}
-      aside={<SaidPanel said={said} project={project} zone={zone} withdraw={acts?.withdraw ?? null} />}
     >
-      {circle && (
-        <Notice kind="error" title="What is said goes round in a circle">
-          {circle} Withdraw one of it.
-        </Notice>
-      )}
-      {risks.map(({ unproven, proven: other, sentence }) => (
-        <Notice key={`${unproven} ${other}`} kind="caution" title={`${unproven} reaches ${other}`}>
-          {sentence}
-        </Notice>
-      ))}
-      {remarks.map((remark) => (
-        <Notice key={remark} kind="info">
-          {remark}
-        </Notice>
-      ))}
-      {steps.length > 0 && (
-        <Panel title="To be proven" note={`${steps.length}`} padding="none">
-          <StepTable steps={steps} names={names} project={project} />
-        </Panel>
-      )}
-      <Panel title="Who carries, supplies and drives whom">
-        <BoardDrawing drawing={drawing} project={project} />
-      </Panel>
-      {proven.length > 0 && (
-        <p className="text-sm text-ink-soft">
-          Proven, which is to say that all units in the machine hold up to power-on: {proven.join(", ")}.
-        </p>
-      )}
+      <div className="flex min-w-0 flex-col gap-5">
+        {circle && (
+          <Notice kind="error" title="What is said goes round in a circle">
+            {circle} Withdraw one of it.
+          </Notice>
+        )}
+        {remarks.map((remark) => (
+          <Notice key={remark} kind="info">
+            {remark}
+          </Notice>
+        ))}
+        {steps.length > 0 && (
+          <Panel title="To be proven" note={`${steps.length}`} padding="none">
+            <StepTable steps={steps} names={names} project={project} />
+          </Panel>
+        )}
+        <div className="grid grid-cols-1 items-start gap-5 xl:grid-cols-[minmax(0,1fr)_24rem]">
+          <Panel title="What supplies and drives what">
+            <BoardDrawing drawing={drawing} project={project} />
+          </Panel>
+          <div className="flex min-w-0 flex-col gap-5">
+            <SaidPanel said={said} project={project} zone={zone} withdraw={acts?.withdraw ?? null} />
+            <RiskPanel risks={risks} />
+          </div>
+        </div>
+        {proven.length > 0 && (
+          <p className="text-sm text-ink-soft">
+            Proven, which is to say that all their units in the machine hold up to power-on: {proven.join(", ")}.
+          </p>
+        )}
+      </div>
     </Page>
   );
 }
@@ -74,9 +77,7 @@ export function BoardOrderPlace({ order, project, zone, acts }: Props) {
 function ledeOf({ steps, proven }: BoardOrderView): string {
   const [next] = steps;
   if (!next) return "Every board is proven up to power-on.";
-  const done =
-    proven.length === 0
-      ? "No board is proven yet."
-      : `${proven.length} of ${proven.length + steps.length} boards are proven.`;
-  return `Next is ${next.board}. ${next.reason} ${done}`;
+  const all = proven.length + steps.length;
+  const done = proven.length === 0 ? "No board is proven yet." : `${proven.length} of ${all} boards are proven.`;
+  return `Next is ${next.board}. ${done} Nothing unproven should drive or supply something proven.`;
 }

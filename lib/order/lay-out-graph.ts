@@ -9,11 +9,18 @@ export type Drawing = { width: number; height: number; boxes: PlacedBox[]; lines
 
 const MARGIN = 8;
 
-/** Where the boxes of a drawing stand and how its lines run, in layers from left to right; x and y are of the upper left corner. */
-export function layOutGraph(boxes: readonly Box[], lines: readonly Line[]): Drawing {
+type Way = "from left to right" | "from top to bottom";
+
+const WAYS = {
+  "from left to right": { rankdir: "LR", nodesep: 14, ranksep: 56 },
+  "from top to bottom": { rankdir: "TB", nodesep: 28, ranksep: 36 },
+} as const;
+
+/** Where the boxes of a drawing stand and how its lines run, layer by layer; x and y are of the upper left corner. */
+export function layOutGraph(boxes: readonly Box[], lines: readonly Line[], way: Way = "from left to right"): Drawing {
   if (boxes.length === 0) return { width: 0, height: 0, boxes: [], lines: [] };
   const graph = new Graph({ directed: true })
-    .setGraph({ rankdir: "LR", nodesep: 14, ranksep: 56, edgesep: 8, marginx: MARGIN, marginy: MARGIN })
+    .setGraph({ ...WAYS[way], edgesep: 10, marginx: MARGIN, marginy: MARGIN })
     .setDefaultEdgeLabel(() => ({}));
   for (const { id, width, height } of boxes) graph.setNode(id, { width, height });
   for (const { from, to } of lines) graph.setEdge(from, to);

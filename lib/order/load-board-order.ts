@@ -15,10 +15,11 @@ export async function loadBoardOrder(scope: ProjectScope): Promise<BoardOrderVie
   const ordered = orderBoards(input);
   const { links, ...order } = ordered.ok ? ordered.value : NOTHING;
   const numbers = new Map(order.steps.map(({ board }, index) => [board, index + 1]));
-  const arrows = mergeLinks(links);
+  const arrows = withoutEveryCarrier(mergeLinks(links));
   const drawn = layOutGraph(
     boards.map(({ code }) => ({ id: code, ...BOX })),
     arrows,
+    "from top to bottom",
   );
   const names = new Map(boards.map(({ code, name }) => [code, name]));
   const boxes = drawn.boxes.map((box): BoardBox => {
@@ -60,3 +61,9 @@ function mergeLinks(links: readonly BoardLink[]): BoardLink[] {
   }
   return [...pairs.values()];
 }
+
+/** A backplane carries the nets of all: its line is drawn only to boards that no other line reaches. */
+const withoutEveryCarrier = (links: readonly BoardLink[]): BoardLink[] =>
+  links.filter(
+    ({ kind, to }) => kind !== "carries" || !links.some((other) => other.to === to && other.kind !== "carries"),
+  );
