@@ -21,7 +21,7 @@ export function CheckLine({ check, project, reason, before, after }: Props) {
     <Link
       href={benchHref(project, serial, checkId)}
       prefetch={false}
-      className="group grid min-h-14 grid-cols-[2.75rem_1.75rem_minmax(0,1fr)_auto] items-baseline gap-x-2.5 px-4 py-2.5 no-underline hover:bg-raised sm:px-5"
+      className="group grid min-h-14 grid-cols-[2.25rem_1.75rem_minmax(0,1fr)] sm:grid-cols-[2.75rem_1.75rem_minmax(0,1fr)_auto] items-baseline gap-x-2.5 px-4 py-2.5 no-underline hover:bg-raised sm:px-5"
     >
       <span className="mono text-sm text-ink-soft">{before}</span>
       <StateGlyph state={state} size={16} label={state} className="translate-y-0.5" />
@@ -31,7 +31,7 @@ export function CheckLine({ check, project, reason, before, after }: Props) {
           <span className="mono text-xs text-ink">{serial}</span> · {stageName(stage)}. {reason}
         </span>
       </span>
-      <span className="mono text-sm whitespace-nowrap text-ink-soft">{after}</span>
+      <span className="mono text-sm whitespace-nowrap text-ink-soft max-sm:col-start-3">{after}</span>
     </Link>
   );
 }

@@ -2,6 +2,8 @@ import { Graph, layout } from "@dagrejs/dagre";
 
 type Box = { id: string; width: number; height: number };
 type Line = { from: string; to: string };
+/** A line that is `back` runs against the layers and does not decide who stands before whom. */
+type GivenLine = Line & { back?: boolean };
 
 export type PlacedBox = { id: string; x: number; y: number; width: number; height: number };
 export type PlacedLine = Line & { path: string };
@@ -17,24 +19,49 @@ const WAYS = {
 } as const;
 
 /** Where the boxes of a drawing stand and how its lines run, layer by layer; x and y are of the upper left corner. */
-export function layOutGraph(boxes: readonly Box[], lines: readonly Line[], way: Way = "from left to right"): Drawing {
+export function layOutGraph(
+  boxes: readonly Box[],
+  lines: readonly GivenLine[],
+  way: Way = "from left to right",
+): Drawing {
   if (boxes.length === 0) return { width: 0, height: 0, boxes: [], lines: [] };
-  const graph = new Graph({ directed: true })
-    .setGraph({ ...WAYS[way], edgesep: 10, marginx: MARGIN, marginy: MARGIN })
+  const graph = new Graph({ directed: true, multigraph: true })
+    .setGraph({ ...WAYS[way], edgesep: 10 })
     .setDefaultEdgeLabel(() => ({}));
   for (const { id, width, height } of boxes) graph.setNode(id, { width, height });
-  for (const { from, to } of lines) graph.setEdge(from, to);
+  for (const { from, to, back } of lines) {
+    const [first, last] = back ? [to, from] : [from, to];
+    graph.setEdge(first, last, {}, nameOf(from, to));
+  }
   layout(graph);
-  const placed = boxes.map(({ id, width, height }): PlacedBox => {
+  const corners = boxes.map(({ id, width, height }) => {
     const { x = 0, y = 0 } = graph.node(id);
-    return { id, width, height, x: round(x - width / 2), y: round(y - height / 2) };
+    return { id, width, height, x: x - width / 2, y: y - height / 2 };
   });
-  const drawn = lines.map(({ from, to }): PlacedLine => {
-    return { from, to, path: smooth(graph.edge(from, to)?.points ?? []) };
+  const ways = lines.map(({ from, to, back }) => {
+    const points = graph.edge(back ? to : from, back ? from : to, nameOf(from, to))?.points ?? [];
+    return { from, to, points: back ? [...points].reverse() : points };
   });
-  const { width = 0, height = 0 } = graph.graph();
-  return { width: Math.ceil(width), height: Math.ceil(height), boxes: placed, lines: drawn };
+  // Bends may lie beyond what the layout takes for its width.
+  const ends = corners.flatMap(({ x, y, width, height }) => [
+    { x, y },
+    { x: x + width, y: y + height },
+  ]);
+  const all = [...ends, ...ways.flatMap(({ points }) => points)];
+  const [left, top] = [Math.min(...all.map(({ x }) => x)) - MARGIN, Math.min(...all.map(({ y }) => y)) - MARGIN];
+  const moved = ({ x, y }: Point) => ({ x: x - left, y: y - top });
+  return {
+    width: Math.ceil(Math.max(...all.map(({ x }) => x)) - left + MARGIN),
+    height: Math.ceil(Math.max(...all.map(({ y }) => y)) - top + MARGIN),
+    boxes: corners.map((box): PlacedBox => {
+      const { x, y } = moved(box);
+      return { ...box, x: round(x), y: round(y) };
+    }),
+    lines: ways.map(({ from, to, points }): PlacedLine => ({ from, to, path: smooth(points.map(moved)) })),
+  };
 }
+
+const nameOf = (from: string, to: string) => `${from} to ${to}`;
 
 type Point = { x: number; y: number };
 

@@ -15,10 +15,12 @@ export async function loadBoardOrder(scope: ProjectScope): Promise<BoardOrderVie
   const ordered = orderBoards(input);
   const { links, ...order } = ordered.ok ? ordered.value : NOTHING;
   const numbers = new Map(order.steps.map(({ board }, index) => [board, index + 1]));
+  // Proven boards stand before all that are not; among themselves the lines decide.
+  const place = (code: string) => numbers.get(code) ?? 0;
   const arrows = withoutEveryCarrier(mergeLinks(links));
   const drawn = layOutGraph(
     boards.map(({ code }) => ({ id: code, ...BOX })),
-    arrows,
+    arrows.map(({ from, to }) => ({ from, to, back: place(to) < place(from) })),
     "from top to bottom",
   );
   const names = new Map(boards.map(({ code, name }) => [code, name]));

@@ -25,6 +25,21 @@ describe("the drawing of an order", () => {
     expect(new Set(xs).size).toBe(3);
   });
 
+  it("lets a line back run beside the one forth without turning the order round", () => {
+    const { boxes, lines } = layOutGraph(
+      [box("B"), box("A")],
+      [
+        { from: "B", to: "A", back: true },
+        { from: "A", to: "B" },
+      ],
+    );
+    const [b, a] = boxes;
+    expect(a?.x).toBeLessThan(b?.x ?? 0);
+    const startOf = (path: string) => Number(/^M(-?[\d.]+)/.exec(path)?.[1]);
+    const [back, forth] = lines.map(({ path }) => startOf(path));
+    expect(back).toBeGreaterThan(forth ?? Infinity);
+  });
+
   it("lays no box over another, keeps all inside, and draws every line, also where they go in a circle", () => {
     fc.assert(
       fc.property(graphs, ({ boxes, lines }) => {
