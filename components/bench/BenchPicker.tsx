@@ -1,4 +1,5 @@
 import Link from "next/link";
+import type { ReactNode } from "react";
 import { Page } from "@/components/shell/Page";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { StageStrip } from "@/components/ui/glyphs/StageStrip";
@@ -9,14 +10,14 @@ import type { BenchUnit, BenchView } from "@/lib/traveler/load-bench";
 import type { Stage } from "@/db/schema/procedures";
 import { STAGES, stageName } from "@/lib/procedure/stages";
 
-type Props = { project: string; bench: BenchView };
+type Props = { project: string; bench: BenchView; session: ReactNode };
 
 /** Which unit to lay on the bench: what is next over the whole machine first, then every unit with what waits on it. */
-export function BenchPicker({ project, bench }: Props) {
+export function BenchPicker({ project, bench, session }: Props) {
   const room = STAGES.map(({ id }) => Math.max(0, ...bench.units.map((unit) => statesOf(unit, id).length)));
   const free = bench.units.filter((unit) => unit.next).length;
   return (
-    <Page title="Bench" lede={ledeOf(bench, free)}>
+    <Page title="Bench" lede={ledeOf(bench, free)} actions={session}>
       {bench.units.length === 0 ? (
         <EmptyState
           title="No unit to lay on the bench"

@@ -7,7 +7,7 @@ type GivenLine = Line & { back?: boolean };
 
 export type PlacedBox = { id: string; x: number; y: number; width: number; height: number };
 export type PlacedLine = Line & { path: string };
-export type Drawing = { width: number; height: number; boxes: PlacedBox[]; lines: PlacedLine[] };
+type Drawing = { width: number; height: number; boxes: PlacedBox[]; lines: PlacedLine[] };
 
 const MARGIN = 8;
 

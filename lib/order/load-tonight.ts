@@ -11,7 +11,7 @@ import { sayForecast } from "@/lib/forecast/say-forecast";
 import { readEvening } from "./read-evening";
 import type { CheckName, NowLine, PlannedLine, TonightView } from "./tonight-view";
 
-export type Asked = { time: string; builders: 1 | 2 };
+type Asked = { time: string; builders: 1 | 2 };
 
 const MOST_NOW = 12;
 

@@ -1,5 +1,5 @@
 import type { Queryable } from "@/db/client";
-import { findBoardOrders, findBoardsToOrder, findProvenSerials, type BoardOrderRow } from "@/db/queries/order";
+import { findBoardOrders, findBoardsToOrder, findProvenSerials } from "@/db/queries/order";
 import type { BoardOrderInput } from "@/lib/calc/sequence";
 import { readMachine } from "@/lib/machine/load-machine";
 import { overrideOf } from "./overrides";
@@ -28,5 +28,3 @@ export async function readBoardOrder(db: Queryable, scope: InProject) {
   };
   return { input, said, boards };
 }
-
-export type Said = BoardOrderRow;

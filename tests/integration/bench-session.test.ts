@@ -3,6 +3,7 @@ import { eq } from "drizzle-orm";
 import { describe, expect, it } from "vitest";
 import { benchSessions } from "@/db/schema/order";
 import type { ProjectScope } from "@/lib/access/scope";
+import { isAtBench } from "@/lib/bench-session/is-at-bench";
 import { loadBenchSessions } from "@/lib/bench-session/load-bench-sessions";
 import { startBenchSession } from "@/lib/bench-session/start-bench-session";
 import { stopBenchSession } from "@/lib/bench-session/stop-bench-session";
@@ -42,10 +43,11 @@ async function bench() {
 
 describe("a session at the bench", () => {
   it("begins and ends by hand, once", async () => {
-    const { builder, kept } = await bench();
+    const { builder, maintainer, kept } = await bench();
     await must(startBenchSession(builder, fresh(builder)));
     expect(await refusal(startBenchSession(builder, fresh(builder)))).toMatchObject({ code: "conflict" });
     expect((await loadBenchSessions(builder)).running).not.toBeNull();
+    expect([await isAtBench(builder), await isAtBench(maintainer)]).toEqual([true, false]);
     expect(await must(stopBenchSession(builder, fresh(builder)))).toMatchObject({ endedBefore: false });
     expect(await refusal(stopBenchSession(builder, fresh(builder)))).toMatchObject({ code: "conflict" });
     expect(await kept()).toHaveLength(1);
@@ -72,6 +74,7 @@ describe("a session at the bench", () => {
     await record("One", 270);
     await record("Two", 240);
     expect((await loadBenchSessions(builder)).running).toBeNull();
+    expect(await isAtBench(builder)).toBe(false);
     await must(startBenchSession(builder, fresh(builder)));
     const [old] = (await kept()).filter(({ endedAt }) => endedAt !== null);
     expect(((old?.endedAt?.getTime() ?? 0) - (old?.startedAt.getTime() ?? 0)) / MINUTE).toBeCloseTo(60, 0);
