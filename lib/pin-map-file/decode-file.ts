@@ -11,11 +11,11 @@ const CONTROLS = /[\u0000-\u0008\u000b\u000c\u000e-\u001f]/;
  * Reads UTF-8, UTF-16 (with its mark or known by its empty bytes) and, where the bytes are not UTF-8, the Western
  * single-byte code that spreadsheets of the last century write (Windows-1252, of which Latin-1 is a part).
  */
-export function decodeFile(bytes: Uint8Array): Decoded {
-  if (bytes.length > MOST_BYTES) {
+export function decodeFile(bytes: Uint8Array, most = MOST_BYTES): Decoded {
+  if (bytes.length > most) {
     return {
       ok: false,
-      sentence: `The file has more than ${MOST_BYTES / 1e6} MB. A pin map of 10,000 rows has about 1 MB.`,
+      sentence: `The file has more than ${most / 1e6} MB.${most === MOST_BYTES ? " A pin map of 10,000 rows has about 1 MB." : ""}`,
     };
   }
   if (bytes.length === 0) return { ok: false, sentence: "The file is empty." };

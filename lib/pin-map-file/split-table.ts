@@ -17,7 +17,7 @@ export const MOST_TABLE_ROWS = 10_000;
  * lines, separators after the last cell, quotes that are doubled, open or out of place. Apostrophes that keep a cell
  * from being taken for a formula are taken off again.
  */
-export function splitTable(text: string, delimiter?: Delimiter): SplitTable {
+export function splitTable(text: string, delimiter?: Delimiter, most = MOST_TABLE_ROWS): SplitTable {
   const plain = text.replace(/^\ufeff/, "").replace(/\r\n?/g, "\n");
   const chosen = delimiter ?? guessDelimiter(plain);
   const rows: TableRow[] = [];
@@ -42,10 +42,10 @@ export function splitTable(text: string, delimiter?: Delimiter): SplitTable {
     };
   }
   if (rows.length === 0) return { ok: false, sentence: "There is no row in this file." };
-  if (rows.length > MOST_TABLE_ROWS + 1) {
+  if (rows.length > most + 1) {
     return {
       ok: false,
-      sentence: `The file has ${rows.length.toLocaleString("en-GB")} rows; at most ${MOST_TABLE_ROWS.toLocaleString("en-GB")} are taken at once. Split it by board.`,
+      sentence: `The file has ${rows.length.toLocaleString("en-GB")} rows; at most ${most.toLocaleString("en-GB")} are taken at once. Split it by board.`,
     };
   }
   return { ok: true, table: { delimiter: chosen, rows } };

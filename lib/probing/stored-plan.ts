@@ -1,0 +1,9 @@
+import type { Probe } from "@/lib/calc/continuity";
+import type { PlanFigures } from "./round-view";
+import type { RoundOptions } from "./schema";
+
+export type StoredOptions = { asked: RoundOptions; figures: PlanFigures };
+
+/** What startRound() wrote: the same types by construction, and the columns are never changed. */
+export const storedOptions = (options: unknown): StoredOptions => options as StoredOptions;
+export const storedProbes = (probes: unknown): Probe[] => probes as Probe[];
