@@ -3,11 +3,20 @@ import type { Wire } from "@/db/schema/faults";
 
 export type WireLine = { id: string; number: number; wire: Wire; what: string; why: string };
 
-/** The wires of the list by their number: W2 before W10. */
-export const wiresOf = (reworks: readonly ReworkView[]): WireLine[] =>
-  reworks
-    .flatMap(({ id, number, wire, what, why }) => (wire ? [{ id, number, wire, what, why }] : []))
+/**
+ * The wires that are in, by their number: W2 before W10. Of several reworks of one wire the newest says how it runs, and
+ * whether it is still there. Newest first, as they are loaded.
+ */
+export function wiresOf(reworks: readonly ReworkView[]): WireLine[] {
+  const newest = new Map<string, WireLine>();
+  for (const { id, number, wire, what, why } of reworks) {
+    const name = wire?.number.trim().toUpperCase();
+    if (wire && name !== undefined && !newest.has(name)) newest.set(name, { id, number, wire, what, why });
+  }
+  return [...newest.values()]
+    .filter(({ wire }) => !wire.out)
     .sort((a, b) => a.wire.number.localeCompare(b.wire.number, "en", { numeric: true }));
+}
 
 /** Which wire runs from where to where, in which colour and why. */
 export function WireTable({ wires }: { wires: readonly WireLine[] }) {

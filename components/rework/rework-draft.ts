@@ -3,7 +3,7 @@ import type { ReworkForm } from "@/lib/rework/load-rework-form";
 import type { Touches } from "@/lib/rework/schema";
 
 export type Choice = { checkId: string; reason: string };
-type WireDraft = { number: string; from: string; to: string; colour: string };
+type WireDraft = { number: string; from: string; to: string; colour: string; out: boolean };
 
 /** The form as it is typed. The wire stays when another kind is tried, and goes along only with a bodge wire. */
 export type ReworkDraft = {
@@ -24,7 +24,7 @@ export function freshRework({ start, nextWire }: ReworkForm): ReworkDraft {
   return {
     ...{ kind, what, why, touches },
     // On another unit the same wire may have another number.
-    wire: { from: "", to: "", colour: "", ...start.wire, number: nextWire },
+    wire: { from: "", to: "", colour: "", out: false, ...start.wire, number: nextWire },
     faultId: faultId ?? "",
     performedAt: "",
     added: [],

@@ -1,4 +1,4 @@
-import { and, asc, eq, isNull, lt, ne } from "drizzle-orm";
+import { and, asc, eq, isNull, ne, sql } from "drizzle-orm";
 import type { Queryable, Transaction } from "@/db/client";
 import { boards, revisions, units } from "@/db/schema/boards";
 import { faults, punchItems, reworks } from "@/db/schema/faults";
@@ -7,11 +7,15 @@ import { procedureChecks } from "@/db/schema/procedures";
 import { checks, concessions } from "@/db/schema/travelers";
 
 type InProject = { projectId: string };
-type Revision = { boardId: string; createdAt: Date };
+type Revision = { boardId: string; letter: string };
 
-/** Units of the board made from an earlier revision; archived ones, too: what they taught stays true. */
-const ofEarlier = (scope: InProject, { boardId, createdAt }: Revision) =>
-  and(eq(units.projectId, scope.projectId), eq(units.boardId, boardId), lt(revisions.createdAt, createdAt));
+/** Units of the board made from an earlier revision (Z comes before AA); archived ones, too: what they taught stays true. */
+const ofEarlier = (scope: InProject, { boardId, letter }: Revision) =>
+  and(
+    eq(units.projectId, scope.projectId),
+    eq(units.boardId, boardId),
+    sql`(length(${revisions.letter}), ${revisions.letter}) < (length(${letter}), ${letter})`,
+  );
 
 /** Faults of earlier revisions that say what the next one should change. */
 export async function findFaultsToChange(db: Queryable, scope: InProject, revision: Revision) {

@@ -45,7 +45,8 @@ export const faults = pgTable(
 );
 
 export type ReworkKind = "bodge-wire" | "cut-track" | "part-swap" | "reflow" | "firmware" | "connector";
-export type Wire = { number: string; from: string; to: string; colour: string };
+/** out: the wire was taken out again. */
+export type Wire = { number: string; from: string; to: string; colour: string; out: boolean };
 
 /** A physical change to a unit. Never changed or deleted: taking a wire out again is another rework. */
 export const reworks = pgTable(

@@ -11,6 +11,7 @@ import { granted } from "./tide/granted";
 import { PROJECT } from "./tide/machine";
 import { storyHappenings, type Cast } from "./tide/tell-story";
 import { uploadPicture, uploadRipple, type Upload } from "./tide/upload-picture";
+import { faultHappenings } from "./tide/write-faults";
 import { machineHappenings } from "./tide/write-machine";
 import { partsHappenings } from "./tide/write-parts";
 import { powerHappenings } from "./tide/write-power";
@@ -44,6 +45,7 @@ async function seed(db: Database, now: Date): Promise<void> {
     ...partsHappenings(db, scope, now),
     ...powerHappenings(db, scope, now),
     ...storyHappenings(db, cast, now, upload),
+    ...faultHappenings(db, cast, now, upload),
     ...logHappenings(cast, now),
   ]);
 

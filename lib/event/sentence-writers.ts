@@ -352,7 +352,7 @@ export const WRITERS: { [Kind in EventKind]: Writer<Kind> } = {
     " of ",
     unit(serial),
     `${fault === null ? "" : ` for F${fault}`}: ${what}. `,
-    doubtful === 0 ? "It puts nothing in doubt" : `It puts ${count(doubtful, "check")} in doubt`,
+    doubtful === 0 ? "It puts no further check in doubt" : `It puts ${count(doubtful, "check")} in doubt`,
     spared === 0 ? "." : `; ${count(spared, "check")} spared.`,
   ],
   "netlist.kept": ({ code, letter, number, nets }, { who, netlists }) => [

@@ -19,7 +19,7 @@ export async function takePunch(scope: ProjectScope, input: TakePunchInput): Pro
     const found = await findRevision(tx, scope, input.revisionId);
     if (!found) return reject("not-found", "There is no such revision in this project.");
     const { revision, board } = found;
-    const rows = await itemsFor(tx, scope, { boardId: board.id, createdAt: revision.createdAt });
+    const rows = await itemsFor(tx, scope, { boardId: board.id, letter: revision.letter });
     const taken =
       rows.length === 0
         ? []
@@ -42,7 +42,7 @@ type Item = Pick<typeof punchItems.$inferInsert, "source" | "sourceId" | "unitId
 async function itemsFor(
   tx: Transaction,
   scope: ProjectScope,
-  revision: { boardId: string; createdAt: Date },
+  revision: { boardId: string; letter: string },
 ): Promise<Item[]> {
   const found = await findFaultsToChange(tx, scope, revision);
   const conceded = await findStandingConcessions(tx, scope, revision);

@@ -50,6 +50,6 @@ function workKey({ kind, wire, touches }: ComparedRework): string {
       .replace(/[\s.:/-]+/g, " ")
       .trim()
       .toUpperCase();
-  if (wire) return `${kind}|${[plain(wire.from), plain(wire.to)].sort().join("|")}`;
+  if (wire) return `${kind}|${wire.out}|${[plain(wire.from), plain(wire.to)].sort().join("|")}`;
   return `${kind}|${touches.map(plain).sort().join("|")}`;
 }

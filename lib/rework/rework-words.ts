@@ -17,11 +17,13 @@ export const TOUCH_LABELS: Record<TouchKind, string> = {
   rail: "Rails",
 };
 
-type Named = { kind: ReworkKind; number: number; wire: Pick<Wire, "number"> | null };
+type Named = { kind: ReworkKind; number: number; wire: Pick<Wire, "number" | "out"> | null };
 
-/** "Bodge wire W3"; what has no wire number of its own goes by its rework number: "Cut track, R2". */
-export const nameRework = ({ kind, number, wire }: Named): string =>
-  wire ? `${KIND_LABELS[kind]} ${wire.number}` : `${KIND_LABELS[kind]}, R${number}`;
+/** "Bodge wire W3", "Wire W3 taken out"; without a wire it goes by its rework number: "Cut track, R2". */
+export function nameRework({ kind, number, wire }: Named): string {
+  if (!wire) return `${KIND_LABELS[kind]}, R${number}`;
+  return wire.out ? `Wire ${wire.number} taken out` : `${KIND_LABELS[kind]} ${wire.number}`;
+}
 
 /** "U6-12 to U9-3, white". */
 export const wireWords = ({ from, to, colour }: Wire): string =>

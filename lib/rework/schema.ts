@@ -33,6 +33,7 @@ const wire = z.object({
   from: line(REWORK_LIMITS.name, "Say where the wire begins, such as U6-12."),
   to: line(REWORK_LIMITS.name, "Say where the wire ends, such as U9-3."),
   colour: optionalLine(30),
+  out: z.boolean(),
 });
 
 const doubtFields = {

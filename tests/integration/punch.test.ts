@@ -27,7 +27,7 @@ async function taught() {
   );
   await state(builder, shop.unit, "Rise time of CLK", fails);
   await must(concede(maintainer, shop.check.id, "Slow enough for 1 MHz."));
-  const wire = { number: "W3", from: "U6-12", to: "U9-3", colour: "white" };
+  const wire = { number: "W3", from: "U6-12", to: "U9-3", colour: "white", out: false };
   await must(rework(builder, shop.unit, { kind: "bodge-wire", wire, what: "PH7 by wire", signals: ["PH7"] }));
   await must(createRevision(maintainer, { ...write(shop.slug), boardId: shop.board.id, notes: "" }));
   const next = one(

@@ -67,7 +67,7 @@ describe("a rework that touches PH7", () => {
   it("puts exactly those in doubt, tells it once, and repeating the write changes nothing", async () => {
     const { builder, unit, project } = it1;
     const writeId = randomUUID();
-    const wire = { number: "W3", from: "U6-12", to: "U9-3", colour: "white" };
+    const wire = { number: "W3", from: "U6-12", to: "U9-3", colour: "white", out: false };
     const given = { kind: "bodge-wire", signals: ["PH7"], wire, writeId };
     const seen = (await preview(builder, unit, given)).doubtful.map(({ checkId }) => checkId);
     const first = await must(rework(builder, unit, { ...given, seen }));
@@ -196,7 +196,7 @@ describe("a rework and other units", () => {
     const { builder, maintainer, unit, board } = await card();
     const second = await makeUnit(maintainer, board, "CON-02");
     for (const { title } of CHECKS) await state(builder, second, title, conforms);
-    const wire = { number: "W1", from: "U6-12", to: "U9-3", colour: "white" };
+    const wire = { number: "W1", from: "U6-12", to: "U9-3", colour: "white", out: false };
     const first = await must(rework(builder, unit, { kind: "bodge-wire", wire, signals: ["PH7"] }));
     await must(rework(builder, unit, { rails: ["GND"] }));
     const form = await loadReworkForm(builder, { serial: second.serial, fault: undefined, from: first.id });
@@ -215,7 +215,7 @@ describe("a rework and other units", () => {
 describe("a wire", () => {
   it("touches the pins that it joins, whether they are named besides or not", async () => {
     const { builder, unit } = await card();
-    const wire = { number: "W1", from: "J1 a14", to: "the via beside C4", colour: "" };
+    const wire = { number: "W1", from: "J1 a14", to: "the via beside C4", colour: "", out: false };
     const { id } = await must(rework(builder, unit, { kind: "bodge-wire", wire }));
     const named = await db.select().from(reworkTouches).where(eq(reworkTouches.reworkId, id));
     expect(named.map(({ kind, name }) => `${kind} ${name}`)).toEqual(["pin J1 a14"]);

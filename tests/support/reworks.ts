@@ -9,7 +9,7 @@ type Given = {
   kind?: string;
   what?: string;
   why?: string;
-  wire?: { number: string; from: string; to: string; colour: string } | null;
+  wire?: { number: string; from: string; to: string; colour: string; out: boolean } | null;
   signals?: string[];
   pins?: string[];
   parts?: string[];

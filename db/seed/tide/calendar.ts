@@ -33,6 +33,12 @@ const DATED = [
   ["blocks", "created_at"],
   ["blocks", "changed_at"],
   ["board_plans", "created_at"],
+  ["faults", "created_at"],
+  ["faults", "closed_at"],
+  ["reworks", "performed_at"],
+  ["reworks", "created_at"],
+  ["punch_items", "created_at"],
+  ["punch_items", "dealt_at"],
 ] as const;
 
 /** One thing that happens in the story, and when. */

@@ -121,7 +121,7 @@ export const UNITS: DemoUnit[] = [
     serial: "CON-01",
     board: "CON",
     letter: "A",
-    note: "Constituent M2. Wire W3 from U6-12 to U9-3, white.",
+    note: "Constituent M2.",
     daysAgo: 52,
   },
   { serial: "CON-02", board: "CON", letter: "A", note: "Constituent S2.", daysAgo: 41 },

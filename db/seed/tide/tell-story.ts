@@ -122,7 +122,8 @@ function limitsOf(spec: unknown) {
   return table.success ? table.data.rows : [readingSpec.parse(spec)];
 }
 
-async function linesOf(db: Database, scope: ProjectScope, serial: string): Promise<Map<string, Line>> {
+/** The checks of a unit by the names that the story has for them. */
+export async function linesOf(db: Database, scope: ProjectScope, serial: string): Promise<Map<string, Line>> {
   const unit = UNITS.find((one) => one.serial === serial);
   const board = BOARDS.find((one) => one.code === unit?.board);
   const rows = await db

@@ -49,7 +49,7 @@ export default definePage({
             />
           )
         }
-        punchLists={board.revisions.slice(0, -1).map((revision) => (
+        punchLists={laterRevisions(board.revisions).map((revision) => (
           <PunchPanel
             key={revision.id}
             project={scope.slug}
@@ -79,3 +79,9 @@ export default definePage({
     );
   },
 });
+
+/** All but the first, which has nothing to take over. */
+function laterRevisions<Revision extends { letter: string }>(revisions: readonly Revision[]): Revision[] {
+  const [first] = revisions.map(({ letter }) => letter).sort((a, b) => a.length - b.length || (a < b ? -1 : 1));
+  return revisions.filter(({ letter }) => letter !== first);
+}
