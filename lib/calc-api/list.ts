@@ -1,4 +1,5 @@
 import { conformity } from "./conformity";
+import { continuity } from "./continuity";
 import type { Calculation } from "./define-calculation";
 import { delay } from "./delay";
 import { forecast } from "./forecast";
@@ -18,6 +19,7 @@ export const CALCULATIONS: readonly Calculation[] = [
   packing,
   delay,
   conformity,
+  continuity,
   sequence,
   forecast,
 ];

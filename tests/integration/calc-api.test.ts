@@ -239,3 +239,29 @@ describe("the order and the forecast", () => {
     expect(early.json.result.kind).toBe("not enough history");
   });
 });
+
+describe("the probe plan", () => {
+  const net = (name: string, ...pins: string[]) => ({ name, points: pins.map((pin) => ({ part: "U1", pin })) });
+
+  test("probes n points of a net with n − 1 pairs, and finds the one that does not beep", async () => {
+    const nets = [net("CLK", "1", "2", "3"), net("GND", "7", "8")];
+    const plan = (await send("continuity", { nets })).json.result;
+    expect(plan.counts).toMatchObject({ nets: 2, points: 5, continuity: 3 });
+    expect(plan.report).toBeNull();
+    const results = plan.probes.map(({ id, kind }: { id: number; kind: string }) => ({
+      probe: id,
+      beeps: kind === "continuity" && id !== 0,
+    }));
+    const { report } = (await send("continuity", { nets, results })).json.result;
+    expect(report.findings).toMatchObject([{ kind: "open", nets: [plan.probes[0].from.net] }]);
+  });
+
+  test("names what cannot be planned by its path", async () => {
+    const refused = async (input: object) => JSON.stringify((await send("continuity", input)).json);
+    expect(await refused({ nets: [net("CLK", "1", "1")] })).toContain("nets.0.points.1");
+    expect(await refused({})).toContain("Give at least one net");
+    expect(await refused({ ipcD356: "nothing of the kind" })).toContain("No net could be read");
+    const results = [{ probe: 99, beeps: true }];
+    expect(await refused({ nets: [net("CLK", "1", "2")], results })).toContain("There is no probe 99");
+  });
+});
