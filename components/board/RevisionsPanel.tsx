@@ -1,5 +1,6 @@
 "use client";
 
+import Link from "next/link";
 import { useRef } from "react";
 import { Badge } from "@/components/ui/Badge";
 import { Button } from "@/components/ui/Button";
@@ -70,6 +71,12 @@ export function RevisionsPanel({ project, zone, board, canEdit, acts }: Props) {
           </li>
         ))}
       </ul>
+      <Link
+        href={`/projects/${project}/boards/${encodeURIComponent(board.code)}/netlists`}
+        className="link mt-3 inline-block text-sm font-semibold"
+      >
+        Netlists of the revisions
+      </Link>
     </Panel>
   );
 }

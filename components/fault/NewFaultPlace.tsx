@@ -26,7 +26,7 @@ type Props = { project: string; view: NewFaultView; acts: Pick<FaultActs, "open"
 export function NewFaultPlace({ project, view, acts }: Props) {
   const router = useRouter();
   const writeId = useRef(crypto.randomUUID());
-  const { check, attemptId } = view;
+  const { check, attemptId, probePlanId } = view;
   const defaults: Fields = {
     ...{ unit: view.unit, title: view.title, symptom: view.symptom, signals: view.signals, pins: view.pins },
     ...{ suspected: "", tried: "", cause: "", mend: "", lesson: "", nextRevision: "", hours: "", state: "open" },
@@ -49,7 +49,8 @@ export function NewFaultPlace({ project, view, acts }: Props) {
           const isSame = values.unit === view.unit;
           return acts.open({
             ...values,
-            ...{ project, writeId: writeId.current, probePlanId: null },
+            ...{ project, writeId: writeId.current },
+            probePlanId: isSame ? probePlanId : null,
             checkId: isSame ? (check?.id ?? null) : null,
             attemptId: isSame ? attemptId : null,
           });

@@ -6,6 +6,7 @@ import { Panel } from "@/components/ui/Panel";
 import { counted } from "@/components/workshop/counted";
 import type { RoundPage } from "@/lib/probing/load-round-page";
 import { AnswersPanel } from "./AnswersPanel";
+import { AskAgain, type AskAct } from "./AskAgain";
 import { CloseRound, type CloseAct } from "./CloseRound";
 import { FindingList } from "./FindingList";
 import { PlanFigures } from "./PlanFigures";
@@ -14,11 +15,11 @@ type Props = RoundPage & {
   project: string;
   zone: string;
   may: { probe: boolean; fault: boolean };
-  close: CloseAct;
+  acts: { ask: AskAct; close: CloseAct };
 };
 
 /** One round: what it found so far, every answer, and its end. */
-export function RoundPlace({ project, zone, may, close, ...page }: Props) {
+export function RoundPlace({ project, zone, may, acts, ...page }: Props) {
   const { round, report, said } = page;
   const { unit, board, netlist, about, startedAt, closedAt } = round;
   const isOpen = closedAt === null;
@@ -46,7 +47,7 @@ export function RoundPlace({ project, zone, may, close, ...page }: Props) {
       }
       aside={
         <>
-          {isOpen && may.probe && <CloseRound page={page} project={project} close={close} />}
+          {isOpen && may.probe && <CloseRound page={page} project={project} close={acts.close} />}
           {closedAt && (
             <Notice
               kind="info"
@@ -64,6 +65,9 @@ export function RoundPlace({ project, zone, may, close, ...page }: Props) {
         </>
       }
     >
+      {isOpen && may.probe && page.followUps > 0 && (
+        <AskAgain project={project} plan={round.id} count={page.followUps} ask={acts.ask} />
+      )}
       <Panel title="What it comes to" note={said}>
         {report.findings.length === 0 ? (
           <p className="text-[0.9375rem] text-ink-soft">

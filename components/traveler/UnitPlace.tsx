@@ -64,6 +64,9 @@ export function UnitPlace({ unit, traveler, move, openCheck, revisions, canEditU
               trigger={<Button>Change the unit</Button>}
             />
           )}
+          <ButtonLink href={`${self}/probing`} prefetch={false}>
+            Probing
+          </ButtonLink>
           {traveler && (
             <ButtonLink href={`${self}/print`} prefetch={false}>
               Print the sheet

@@ -1,6 +1,7 @@
 import { and, asc, eq, isNull } from "drizzle-orm";
 import { database } from "@/db/client";
 import { boards, units } from "@/db/schema/boards";
+import { probePlans } from "@/db/schema/netlists";
 import { procedureChecks } from "@/db/schema/procedures";
 import { checks } from "@/db/schema/travelers";
 import type { ProjectScope } from "@/lib/access/scope";
@@ -13,6 +14,8 @@ export type NewFaultView = {
   /** The check that it was seen at, when it is of the unit. */
   check: { id: string; title: string } | null;
   attemptId: string | null;
+  /** The round of probing that found it, when it is of the unit. */
+  probePlanId: string | null;
   /** What can be written before anybody types. */
   title: string;
   symptom: string;
@@ -24,10 +27,13 @@ export type NewFaultView = {
 const NO_NAMES: BoardNames = { signals: [], pins: [], parts: [], blocks: [], rails: [] };
 const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i;
 
+/** What a round of probing found, as its link says it; a person reads it over before it is kept. */
+type Found = { title: string; symptom: string; signals: string[]; pins: string[] };
+
 /** A fresh record, filled in from the unit and the failing check that it begins with. */
 export async function loadNewFault(
   scope: ProjectScope,
-  wanted: { unit: string; check: string },
+  wanted: { unit: string; check: string; plan?: string; found?: Found },
 ): Promise<NewFaultView> {
   const db = database();
   const rows = await db
@@ -37,21 +43,37 @@ export async function loadNewFault(
     .where(and(eq(units.projectId, scope.projectId), isNull(units.archivedAt)))
     .orderBy(asc(units.serial));
   const unit = rows.find(({ serial }) => serial === wanted.unit);
-  const [names, seen] = await Promise.all([
+  const plan = wanted.plan ?? "";
+  const [names, seen, round] = await Promise.all([
     unit ? loadBoardNames(scope, { id: unit.boardId, code: unit.code }) : NO_NAMES,
     unit && UUID.test(wanted.check) ? seenAt(scope, unit.id, wanted.check) : undefined,
+    unit && UUID.test(plan) ? probedIn(scope, unit.id, plan) : undefined,
   ]);
+  const found = round && wanted.found;
   return {
     units: rows.map(({ serial, board }) => ({ serial, board })),
     unit: unit?.serial ?? "",
     check: seen ? { id: seen.check.id, title: seen.check.title } : null,
     attemptId: seen?.attempt?.id ?? null,
-    title: seen ? `${seen.check.title}: does not conform` : "",
-    symptom: seen?.attempt ? [seen.attempt.summary, seen.attempt.note].filter(Boolean).join(". ") : "",
-    signals: seen?.check.covers.signals ?? [],
-    pins: seen?.check.covers.pins ?? [],
+    probePlanId: round?.id ?? null,
+    title: found?.title ?? (seen ? `${seen.check.title}: does not conform` : ""),
+    symptom: found
+      ? found.symptom
+      : seen?.attempt
+        ? [seen.attempt.summary, seen.attempt.note].filter(Boolean).join(". ")
+        : "",
+    signals: found?.signals ?? seen?.check.covers.signals ?? [],
+    pins: found?.pins ?? seen?.check.covers.pins ?? [],
     names,
   };
+}
+
+async function probedIn(scope: ProjectScope, unitId: string, planId: string) {
+  const [round] = await database()
+    .select({ id: probePlans.id })
+    .from(probePlans)
+    .where(and(eq(probePlans.projectId, scope.projectId), eq(probePlans.unitId, unitId), eq(probePlans.id, planId)));
+  return round;
 }
 
 async function seenAt(scope: ProjectScope, unitId: string, checkId: string) {

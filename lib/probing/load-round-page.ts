@@ -10,6 +10,8 @@ import { provesUnit, sumUp } from "./sum-up";
 export type RoundPage = {
   round: RoundView;
   report: ContinuityReport;
+  /** Probes that the answers call for and that are not in the round yet. */
+  followUps: number;
   said: string;
   conforms: boolean;
   checks: { id: string; title: string }[];
@@ -24,10 +26,10 @@ export async function loadRoundPage(scope: ProjectScope, id: string): Promise<Ro
     findProbedUnit(db, scope, round.unit.serial),
   ]);
   if (!reported || !unit) return undefined;
-  const { report } = reported;
+  const { report, followUps } = reported;
   const checks = await findContinuityChecks(db, scope, unit.id);
   return {
-    ...{ round, report },
+    ...{ round, report, followUps },
     said: sumUp(report),
     conforms: provesUnit(report),
     checks: checks.map(({ id: checkId, title }) => ({ id: checkId, title })),

@@ -100,3 +100,6 @@ export const closeRoundInput = z.object({
   note: optionalLines(1000),
 });
 export type CloseRoundInput = z.output<typeof closeRoundInput>;
+
+export const askAgainInput = z.object({ project: z.string(), writeId, plan: planId });
+export type AskAgainInput = z.output<typeof askAgainInput>;

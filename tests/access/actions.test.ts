@@ -15,6 +15,7 @@ import { orderRows } from "./action-rows/order";
 import { partsRows } from "./action-rows/parts";
 import { peopleRows } from "./action-rows/people";
 import { pinMapRows } from "./action-rows/pin-maps";
+import { probingRows } from "./action-rows/probing";
 import { powerRows } from "./action-rows/power";
 import { procedureRows } from "./action-rows/procedures";
 import type { ProjectRow, Row, Rows } from "./action-rows/row";
@@ -36,6 +37,7 @@ const table: Record<string, Rows> = {
   ...partsRows,
   ...peopleRows,
   ...pinMapRows,
+  ...probingRows,
   ...powerRows,
   ...procedureRows,
   ...travelerRows,

@@ -54,6 +54,22 @@ export const pages: Record<string, PageRow> = {
     permission: "project.see",
     path: of("/boards/TIM/procedure/1"),
   },
+  "app/(workshop)/projects/[project]/boards/[board]/netlists/page.tsx": {
+    permission: "project.see",
+    path: of("/boards/TIM/netlists"),
+  },
+  "app/(workshop)/projects/[project]/units/[unit]/probing/page.tsx": {
+    permission: "project.see",
+    path: of("/units/TIM-01/probing"),
+  },
+  "app/(workshop)/projects/[project]/units/[unit]/probing/[plan]/page.tsx": {
+    permission: "project.see",
+    path: (place) => of(`/units/TIM-01/probing/${place.round}`)(place),
+  },
+  "app/(bench)/projects/[project]/probe/[plan]/page.tsx": {
+    permission: "project.see",
+    path: (place) => of(`/probe/${place.round}`)(place),
+  },
   "app/(workshop)/projects/[project]/units/[unit]/page.tsx": { permission: "project.see", path: of("/units/TIM-01") },
   "app/(workshop)/projects/[project]/units/[unit]/print/page.tsx": {
     permission: "project.see",

@@ -5,6 +5,7 @@ import { tokenFor } from "@/lib/auth/token";
 import { invitePerson } from "@/lib/invitation/invite-person";
 import { must } from "../support/bench";
 import { FULL_ADDER, keepBlock } from "../support/parts";
+import { startedRound } from "../support/probing";
 import { makeEvidence } from "../support/project";
 import { appUrl, sessionCookie } from "../support/session";
 import { makeFault, makeLogEntry, makeMachine } from "./machine";
@@ -23,6 +24,7 @@ export async function makePlace() {
     entry: await makeLogEntry(machine),
     fault: (await makeFault(machine)).number,
     block: (await must(keepBlock(scopes.maintainer, FULL_ADDER))).id,
+    round: (await startedRound(scopes.maintainer, machine.unit.serial, machine.board.revisionId)).id,
     file: await makeEvidence(machine),
     invitation: tokenFor("invitation", invited.id),
   };

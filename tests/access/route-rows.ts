@@ -1,5 +1,6 @@
 import { randomUUID } from "node:crypto";
 import type { Permission } from "@/lib/access/permissions";
+import { pinList, said, SIX_NETS } from "../support/probing";
 import type { Place } from "./place";
 
 type Asking = { path: string; data?: object; headers?: Record<string, string> };
@@ -41,6 +42,27 @@ export const routes: Record<string, RouteRow> = {
     ask: (place) => ({ path: of(place, `/files/${place.file}`) }),
     // The row is there, its object is not: the store is asked, so the permission was granted.
     status: 410,
+  },
+  "POST app/api/projects/[project]/netlists/route.ts": {
+    permission: "wiring.edit",
+    ask: (place) => ({
+      path: of(place, "/netlists"),
+      data: { writeId: randomUUID(), revisionId: place.board.revisionId, given: pinList(SIX_NETS) },
+    }),
+    status: 200,
+  },
+  "GET app/api/projects/[project]/probings/[plan]/results/route.ts": {
+    permission: "project.see",
+    ask: (place) => ({ path: of(place, `/probings/${place.round}/results`) }),
+    status: 200,
+  },
+  "POST app/api/projects/[project]/probings/[plan]/results/route.ts": {
+    permission: "attempt.record",
+    ask: (place) => ({
+      path: of(place, `/probings/${place.round}/results`),
+      data: { results: [said(0, true)], voids: [] },
+    }),
+    status: 200,
   },
   "GET app/api/projects/[project]/pin-map/route.ts": {
     permission: "project.see",

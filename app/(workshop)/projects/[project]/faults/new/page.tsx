@@ -11,7 +11,16 @@ export default definePage({
   path: (params) => `/projects/${params.project}/faults/new`,
   render: async (scope, { search }) => {
     const text = (value: string | string[] | undefined) => (typeof value === "string" ? value : "");
-    const view = await loadNewFault(scope, { unit: text(search.unit), check: text(search.check) });
+    const list = (value: string | string[] | undefined) =>
+      text(value)
+        .split(",")
+        .filter((name) => name.trim() !== "");
+    const found = {
+      ...{ title: text(search.title), symptom: text(search.symptom) },
+      ...{ signals: list(search.signals), pins: list(search.pins) },
+    };
+    const wanted = { unit: text(search.unit), check: text(search.check), plan: text(search.plan), found };
+    const view = await loadNewFault(scope, wanted);
     return <NewFaultPlace project={scope.slug} view={view} acts={{ open: openFault, similar: similarFaults }} />;
   },
 });

@@ -1,9 +1,10 @@
 "use server";
 
 import { defineAction } from "@/lib/actions/define-action";
+import { askAgain as ask } from "@/lib/probing/ask-again";
 import { closeRound as close } from "@/lib/probing/close-round";
 import { previewRound as preview } from "@/lib/probing/preview-round";
-import { closeRoundInput, previewRoundInput, startRoundInput } from "@/lib/probing/schema";
+import { askAgainInput, closeRoundInput, previewRoundInput, startRoundInput } from "@/lib/probing/schema";
 import { startRound as start } from "@/lib/probing/start-round";
 
 /** Changes nothing, but works hard: only for those who may start one. */
@@ -26,4 +27,11 @@ export const closeRound = defineAction({
   permission: "attempt.record",
   input: closeRoundInput,
   run: close,
+});
+
+export const askAgain = defineAction({
+  name: "ask-again",
+  permission: "attempt.record",
+  input: askAgainInput,
+  run: ask,
 });

@@ -4,7 +4,7 @@ import { RoundPlace } from "@/components/probing/RoundPlace";
 import { can } from "@/lib/access/permissions";
 import { definePage } from "@/lib/actions/define-page";
 import { loadRoundPage } from "@/lib/probing/load-round-page";
-import { closeRound } from "../actions";
+import { askAgain, closeRound } from "../actions";
 
 export async function generateMetadata({ params }: { params: Promise<{ unit: string }> }): Promise<Metadata> {
   return { title: `A round of ${decodeURIComponent((await params).unit)}` };
@@ -23,7 +23,7 @@ export default definePage({
         project={scope.slug}
         zone={scope.viewer.timeZone}
         may={{ probe: isOpen && can(scope.role, "attempt.record"), fault: isOpen && can(scope.role, "fault.write") }}
-        close={closeRound}
+        acts={{ ask: askAgain, close: closeRound }}
       />
     );
   },
