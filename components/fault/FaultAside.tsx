@@ -105,8 +105,8 @@ export function FaultAside({ project, zone, fault, face }: Props) {
         <ol className="grid gap-2 text-sm">
           {fault.history.map((event) => (
             <li key={event.id}>
-              {event.sentence.map(({ text }) => text).join("")}{" "}
-              <DateTime at={event.at} zone={zone} form="short" className="text-ink-soft" />
+              {event.sentence}
+              <DateTime at={event.at} zone={zone} form="short" className="text-ink-soft block" />
             </li>
           ))}
         </ol>

@@ -67,7 +67,7 @@ export function FaultsPlace({ project, zone, query, view, canWrite }: Props) {
 function Line({ project, zone, line }: { project: string; zone: string; line: FaultLine }) {
   const names = [...line.signals, ...line.pins];
   return (
-    <li className="hover:bg-raised relative grid grid-cols-[3rem_minmax(0,1fr)] gap-x-3 px-4 py-3.5 sm:grid-cols-[3.5rem_minmax(0,1fr)_11rem] sm:px-5">
+    <li className="hover:bg-raised relative grid grid-cols-[2.25rem_minmax(0,1fr)] gap-x-3 px-4 py-3.5 sm:grid-cols-[3.5rem_minmax(0,1fr)_11rem] sm:px-5">
       <span className="mono pt-0.5 font-semibold">F{line.number}</span>
       <div className="min-w-0">
         <p className="flex flex-wrap items-baseline gap-x-2.5 gap-y-1">
@@ -85,9 +85,9 @@ function Line({ project, zone, line }: { project: string; zone: string; line: Fa
       <p className="text-ink-soft text-sm max-sm:col-start-2 max-sm:mt-1.5 sm:text-right">
         <span className="mono text-ink font-semibold">{line.serial}</span>
         <span className="sm:hidden"> · </span>
-        <span className="sm:block">
-          {line.by}, <DateTime at={line.at} zone={zone} form="short" />
-        </span>
+        <span className="sm:block">{line.by}</span>
+        <span className="sm:hidden">, </span>
+        <DateTime at={line.at} zone={zone} form="short" className="sm:block" />
         {(line.reworks > 0 || line.hours !== null) && (
           <span className="block">
             {[

@@ -13,12 +13,10 @@ export function CarryOver({ project, others, rework }: Props) {
   const go = (serial: string) =>
     router.push(`/projects/${project}/units/${encodeURIComponent(serial)}/reworks/new?from=${rework.id}`);
   return (
-    <div className="mt-1 flex print:hidden">
-      <Menu
-        label={`Carry R${rework.number} over to`}
-        trigger={<Button size="sm">Carry it over</Button>}
-        entries={others.map((serial) => ({ id: serial, label: `To ${serial}`, onAction: () => go(serial) }))}
-      />
-    </div>
+    <Menu
+      label={`Carry R${rework.number} over to`}
+      trigger={<Button size="sm">Carry it over</Button>}
+      entries={others.map((serial) => ({ id: serial, label: `To ${serial}`, onAction: () => go(serial) }))}
+    />
   );
 }

@@ -27,7 +27,7 @@ export function DoubtTitle({ line, serial }: { line: DoubtLineView; serial: stri
     <p className="min-w-0">
       {line.title}
       <span className="text-ink-soft text-sm">
-        {" "}
+        {" · "}
         {line.serial === serial ? stageName(line.stage) : `${line.serial}, ${stageName(line.stage)}`}
       </span>
     </p>

@@ -16,13 +16,15 @@ type Props = {
   zone: string;
   serial: string;
   rework: ReworkView;
+  /** Its open doubts are shown at once. */
+  isNewest: boolean;
   /** Units that it can be carried over to; empty for those who may not. */
   others: readonly string[];
   evidence: EvidenceActions | undefined;
 };
 
 /** One rework: what was done and why, what it touches, what it put in doubt and what of that is repeated. */
-export function ReworkCard({ project, zone, serial, rework, others, evidence }: Props) {
+export function ReworkCard({ project, zone, serial, rework, isNewest, others, evidence }: Props) {
   const { number, wire, fault, carriedFrom, doubts, spared } = rework;
   const units = `/projects/${project}/units`;
   const open = doubts.filter(({ isAnswered, isRetired }) => !isAnswered && !isRetired);
@@ -68,7 +70,11 @@ export function ReworkCard({ project, zone, serial, rework, others, evidence }: 
           </p>
         )}
         <p className="text-sm font-semibold">{standing(doubts.length, open.length)}</p>
-        {open.length > 0 && <Doubts {...{ project, serial }} doubts={open} />}
+        {open.length > 0 && (
+          <Disclosure summary={open.length === 1 ? "Which one" : "Which ones"} isOpen={isNewest}>
+            <Doubts {...{ project, serial }} doubts={open} />
+          </Disclosure>
+        )}
         {doubts.length + spared.length > open.length && (
           <Disclosure summary={settledWords(doubts.length - open.length, spared.length)}>
             <Doubts {...{ project, serial }} doubts={doubts.filter((doubt) => !open.includes(doubt))} />
@@ -80,8 +86,9 @@ export function ReworkCard({ project, zone, serial, rework, others, evidence }: 
             )}
           </Disclosure>
         )}
-        <ReworkPictures {...{ project, zone, rework, evidence }} />
-        {others.length > 0 && <CarryOver {...{ project, others }} rework={rework} />}
+        <ReworkPictures {...{ project, zone, rework, evidence }}>
+          {others.length > 0 && <CarryOver {...{ project, others }} rework={rework} />}
+        </ReworkPictures>
       </div>
     </article>
   );

@@ -23,7 +23,7 @@ export function ReworkEditor({ project, zone, form, acts }: Props) {
     <Page
       title={
         <>
-          A rework of <span className="mono text-[0.9em]">{serial}</span>{" "}
+          A rework of <span className="whitespace-nowrap">{serial}</span>{" "}
           <span className="text-ink-soft font-normal">
             {form.board.name}, rev {form.revision}
           </span>

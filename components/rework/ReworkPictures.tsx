@@ -1,7 +1,7 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useState } from "react";
+import { useState, type ReactNode } from "react";
 import { EvidenceGallery } from "@/components/evidence/EvidenceGallery";
 import { EvidencePicker } from "@/components/evidence/EvidencePicker";
 import type { EvidenceActions } from "@/components/evidence/use-evidence-acts";
@@ -15,6 +15,8 @@ type Props = {
   rework: ReworkView;
   /** Only for those who may attach. */
   evidence: EvidenceActions | undefined;
+  /** Further buttons in the row. */
+  children: ReactNode;
 };
 
 const SIDES: readonly [ReworkSide, string][] = [
@@ -23,7 +25,7 @@ const SIDES: readonly [ReworkSide, string][] = [
 ];
 
 /** How it looked before the iron, and how it looks since. */
-export function ReworkPictures({ project, zone, rework, evidence }: Props) {
+export function ReworkPictures({ project, zone, rework, evidence, children }: Props) {
   const router = useRouter();
   const [adding, setAdding] = useState<ReworkSide>();
   const shown = SIDES.filter(([side]) => rework[side].length > 0 || adding === side);
@@ -48,15 +50,15 @@ export function ReworkPictures({ project, zone, rework, evidence }: Props) {
           ))}
         </div>
       )}
-      {evidence && (
-        <div className="flex flex-wrap gap-2 print:hidden">
-          {SIDES.filter(([side]) => adding !== side).map(([side, label]) => (
+      <div className="flex flex-wrap gap-2 empty:hidden print:hidden">
+        {children}
+        {evidence &&
+          SIDES.filter(([side]) => adding !== side).map(([side, label]) => (
             <Button key={side} size="sm" kind="quiet" onPress={() => setAdding(side)}>
               Picture {label.toLowerCase()}
             </Button>
           ))}
-        </div>
-      )}
+      </div>
     </div>
   );
 }

@@ -33,7 +33,7 @@ export function ReworksPlace({ project, zone, view, comparison, canRecord, evide
     <Page
       title={
         <>
-          Reworks of {serial}{" "}
+          Reworks of <span className="whitespace-nowrap">{serial}</span>{" "}
           <span className="text-ink-soft font-normal">
             {view.board.name}, rev {view.revision}
           </span>
@@ -72,10 +72,11 @@ export function ReworksPlace({ project, zone, view, comparison, canRecord, evide
         </EmptyState>
       ) : (
         <section aria-label="All reworks" className="border-rule bg-sheet divide-rule divide-y rounded-lg border">
-          {view.reworks.map((rework) => (
+          {view.reworks.map((rework, index) => (
             <ReworkCard
               key={rework.id}
               {...{ project, zone, serial, rework, evidence }}
+              isNewest={index === 0}
               others={canRecord ? view.others.map((other) => other.serial) : []}
             />
           ))}

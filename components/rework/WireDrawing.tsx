@@ -1,3 +1,5 @@
+"use client";
+
 import { ConnectorFace } from "@/components/ui/glyphs/ConnectorFace";
 import { faceOf, findPin, parsePin } from "@/lib/calc/connector";
 import type { BoardConnector } from "@/lib/rework/load-reworks";

@@ -8,8 +8,8 @@ import type { FaultState } from "@/db/schema/faults";
 import type { CheckState } from "@/db/schema/travelers";
 import type { ProjectScope } from "@/lib/access/scope";
 import { evidenceView } from "@/lib/attachment/evidence-view";
-import { sentenceOf, type SentencePart } from "@/lib/event/sentence";
 import { attemptsOf, type SeenAttempt } from "./attempts-of";
+import { historyLine } from "./history-line";
 import { nameRework, wireWords } from "@/lib/rework/rework-words";
 import type { EvidenceView } from "@/lib/traveler/traveler-view";
 
@@ -35,7 +35,7 @@ export type FaultView = FaultTexts & {
   reworks: { id: string; number: number; serial: string; title: string; says: string; by: string; at: string }[];
   evidence: EvidenceView[];
   /** Newest first. */
-  history: { id: number; at: string; sentence: SentencePart[] }[];
+  history: { id: number; at: string; sentence: string }[];
   by: string;
   at: string;
   closedAt: string | null;
@@ -79,11 +79,7 @@ export async function loadFault(scope: ProjectScope, number: number): Promise<Fa
     history: events.map((event) => ({
       id: event.id,
       at: event.at.toISOString(),
-      sentence: sentenceOf(event.kind, event.payload, {
-        ...event,
-        project: scope.slug,
-        actor: somebody(event.actorName),
-      }),
+      sentence: historyLine(event.kind, event.payload, somebody(event.actorName)),
     })),
     by: somebody(found.byName),
     at: fault.createdAt.toISOString(),

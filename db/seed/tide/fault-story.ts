@@ -161,7 +161,7 @@ export const REWORKS: (When & {
   {
     ...{ daysAgo: 4, minutes: 2, by: "bram", serial: "CON-01", kind: "bodge-wire" },
     what: "End of W3 moved from U6 pin 11 to pin 12",
-    why: "One pin to the left, as things look from the solder side.",
+    why: "Past the lifted pad of U6 pin 12. It first sat one pin to the left, as things look from the solder side.",
     wire: { number: "W3", from: "U6-12", to: "U9-3", colour: "white", out: false },
     fault: "Pad of U6 pin 12 lifted",
     ...{ signals: ["PH7"], pins: ["U6-11"] },
