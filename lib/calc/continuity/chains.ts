@@ -2,6 +2,7 @@ import { byName } from "../check-graph";
 import { pinName } from "../netlist";
 import type { PointBook } from "./point-book";
 import { route } from "./route";
+import { squared } from "./squared";
 
 /** Pairs of points in the order of probing. */
 export type PointPairs = { a: number[]; b: number[] };
@@ -37,10 +38,37 @@ function chainOf(book: PointBook, points: readonly number[]): readonly number[] 
   return [...chain, ...unknown.sort((one, other) => byName(one.name, other.name)).map(({ at }) => at)];
 }
 
-function routed({ x, y }: PointBook, points: readonly number[]): number[] {
-  const [xs, ys] = [Float64Array.from(points, (at) => x[at] ?? 0), Float64Array.from(points, (at) => y[at] ?? 0)];
+/** Most nets have a few points only; for these the nearest one each time does, without tables. */
+const FEW = 6;
+
+function routed(book: PointBook, points: readonly number[]): readonly number[] {
+  if (points.length <= FEW) return nearestEachTime(book, points);
+  const [xs, ys] = [new Float64Array(points.length), new Float64Array(points.length)];
+  points.forEach((point, at) => {
+    xs[at] = book.x[point] ?? 0;
+    ys[at] = book.y[point] ?? 0;
+  });
   const { order } = route({ startX: xs, startY: ys, endX: xs, endY: ys });
   return Array.from(order, (at) => points[at] ?? 0);
+}
+
+/** From the lower left on. */
+function nearestEachTime({ x, y }: PointBook, points: readonly number[]): number[] {
+  const chain = [...points];
+  let [fromX, fromY] = [-1e6, -1e6];
+  for (let at = 0; at < chain.length - 1; at += 1) {
+    let [best, bestSquared] = [at, Infinity];
+    for (let i = at; i < chain.length; i += 1) {
+      const apart = squared(fromX, fromY, x[chain[i] ?? 0] ?? 0, y[chain[i] ?? 0] ?? 0);
+      if (apart < bestSquared) [best, bestSquared] = [i, apart];
+    }
+    const next = chain[best] ?? 0;
+    chain[best] = chain[at] ?? 0;
+    chain[at] = next;
+    fromX = x[next] ?? 0;
+    fromY = y[next] ?? 0;
+  }
+  return chain;
 }
 
 function addChain({ a, b }: PointPairs, chain: readonly number[], isTurned: boolean): void {
@@ -53,19 +81,29 @@ function addChain({ a, b }: PointPairs, chain: readonly number[], isTurned: bool
 
 /** Pairs of single points in an order with little walking: by the places halfway between the two; those without one at the end. */
 export function orderPairs(book: PointBook, { a, b }: PointPairs): PointPairs {
-  const halfway = (list: Float64Array, at: number) => ((list[a[at] ?? 0] ?? 0) + (list[b[at] ?? 0] ?? 0)) / 2;
-  const all = a.map((_, at) => at);
-  const known = all.filter((at) => !Number.isNaN(halfway(book.x, at)));
-  const [x, y] = [
-    Float64Array.from(known, (at) => halfway(book.x, at)),
-    Float64Array.from(known, (at) => halfway(book.y, at)),
-  ];
-  const { order } = route({ startX: x, startY: y, endX: x, endY: y });
-  const sorted = [
-    ...Array.from(order, (at) => known[at] ?? 0),
-    ...all.filter((at) => Number.isNaN(halfway(book.x, at))),
-  ];
-  return { a: sorted.map((at) => a[at] ?? 0), b: sorted.map((at) => b[at] ?? 0) };
+  const [x, y] = [new Float64Array(a.length), new Float64Array(a.length)];
+  const [known, unknown]: [number[], number[]] = [[], []];
+  for (let at = 0; at < a.length; at += 1) {
+    const [one, other] = [a[at] ?? 0, b[at] ?? 0];
+    const halfway = ((book.x[one] ?? 0) + (book.x[other] ?? 0)) / 2;
+    if (Number.isNaN(halfway)) {
+      unknown.push(at);
+      continue;
+    }
+    x[known.length] = halfway;
+    y[known.length] = ((book.y[one] ?? 0) + (book.y[other] ?? 0)) / 2;
+    known.push(at);
+  }
+  const [xs, ys] = [x.subarray(0, known.length), y.subarray(0, known.length)];
+  const { order } = route({ startX: xs, startY: ys, endX: xs, endY: ys });
+  const sorted: PointPairs = { a: [], b: [] };
+  const take = (at: number) => {
+    sorted.a.push(a[at] ?? 0);
+    sorted.b.push(b[at] ?? 0);
+  };
+  for (const at of order) take(known[at] ?? 0);
+  for (const at of unknown) take(at);
+  return sorted;
 }
 
 const isPlaced = ({ x }: PointBook, at: number | undefined) => at !== undefined && !Number.isNaN(x[at]);

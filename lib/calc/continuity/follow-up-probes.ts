@@ -70,14 +70,20 @@ class Asked {
     const { netOf, pieceOf, said, joins } = study;
     this.next = planned.reduce((most, { id }) => Math.max(most, id + 1), 0);
     this.continuityOhm = planned.find(({ expect }) => expect === "joined")?.limitOhm ?? POPULATED_ISOLATION_OHM;
-    for (const { a, b } of planned) if (netOf(a) !== netOf(b)) this.neighbours.add(keyOf(netOf(a), netOf(b)));
-    for (const { probe } of said) this.known.add(keyOf(pieceOf(probe.a), pieceOf(probe.b)));
+    // Only open nets are asked about: nothing else needs to be remembered.
+    const isOpen = ({ a, b }: Probe) => study.pieces.has(netOf(a)) && study.pieces.has(netOf(b));
+    for (const probe of planned) {
+      if (!isOpen(probe)) continue;
+      const { kind, a, b } = probe;
+      if (netOf(a) !== netOf(b)) this.neighbours.add(keyOf(netOf(a), netOf(b)));
+      // What is asked already and not answered is not asked again.
+      if (kind === "follow-up") this.known.add(keyOf(pieceOf(a), pieceOf(b)));
+    }
+    for (const { probe } of said) if (isOpen(probe)) this.known.add(keyOf(pieceOf(probe.a), pieceOf(probe.b)));
     for (const { probe } of joins) {
       this.hinted.add(keyOf(netOf(probe.a), netOf(probe.b)));
       this.led.add(`${pieceOf(probe.a)} ${netOf(probe.b)}`).add(`${pieceOf(probe.b)} ${netOf(probe.a)}`);
     }
-    // What is asked already and not answered is not asked again.
-    for (const { kind, a, b } of planned) if (kind === "follow-up") this.known.add(keyOf(pieceOf(a), pieceOf(b)));
   }
 
   isFull = (): boolean => this.probes.length >= MOST_AT_ONCE;

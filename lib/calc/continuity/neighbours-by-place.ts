@@ -1,10 +1,12 @@
 import type { NetPairs } from "./net-pairs";
 import type { PointBook } from "./point-book";
-import { fillTable, measurePads } from "./pad-table";
-import { shareASide } from "./reach";
+import { fillTable, measurePads, type Pads, type Table } from "./pad-table";
 
 /** In one cell each pad is held against so many others at most, so that a heap of pads on one spot cannot take for ever. */
-const MOST_IN_A_CELL = 128;
+const MOST_IN_A_CELL = 256;
+
+/** Places come of other units: what is as near as this to the window lies within it. */
+const ROUNDING_MM = 1e-6;
 
 /**
  * Pairs of nets with pads whose edges lie at most `windowMm` apart on one side of the board. What lies between is not looked at,
@@ -18,42 +20,57 @@ export function neighboursByPlace(
   pairs: NetPairs,
   mostPairs: number,
 ): boolean {
-  const pads = measurePads(book, chosen, windowMm / 2);
-  const { count, left, right, low, high, cell } = pads;
-  if (count < 2) return true;
+  const reachMm = windowMm + 2 * ROUNDING_MM;
+  const limit = (windowMm + ROUNDING_MM) ** 2;
+  const pads = measurePads(book, chosen, reachMm / 2);
+  if (pads.count < 2) return true;
   const table = fillTable(pads);
-  const limit = windowMm * windowMm + 1e-9;
   let isComplete = true;
   for (let bucket = 0; bucket < table.first.length - 1; bucket += 1) {
+    const begin = table.first[bucket] ?? 0;
     const end = table.first[bucket + 1] ?? 0;
-    for (let i = table.first[bucket] ?? 0; i < end; i += 1) {
-      const [one, column, row] = [table.pad[i] ?? 0, table.column[i] ?? 0, table.row[i] ?? 0];
-      const p = pads.point[one] ?? 0;
-      const last = Math.min(end, i + 1 + MOST_IN_A_CELL);
-      if (last < end) isComplete = false;
-      for (let k = i + 1; k < last; k += 1) {
-        const other = table.pad[k] ?? 0;
-        // A pair that shares several cells counts in the one with the lower left corner of what they share.
-        if (table.column[k] !== column || table.row[k] !== row) continue;
-        const sharedLeft = Math.max(left[one] ?? 0, left[other] ?? 0);
-        const sharedLow = Math.max(low[one] ?? 0, low[other] ?? 0);
-        if (Math.floor(sharedLeft / cell) !== column || Math.floor(sharedLow / cell) !== row) continue;
-        const q = pads.point[other] ?? 0;
-        if (book.netOf[p] === book.netOf[q]) continue;
-        // Pads widened by half the window on each side: the gap is what they lack of overlapping by a whole window.
-        const gapX = Math.max(0, sharedLeft - Math.min(right[one] ?? 0, right[other] ?? 0) + windowMm);
-        const gapY = Math.max(0, sharedLow - Math.min(high[one] ?? 0, high[other] ?? 0) + windowMm);
-        const gap = gapX * gapX + gapY * gapY;
-        if (gap > limit || !sideBySide(book, p, q)) continue;
-        if (pairs.size >= mostPairs) return false;
-        pairs.add(p, q, gap);
-      }
+    if (end - begin > MOST_IN_A_CELL) isComplete = false;
+    for (let i = begin; i < end - 1; i += 1) {
+      const last = Math.min(end, i + MOST_IN_A_CELL);
+      if (!pairsWith(i, last, pads, table)) return false;
     }
   }
   return isComplete;
-}
 
-function sideBySide({ points }: PointBook, one: number, other: number): boolean {
-  const [a, b] = [points[one], points[other]];
-  return a !== undefined && b !== undefined && shareASide(a, b);
+  /** Holds an entry of the table against those after it; false when there are too many pairs. */
+  function pairsWith(
+    at: number,
+    last: number,
+    { left, right, low, high, point, net, sides, cell }: Pads,
+    { pad, column, row }: Table,
+  ) {
+    const one = pad[at] ?? 0;
+    const oneNet = net[one] ?? 0;
+    const oneSides = sides[one] ?? 0;
+    const oneLeft = left[one] ?? 0;
+    const oneRight = right[one] ?? 0;
+    const oneLow = low[one] ?? 0;
+    const oneHigh = high[one] ?? 0;
+    for (let k = at + 1; k < last; k += 1) {
+      const other = pad[k] ?? 0;
+      const sharedLeft = Math.max(oneLeft, left[other] ?? 0);
+      const sharedRight = Math.min(oneRight, right[other] ?? 0);
+      if (sharedLeft > sharedRight) continue;
+      const sharedLow = Math.max(oneLow, low[other] ?? 0);
+      const sharedHigh = Math.min(oneHigh, high[other] ?? 0);
+      if (sharedLow > sharedHigh) continue;
+      if (net[other] === oneNet || ((sides[other] ?? 0) & oneSides) === 0) continue;
+      // A pair that shares several cells counts in the one with the lower left corner of what they share.
+      if (column[k] !== Math.floor(sharedLeft / cell) || row[k] !== Math.floor(sharedLow / cell)) continue;
+      if (column[k] !== column[at] || row[k] !== row[at]) continue;
+      // Both boxes are widened by half the reach: the gap is what they lack of overlapping by all of it.
+      const gapX = Math.max(0, sharedLeft - sharedRight + reachMm);
+      const gapY = Math.max(0, sharedLow - sharedHigh + reachMm);
+      const gap = gapX * gapX + gapY * gapY;
+      if (gap > limit) continue;
+      if (pairs.size >= mostPairs) return false;
+      pairs.add(point[one] ?? 0, point[other] ?? 0, gap);
+    }
+    return true;
+  }
 }

@@ -1,10 +1,13 @@
 import type { PointBook } from "./point-book";
-import { halfSize } from "./reach";
+import { halfSize, sidesOf } from "./reach";
 
 /** Pads with a known place, as boxes in mm. */
 export type Pads = {
   count: number;
   point: Int32Array;
+  net: Int32Array;
+  /** Sides on which it can be touched: 1 the primary one, 2 the secondary one, 3 both. */
+  sides: Uint8Array;
   left: Float64Array;
   right: Float64Array;
   low: Float64Array;
@@ -16,7 +19,7 @@ export type Pads = {
 export function measurePads(book: PointBook, chosen: readonly number[], widenMm: number): Pads {
   const most = chosen.length;
   const [left, right, low, high] = [space(most), space(most), space(most), space(most)];
-  const point = new Int32Array(most);
+  const [point, net, sides] = [new Int32Array(most), new Int32Array(most), new Uint8Array(most)];
   let count = 0;
   let sizes = 0;
   for (const at of chosen) {
@@ -24,6 +27,8 @@ export function measurePads(book: PointBook, chosen: readonly number[], widenMm:
     if (Number.isNaN(x) || !pad) continue;
     const [halfX, halfY] = halfSize(pad);
     point[count] = at;
+    net[count] = book.netOf[at] ?? 0;
+    sides[count] = sidesOf(pad);
     left[count] = x - halfX - widenMm;
     right[count] = x + halfX + widenMm;
     low[count] = y - halfY - widenMm;
@@ -31,12 +36,23 @@ export function measurePads(book: PointBook, chosen: readonly number[], widenMm:
     sizes += halfX + halfY;
     count += 1;
   }
-  return { count, point, left, right, low, high, cell: Math.max(2 * widenMm + sizes / Math.max(1, count), 0.01) };
+  return {
+    count,
+    point,
+    net,
+    sides,
+    left,
+    right,
+    low,
+    high,
+    cell: Math.max(2 * widenMm + sizes / Math.max(1, count), 0.01),
+  };
 }
 
 const space = (count: number) => new Float64Array(count);
 
-type Table = { first: Int32Array; pad: Int32Array; column: Int32Array; row: Int32Array };
+/** Entries by bucket; a bucket may hold more than one cell. */
+export type Table = { first: Int32Array; pad: Int32Array; column: Int32Array; row: Int32Array };
 
 /** A hash table of cells by counting: no memory for cells that are empty, however far apart the pads lie. */
 export function fillTable(pads: Pads): Table {

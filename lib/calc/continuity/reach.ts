@@ -24,8 +24,5 @@ export function halfSize({ padWidthMm, padHeightMm, turnDeg, kind, holeMm }: Net
 /** Whether a tip can touch it at all. */
 export const isInReach = ({ side }: NetPoint): boolean => side !== "inner";
 
-/** Whether both lie on one side of the board somewhere. */
-export const shareASide = (one: NetPoint, other: NetPoint): boolean =>
-  one.side === other.side || isOnBoth(one) || isOnBoth(other);
-
-const isOnBoth = ({ side }: NetPoint) => side === "both" || side === null;
+/** Sides as bits: 1 the primary one, 2 the secondary one; both where the source does not say. */
+export const sidesOf = ({ side }: NetPoint): number => (side === "primary" ? 1 : side === "secondary" ? 2 : 3);

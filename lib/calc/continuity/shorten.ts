@@ -2,8 +2,8 @@ import { squared } from "./squared";
 import type { Route, Ways } from "./ways";
 
 /** Stretches of at most so many ways are turned, in so many passes: the work stays in proportion to their number. */
-const LONGEST_TURN = 24;
-const MOST_PASSES = 3;
+const LONGEST_TURN = 8;
+const MOST_PASSES = 2;
 
 /** 2-opt: turns round every stretch that is shorter backwards. */
 export function shorten(ways: Ways, { order, isTurned }: Route): void {
