@@ -2,7 +2,7 @@ import { z } from "zod";
 import type { Netlist, NetPoint } from "@/lib/calc/netlist";
 import { from, name, ohms } from "./fields";
 
-export const MOST_POINTS = 20_000;
+export const MOST_POINTS = 3000;
 const MOST_TEXT = 4_000_000;
 
 const millimetres = from(-10_000, 10_000);

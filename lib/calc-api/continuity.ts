@@ -9,7 +9,11 @@ import {
 import { readIpcD356, type Netlist } from "@/lib/calc/netlist";
 import type { z } from "zod";
 import { continuityInput, MOST_POINTS, netlistOf } from "./continuity-input";
+import { countClosePairs } from "./count-close-pairs";
 import { defineCalculation, type Outcome } from "./define-calculation";
+
+/** More would keep the server busy for too long for one request. */
+const MOST_PAIRS = 50_000;
 
 type Given = z.output<typeof continuityInput>;
 
@@ -22,7 +26,7 @@ export const continuity = defineCalculation({
   source:
     "Limits: IPC-9252, classes 3 and 3/A as trade articles give them, 1 and 2 from memory. Files: IPC-D-356 and 356A. The standards were not opened; see the project's check values. Nearest neighbour, then 2-opt: common practice.",
   leavesOut: "Shorts between nets that are nowhere beside each other, and parts that join nets on a board with parts.",
-  most: `${MOST_POINTS} points.`,
+  most: `${MOST_POINTS} points, ${MOST_PAIRS} pairs beside each other.`,
   input: continuityInput,
   example: {
     nets: [
@@ -43,6 +47,10 @@ export const continuity = defineCalculation({
         ok: false,
         fields: { ipcD356: `It has ${book.points.length} points; at most ${MOST_POINTS} are planned.` },
       };
+    }
+    if (countClosePairs(book, given.rails) > MOST_PAIRS) {
+      const message = `More than ${MOST_PAIRS} pairs of points lie beside each other or are rails. Are the places in millimetres?`;
+      return { ok: false, fields: { [given.ipcD356 === "" ? "nets" : "ipcD356"]: message } };
     }
     const { probes, ...plan } = planProbes(netlist, optionsOf(given));
     const stray = given.results.findIndex(({ probe }) => probe >= probes.length);

@@ -5,7 +5,7 @@ import { orderChecks, scheduleChecks } from "@/lib/calc/sequence";
 import { defineCalculation, type Outcome } from "./define-calculation";
 import { from, name } from "./fields";
 
-const MOST_CHECKS = 3000;
+const MOST_CHECKS = 1000;
 const MOST_NEEDS = 100;
 
 const check = z.strictObject({

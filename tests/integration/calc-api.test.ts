@@ -261,6 +261,10 @@ describe("the probe plan", () => {
     expect(await refused({ nets: [net("CLK", "1", "1")] })).toContain("nets.0.points.1");
     expect(await refused({})).toContain("Give at least one net");
     expect(await refused({ ipcD356: "nothing of the kind" })).toContain("No net could be read");
+    const heap = Array.from({ length: 400 }, (_, index) => {
+      return { name: `N${index}`, points: [{ part: "U1", pin: `${index}`, xMm: 0, yMm: 0 }] };
+    });
+    expect(await refused({ nets: heap })).toContain("Are the places in millimetres?");
     const results = [{ probe: 99, beeps: true }];
     expect(await refused({ nets: [net("CLK", "1", "2")], results })).toContain("There is no probe 99");
   });
