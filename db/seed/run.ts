@@ -15,6 +15,7 @@ import { faultHappenings } from "./tide/write-faults";
 import { machineHappenings } from "./tide/write-machine";
 import { partsHappenings } from "./tide/write-parts";
 import { powerHappenings } from "./tide/write-power";
+import { probingHappenings } from "./tide/write-probing";
 import { wiringHappenings } from "./tide/write-wiring";
 import { logHappenings } from "./tide/write-log";
 import { writeInstruments, writePeople } from "./tide/write-people";
@@ -46,6 +47,7 @@ async function seed(db: Database, now: Date): Promise<void> {
     ...powerHappenings(db, scope, now),
     ...storyHappenings(db, cast, now, upload),
     ...faultHappenings(db, cast, now, upload),
+    ...probingHappenings(db, cast, now),
     ...logHappenings(cast, now),
   ]);
 

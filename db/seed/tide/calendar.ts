@@ -39,6 +39,9 @@ const DATED = [
   ["reworks", "created_at"],
   ["punch_items", "created_at"],
   ["punch_items", "dealt_at"],
+  ["netlists", "created_at"],
+  ["probe_plans", "created_at"],
+  ["probe_results", "recorded_at"],
 ] as const;
 
 /** One thing that happens in the story, and when. */
