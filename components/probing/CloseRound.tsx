@@ -43,23 +43,29 @@ export function CloseRound({ page: { round, said, conforms, checks }, project, c
   return (
     <Panel title="Close the round">
       <div className="flex flex-col gap-4">
-        <Select
-          label="Record it as an attempt of"
-          options={[...checks.map(({ id, title }) => ({ id, label: title })), { id: NO_CHECK, label: "No check" }]}
-          value={checkId}
-          onChange={(id) => {
-            // Another check is another attempt.
-            ids.current = undefined;
-            setCheck(id);
-          }}
-        />
+        {checks.length === 0 ? (
+          <p className="text-[0.9375rem] text-ink-soft">
+            No continuity check of {round.unit.serial} takes a statement, so the round is closed without an attempt.
+          </p>
+        ) : (
+          <Select
+            label="Record it as an attempt of"
+            options={[...checks.map(({ id, title }) => ({ id, label: title })), { id: NO_CHECK, label: "No check" }]}
+            value={checkId}
+            onChange={(id) => {
+              // Another check is another attempt.
+              ids.current = undefined;
+              setCheck(id);
+            }}
+          />
+        )}
         {checkId !== NO_CHECK && (
           <Notice kind={conforms ? "passed" : "failed"} role="none">
             {conforms ? "Will be recorded as conforming: " : "Will be recorded as not conforming: "}
             {said}.
           </Notice>
         )}
-        <TextArea label="Note" value={note} onChange={setNote} />
+        {checkId !== NO_CHECK && <TextArea label="Note" value={note} onChange={setNote} />}
         {error && <Notice kind="error">{error.message}</Notice>}
         <Button kind="primary" isPending={isPending} onPress={press}>
           {checkId === NO_CHECK ? "Close the round" : "Record and close"}

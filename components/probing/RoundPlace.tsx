@@ -34,7 +34,7 @@ export function RoundPlace({ project, zone, may, acts, ...page }: Props) {
           </span>
         </>
       }
-      lede={`${board.name}, netlist ${netlist.letter} ${netlist.number}: ${about}. ${round.limits.words}.`}
+      lede={`${board.name}, netlist ${netlist.letter} ${netlist.number}: ${about}; ${round.limits.words}.`}
       actions={
         <>
           <ButtonLink href={`${self}/probing`}>All rounds</ButtonLink>

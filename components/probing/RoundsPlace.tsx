@@ -79,7 +79,7 @@ type RowProps = { round: RoundLine; project: string; self: string; zone: string;
 function RoundRow({ round, project, self, zone, mayProbe }: RowProps) {
   const { id, about, netlist, count, probed, by, startedAt, closedAt } = round;
   return (
-    <li className="grid items-center gap-x-5 gap-y-2 border-b border-rule py-3 first:pt-0 last:border-b-0 sm:grid-cols-[minmax(0,1fr)_12rem_auto]">
+    <li className="grid items-center gap-x-5 gap-y-2 border-b border-rule py-3 first:pt-0 last:border-b-0 last:pb-0 sm:grid-cols-[minmax(0,1fr)_12rem_auto]">
       <p className="min-w-0">
         <Link href={`${self}/probing/${id}`} className="font-semibold hover:text-copper">
           Netlist {netlist}, {about}

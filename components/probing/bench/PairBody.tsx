@@ -18,11 +18,10 @@ export function PairBody({ round, probing }: Props) {
         <p className="text-ink-soft">
           Probe <span className="mono">{current + 1}</span> of {round.probes.length} · {KINDS[probe.kind]}
         </p>
-        <h2 className="mono mt-1 leading-[1.05] font-semibold tracking-tight">
+        <h2 className="mt-1 leading-[1.05] font-semibold tracking-tight">
           <Point point={a} />
-          <span className="block py-1 text-2xl font-normal text-ink-soft sm:text-3xl">
-            <span aria-hidden="true">↕</span>{" "}
-            <span className="font-sans text-xl sm:text-2xl">{expectation(probe)}</span>
+          <span className="block py-1 text-xl font-normal text-ink-soft sm:text-2xl">
+            <span aria-hidden="true">↕</span> {expectation(probe)}
           </span>
           <Point point={b} />
         </h2>
@@ -60,7 +59,7 @@ const KINDS: Record<RoundProbe["kind"], string> = {
 const expectation = ({ expect }: RoundProbe) => (expect === "joined" ? "should beep" : "should stay silent");
 
 const Point = ({ point: { name } }: { point: RoundPoint }) => (
-  <span className="block text-[clamp(2.5rem,min(13vw,11vh),6rem)] break-words">{name}</span>
+  <span className="mono block text-[clamp(2.5rem,min(13vw,11vh),6rem)] break-words">{name}</span>
 );
 
 function Nets({ a, b, probe }: { a: RoundPoint; b: RoundPoint; probe: RoundProbe }) {

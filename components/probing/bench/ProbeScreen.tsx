@@ -20,7 +20,7 @@ export function ProbeScreen({ round, project, viewer, mayProbe }: Props) {
   const probing = useProbing({ project, round, userId: viewer.id });
   const [isShowingKeys, setShowingKeys] = useState(false);
   const field = useRef<HTMLInputElement>(null);
-  const { probe, answer, back, next, setTyped, results, answered, total, wrong } = probing;
+  const { current, probe, answer, back, next, setTyped, results, answered, total, wrong } = probing;
   const isOpen = mayProbe && !results.isClosed;
   const [a, b] = [probe && round.points[probe.a], probe && round.points[probe.b]];
   const reading = useReadAloud(isOpen && probe && a && b ? spokenPair(probe, a, b) : "");
@@ -53,7 +53,7 @@ export function ProbeScreen({ round, project, viewer, mayProbe }: Props) {
   useEffect(() => {
     // The answer was taken: the keys are the bench's again, not the field's.
     field.current?.blur();
-  }, [probing.current]);
+  }, [current]);
 
   return (
     <div className="flex h-dvh flex-col bg-sheet">
