@@ -50,6 +50,20 @@ const MACHINE = [
     "/parts/logic?part=283",
     "/parts/delay",
   ],
+  ...[
+    "/faults",
+    "/faults/1",
+    "/faults/new?unit=CON-01",
+    "/units/CON-01/reworks",
+    "/units/CON-01/reworks/new",
+    "/units/CON-01/reworks/print",
+    "/units/CON-01/probing",
+    "/boards/CON/netlists",
+    "/order",
+    "/order/boards",
+    "/order/checks",
+    "/order/sessions",
+  ],
   ...["/bench", "/bench/TIM-01", "/captures", "/log", "/log/new", "/people", "/settings", "/search?q=clock", "/digest"],
 ];
 const THEMES = ["light", "dark"] as const;
