@@ -1,7 +1,10 @@
 /** Beyond so many rings of cells the search gives up and takes any place that is left, so that the work stays bounded. */
 const MOST_RINGS = 12;
 
-/** Places in cells of about two each, for the nearest one that is not taken yet. */
+/** In a crowded cell not all are looked at, for the same reason. */
+const MOST_IN_A_CELL = 48;
+
+/** Places in cells of about two each, for the nearest one that is not taken yet, or one nearly so. */
 export class BucketGrid {
   private readonly left: number;
   private readonly low: number;
@@ -78,7 +81,8 @@ export class BucketGrid {
           if (c < 0 || c >= this.columns) continue;
           const cell = r * this.columns + c;
           const begin = this.first[cell] ?? 0;
-          for (let slot = begin; slot < begin + (this.filled[cell] ?? 0); slot += 1) {
+          const end = begin + Math.min(this.filled[cell] ?? 0, MOST_IN_A_CELL);
+          for (let slot = begin; slot < end; slot += 1) {
             const at = this.slots[slot] ?? 0;
             const [dx, dy] = [(this.x[at] ?? 0) - x, (this.y[at] ?? 0) - y];
             const squared = dx * dx + dy * dy;

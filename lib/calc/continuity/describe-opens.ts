@@ -12,7 +12,8 @@ export function describeOpen(study: Study, net: number, breaks: readonly Said[])
   const name = book.netName(net);
   const between = breaks.map(({ probe }) => `${book.label(probe.a)} and ${book.label(probe.b)}`);
   const stretch = `${between.slice(0, MOST_NAMED).join(", between ")}${between.length > MOST_NAMED ? ` and at ${between.length - MOST_NAMED} more places` : ""}`;
-  const sides = own.map((piece) => pieceInWords(study, piece));
+  const sides = own.slice(0, MOST_NAMED).map((piece) => pieceInWords(study, piece));
+  if (own.length > MOST_NAMED) sides.push(`and ${own.length - MOST_NAMED} more`);
   return {
     kind: "open",
     nets: [name],

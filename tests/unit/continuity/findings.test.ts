@@ -49,6 +49,16 @@ test("an open net says between which points, which piece is which, and where to 
   ]);
 });
 
+test("a net in very many pieces is still one sentence that one can read", () => {
+  const pins = Array.from({ length: 40 }, (_, at) => `U${at + 1}-1`);
+  const cut = Object.fromEntries(pins.slice(1).map((pin, at) => [[pins[at], pin].sort().join(" "), false]));
+  const [finding] = probe(netlistOf({ CLK: pins }), cut).report.findings;
+  expect(finding?.pieces).toHaveLength(40);
+  expect(finding?.sentence).toBe(
+    "CLK is open between U1-1 and U2-1, between U2-1 and U3-1, between U3-1 and U4-1 and at 36 more places: U1-1 | U2-1 | U3-1 | and 37 more.",
+  );
+});
+
 test("nets that touch are one finding, however many they are, with the joint that is most likely bridged", () => {
   const netlist = netlistOf({ A: ["U1-1"], B: ["U1-2"], C: ["U1-3"], D: ["U1-4"] });
   const { report } = probe(netlist, { "U1-1 U1-2": true, "U1-2 U1-3": 0.4 });
@@ -123,6 +133,25 @@ test("three wires that are turned by one are one finding with all three", () => 
   }));
   const { findings } = findContinuityFaults(CABLE, [...probes, ...more], [...results, ...answers]);
   expect(findings.map(({ kind, nets }) => [kind, nets])).toEqual([["crossed", ["D0", "D1", "D2"]]]);
+});
+
+test("three wires that are cut and bridged on both ends are a short and three opens, not crossed", () => {
+  const opens = { "J1-1 J2-1": false, "J1-2 J2-2": false, "J1-3 J2-3": false };
+  const { probes, results } = probe(CABLE, { ...opens, "J1-1 J1-2": true, "J1-2 J1-3": true, "J1-1 J1-3": true });
+  const { label } = pointBook(CABLE);
+  const more = followUpProbes(CABLE, probes, results);
+  const answers = more.map(({ id, a, b }): ProbeResult => ({
+    probe: id,
+    beeps: label(a).slice(0, 2) === label(b).slice(0, 2),
+    ohm: null,
+  }));
+  const { findings } = findContinuityFaults(CABLE, [...probes, ...more], [...results, ...answers]);
+  expect(findings.map(({ kind, nets }) => [kind, nets])).toEqual([
+    ["short", ["D0", "D1", "D2"]],
+    ["open", ["D0"]],
+    ["open", ["D1"]],
+    ["open", ["D2"]],
+  ]);
 });
 
 test("an open net says which isolation means nothing yet, and a short on it waits for the open", () => {

@@ -1,6 +1,13 @@
 import fc from "fast-check";
 import { expect, test } from "vitest";
-import { PIN_LIST_COLUMNS, readIpcD356, readPinList, writePinList, type Netlist } from "@/lib/calc/netlist";
+import {
+  PIN_LIST_COLUMNS,
+  PIN_LIST_HEADER,
+  readIpcD356,
+  readPinList,
+  writePinList,
+  type Netlist,
+} from "@/lib/calc/netlist";
 
 const numbered = (rows: readonly (readonly string[])[]) => rows.map((cells, at) => ({ line: at + 1, cells }));
 const read = (...rows: string[][]) => readPinList(numbered(rows), PIN_LIST_COLUMNS);
@@ -19,6 +26,18 @@ test("rows of net, part and pin become nets; blank and N/C are no net", () => {
   expect(netlist.nets[1]?.points[0]).toMatchObject({ xMm: 2.54, yMm: 5.08, line: 2 });
   expect(netlist.unconnected).toHaveLength(1);
   expect(passedOver).toEqual([]);
+});
+
+test("a written list has the columns that its header names", () => {
+  const { netlist } = read(["CLK", "U1", "3", "2.54", "-5.08"]);
+  const [row = []] = writePinList(netlist);
+  expect(PIN_LIST_HEADER.map((name, at) => [name, row[at]])).toEqual([
+    ["net", "CLK"],
+    ["part", "U1"],
+    ["pin", "3"],
+    ["x (mm)", "2.54"],
+    ["y (mm)", "-5.08"],
+  ]);
 });
 
 test("bad rows are passed over by line: no pin, no part, a pin that is there already", () => {
