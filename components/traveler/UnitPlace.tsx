@@ -11,6 +11,7 @@ import type { RevisionChoice } from "@/lib/board/load-revisions";
 import type { MoveView } from "@/lib/traveler/load-move";
 import type { TravelerView, UnitWithoutTraveler } from "@/lib/traveler/traveler-view";
 import { countsSentence } from "./counts-sentence";
+import { doubtSentence } from "./doubt-sentence";
 import { MoveTraveler } from "./MoveTraveler";
 import type { TravelerFrame } from "./traveler-acts";
 import { TravelerPlace } from "./TravelerPlace";
@@ -49,7 +50,11 @@ export function UnitPlace({ unit, traveler, move, openCheck, revisions, canEditU
       }
       lede={
         traveler &&
-        `Traveler, procedure version ${traveler.procedure.number}. ${countsSentence(traveler.checks.map((check) => check.state))}`
+        [
+          `Traveler, procedure version ${traveler.procedure.number}.`,
+          countsSentence(traveler.checks.map((check) => check.state)),
+          doubtSentence(traveler.checks, frame.zone),
+        ].join(" ")
       }
       actions={
         <>

@@ -109,6 +109,7 @@ export async function findFault(db: Queryable, scope: InProject, number: number)
       serial: units.serial,
       unitArchivedAt: units.archivedAt,
       board: { id: boards.id, code: boards.code, name: boards.name },
+      revisionId: revisions.id,
       revision: revisions.letter,
       byName: users.name,
       checkTitle: procedureChecks.title,

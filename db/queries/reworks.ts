@@ -76,12 +76,43 @@ export async function findCoveringChecks(
 export async function findNamedPins(db: Queryable, scope: InProject, codes: readonly string[]) {
   if (codes.length === 0) return [];
   return db
-    .select({ board: boards.code, connector: connectors.reference, pin: pins.pin, signal: pins.signal })
+    .select({
+      board: boards.code,
+      connector: connectors.reference,
+      pin: pins.pin,
+      signal: pins.signal,
+      role: pins.role,
+    })
     .from(pins)
     .innerJoin(connectors, eq(connectors.id, pins.connectorId))
     .innerJoin(boards, eq(boards.id, connectors.boardId))
     .where(and(eq(connectors.projectId, scope.projectId), inArray(boards.code, [...codes])))
     .orderBy(asc(connectors.position), asc(pins.pin));
+}
+
+export type CopperPoint = { part: string; pin: string; net: string };
+
+/** Points of the newest netlist of a revision: of the named parts, in capitals, or as many as asked for of all. */
+export async function findCopper(
+  db: Queryable,
+  scope: InProject,
+  revisionId: string,
+  wanted: { parts?: readonly string[]; limit: number },
+): Promise<CopperPoint[]> {
+  const { parts, limit } = wanted;
+  if (parts?.length === 0) return [];
+  return await db.execute<CopperPoint>(sql`
+    with newest as (
+      select content from netlists where project_id = ${scope.projectId} and revision_id = ${revisionId}
+      order by number desc limit 1)
+    select point ->> 'part' as part, point ->> 'pin' as pin, net ->> 'name' as net
+    from newest, jsonb_array_elements(content -> 'nets') net, jsonb_array_elements(net -> 'points') point
+    where point ->> 'part' <> '' and ${
+      parts === undefined
+        ? sql`true`
+        : sql`upper(point ->> 'part') in (select value from json_array_elements_text(${JSON.stringify(parts)}::json))`
+    }
+    limit ${limit}`);
 }
 
 export async function findBlockNames(db: Queryable, boardId: string): Promise<string[]> {

@@ -26,7 +26,7 @@ export type FaultView = FaultTexts & {
   signals: string[];
   pins: string[];
   version: number;
-  unit: { serial: string; revision: string; archived: boolean };
+  unit: { serial: string; revisionId: string; revision: string; archived: boolean };
   board: { id: string; code: string; name: string };
   check: { id: string; title: string; state: CheckState; stage: Stage } | null;
   /** The attempt that showed it. */
@@ -61,7 +61,12 @@ export async function loadFault(scope: ProjectScope, number: number): Promise<Fa
   return {
     ...{ id, number, title, symptom, suspected, tried, cause, mend, lesson, nextRevision },
     ...{ state: fault.state, hours: fault.hours, signals: fault.signals, pins: fault.pins, version: fault.version },
-    unit: { serial: found.serial, revision: found.revision, archived: found.unitArchivedAt !== null },
+    unit: {
+      serial: found.serial,
+      revisionId: found.revisionId,
+      revision: found.revision,
+      archived: found.unitArchivedAt !== null,
+    },
     board,
     check:
       fault.checkId && found.checkTitle && found.checkState && found.checkStage

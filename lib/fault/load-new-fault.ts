@@ -37,7 +37,14 @@ export async function loadNewFault(
 ): Promise<NewFaultView> {
   const db = database();
   const rows = await db
-    .select({ id: units.id, serial: units.serial, boardId: boards.id, code: boards.code, board: boards.name })
+    .select({
+      id: units.id,
+      serial: units.serial,
+      boardId: boards.id,
+      revisionId: units.revisionId,
+      code: boards.code,
+      board: boards.name,
+    })
     .from(units)
     .innerJoin(boards, eq(boards.id, units.boardId))
     .where(and(eq(units.projectId, scope.projectId), isNull(units.archivedAt)))
@@ -45,7 +52,7 @@ export async function loadNewFault(
   const unit = rows.find(({ serial }) => serial === wanted.unit);
   const plan = wanted.plan ?? "";
   const [names, seen, round] = await Promise.all([
-    unit ? loadBoardNames(scope, { id: unit.boardId, code: unit.code }) : NO_NAMES,
+    unit ? loadBoardNames(scope, { id: unit.boardId, code: unit.code }, unit.revisionId) : NO_NAMES,
     unit && UUID.test(wanted.check) ? seenAt(scope, unit.id, wanted.check) : undefined,
     unit && UUID.test(plan) ? probedIn(scope, unit.id, plan) : undefined,
   ]);

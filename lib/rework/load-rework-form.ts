@@ -40,7 +40,7 @@ export async function loadReworkForm(scope: ProjectScope, wanted: Wanted): Promi
   const unit = await findReworkUnit(db, scope, wanted.serial);
   if (!unit || unit.archivedAt) return undefined;
   const [names, own, standing, asked, from] = await Promise.all([
-    loadBoardNames(scope, unit.board),
+    loadBoardNames(scope, unit.board, unit.revision.id),
     findReworksOfUnits(db, scope, [unit.id]),
     findFaults(db, scope, { states: ["open", "traced"], unit: unit.serial }),
     wanted.fault === undefined ? undefined : findFault(db, scope, wanted.fault),

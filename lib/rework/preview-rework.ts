@@ -4,7 +4,7 @@ import type { ProjectScope } from "@/lib/access/scope";
 import { ok, refuse, type Answer } from "@/lib/actions/answer";
 import { findNeighbours, loadDoubtGround } from "./doubt-context";
 import { doubtPreview, type DoubtPreview } from "./doubt-view";
-import { judgeDoubt } from "./judge-doubt";
+import { judgeDoubt, withWireEnds } from "./judge-doubt";
 import { loadPaces } from "./load-paces";
 import type { PreviewReworkInput } from "./schema";
 
@@ -14,7 +14,9 @@ export async function previewRework(scope: ProjectScope, input: PreviewReworkInp
   const unit = await findReworkUnit(db, scope, input.unit);
   if (!unit) return refuse("not-found", `There is no unit ${input.unit} in this project.`);
   const [ground, paces] = await Promise.all([
-    findNeighbours(db, scope, unit).then((neighbours) => loadDoubtGround(db, scope, unit, neighbours)),
+    findNeighbours(db, scope, unit).then((neighbours) =>
+      loadDoubtGround(db, scope, unit, { neighbours, touches: withWireEnds(input.touches, input.wire) }),
+    ),
     loadPaces(db, scope),
   ]);
   return ok(doubtPreview(unit, judgeDoubt(unit, ground, input, paces)));

@@ -29,7 +29,8 @@ export async function recordRework(scope: ProjectScope, input: RecordReworkInput
     const unit = await openUnit(tx, scope, input.unit);
     const neighbours = await findNeighbours(tx, scope, unit);
     await lockUnits(tx, projectId, [unit.id, ...neighbours]);
-    const judged = judgeDoubt(unit, await loadDoubtGround(tx, scope, unit, neighbours), input);
+    const touches = withWireEnds(input.touches, wire);
+    const judged = judgeDoubt(unit, await loadDoubtGround(tx, scope, unit, { neighbours, touches }), input);
     rejectUnseen(unit, judged, input.seen);
     const fault = input.faultId === null ? undefined : await faultOf(tx, scope, input.faultId);
     if (carriedFrom !== null && !(await findRework(tx, scope, carriedFrom)))
@@ -43,7 +44,7 @@ export async function recordRework(scope: ProjectScope, input: RecordReworkInput
       userId: viewer.userId,
       performedAt: at,
     });
-    const named = touchRows(id, withWireEnds(input.touches, wire));
+    const named = touchRows(id, touches);
     if (named.length > 0) await tx.insert(reworkTouches).values(named);
     const title = nameRework({ kind, number, wire });
     const doubts = judged.lines.flatMap((line) => doubtRow(id, title, unit, line, judged));

@@ -4,6 +4,7 @@ import { beforeAll, describe, expect, it } from "vitest";
 import { slotOccupancies, slots } from "@/db/schema/boards";
 import { events } from "@/db/schema/events";
 import { reworkDoubts, reworks, reworkTouches } from "@/db/schema/faults";
+import { netlists } from "@/db/schema/netlists";
 import { connectors, pins } from "@/db/schema/wiring";
 import { recomputeAll } from "@/lib/check/recompute-all";
 import { loadComparison, loadReworks } from "@/lib/rework/load-reworks";
@@ -209,6 +210,32 @@ describe("a rework and other units", () => {
       [1, 1],
       [2, undefined],
     ]);
+  });
+});
+
+describe("a part", () => {
+  it("stands for the signals that hang on it in the newest netlist of the revision, ground apart", async () => {
+    const { builder, unit, board, project } = await card();
+    const point = (part: string, pin: string) => ({ part, pin });
+    const nets = [
+      { name: "CARRY_N", points: [point("U6", "9"), point("J1", "b14")] },
+      { name: "GND", points: [point("U6", "8"), point("J1", "a1")] },
+      { name: "PH7", points: [point("U9", "3"), point("J1", "a14")] },
+    ];
+    const version = { projectId: project.id, revisionId: board.revisionId, source: "pin-list" as const, sha256: "0" };
+    await db.insert(netlists).values([
+      { ...version, number: 1, content: { nets: [] }, nets: 0, points: 0 },
+      { ...version, number: 2, content: { nets }, nets: 3, points: 6 },
+    ]);
+    const titles = async (given: object) =>
+      (await preview(builder, unit, given)).doubtful.map(({ title, sentences }) => [title, sentences[0]]);
+    expect(await titles({ kind: "reflow", parts: ["u6"] })).toEqual([
+      ["Carry", "It covers CARRY_N; the rework touches u6, which it hangs on."],
+    ]);
+    expect((await titles({ pins: ["U9-3"] })).map(([title]) => title)).toEqual(["PH7 to U6", "Counts to 255", "Carry"]);
+    const { names } = (await loadReworkForm(builder, { serial: unit.serial, fault: undefined, from: "" })) ?? {};
+    expect(names?.parts.map(({ name }) => name)).toEqual(["U6", "U9"]);
+    expect(names?.pins).toContainEqual({ name: "U6 9", says: "CARRY_N" });
   });
 });
 

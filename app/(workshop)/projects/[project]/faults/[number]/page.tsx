@@ -20,7 +20,10 @@ export default definePage({
     const number = /^[1-9]\d{0,8}$/.test(params.number ?? "") ? Number(params.number) : undefined;
     const fault = number === undefined ? undefined : await loadFault(scope, number);
     if (!fault) notFound();
-    const [face, names] = await Promise.all([loadBoardFace(scope, fault.board.id), loadBoardNames(scope, fault.board)]);
+    const [face, names] = await Promise.all([
+      loadBoardFace(scope, fault.board.id),
+      loadBoardNames(scope, fault.board, fault.unit.revisionId),
+    ]);
     const may = (permission: Permission) => !scope.archived && can(scope.role, permission);
     return (
       <FaultPlace
