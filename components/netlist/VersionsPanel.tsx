@@ -41,7 +41,7 @@ export function VersionsPanel({ versions, compared, address, zone }: Props) {
 function VersionRow({ version, zone }: { version: NetlistVersion; zone: string }) {
   const { letter, number, source, fileName, nets, points, passedOver, by, at } = version;
   return (
-    <li className="border-b border-rule py-3 first:pt-0 last:border-b-0">
+    <li className="border-b border-rule py-3 first:pt-0 last:border-b-0 last:pb-0">
       <div className="grid gap-x-4 gap-y-0.5 sm:grid-cols-[9rem_minmax(0,1fr)_auto]">
         <p className="font-semibold">
           Rev {letter}, netlist {number}

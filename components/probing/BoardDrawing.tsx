@@ -41,11 +41,11 @@ export function BoardDrawing({ points, outline, lit, label, className }: Props) 
       )}
       {places.map(({ x, y, mark }) => (
         <g key={mark} transform={`translate(${rounded(x)} ${rounded(y)})`}>
-          <circle r={unit * 2.4} className="fill-copper stroke-sheet" strokeWidth={unit * 0.5} />
+          <circle r={unit * 3.2} className="fill-copper stroke-sheet" strokeWidth={unit * 0.5} />
           <text
             textAnchor="middle"
-            dy={unit * 1.1}
-            fontSize={unit * 3.2}
+            dy={unit * 1.5}
+            fontSize={unit * 4.4}
             style={{ fontSizeAdjust: "none" }}
             className="mono fill-on-copper font-semibold"
           >
