@@ -61,11 +61,13 @@ export function DoubtList(props: Props) {
                 <DoubtLines lines={preview.open} serial={serial} />
               </Disclosure>
             )}
-            <Disclosure
-              summary={`${preview.untouched.length} ${preview.untouched.length === 1 ? "stays" : "stay"} as ${preview.untouched.length === 1 ? "it is" : "they are"}`}
-            >
-              <UntouchedChecks {...props} lines={preview.untouched} />
-            </Disclosure>
+            {preview.untouched.length > 0 && (
+              <Disclosure
+                summary={`${preview.untouched.length} ${preview.untouched.length === 1 ? "stays" : "stay"} as ${preview.untouched.length === 1 ? "it is" : "they are"}`}
+              >
+                <UntouchedChecks {...props} lines={preview.untouched} />
+              </Disclosure>
+            )}
             {preview.untouchedElsewhere > 0 && (
               <p className="text-ink-soft text-sm">
                 {preview.untouchedElsewhere} more on other units of the machine are not touched.

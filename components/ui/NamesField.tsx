@@ -1,7 +1,7 @@
 "use client";
 
 import clsx from "clsx";
-import { useId, useState, type KeyboardEvent } from "react";
+import { useId, useRef, useState, type KeyboardEvent } from "react";
 import { Button, ComboBox, Input, ListBox, Popover } from "react-aria-components";
 import { Field, fieldBox, type FieldTexts } from "./Field";
 import { dropList, inputBox } from "./field-style";
@@ -25,14 +25,25 @@ const SHOWN = 40;
 export function NamesField({ names, onChange, choices, placeholder, ...texts }: NamesFieldProps) {
   const { label, description, error, isLabelHidden, className } = texts;
   const [text, setText] = useState("");
+  /** The box begins anew after each name: else its list opens again over the names when the text is emptied. */
+  const [round, setRound] = useState(0);
+  const latest = useRef("");
   const listId = useId();
+  const type = (typed: string) => {
+    latest.current = typed;
+    setText(typed);
+  };
   const add = (typed: string) => {
     const fresh = typed
       .split(/[,;]/)
       .map((one) => one.trim())
       .filter((one) => one !== "" && !names.includes(one));
     if (fresh.length > 0) onChange([...names, ...new Set(fresh)]);
-    setText("");
+    type("");
+  };
+  const addAndGoOn = (typed: string) => {
+    add(typed);
+    setRound(round + 1);
   };
   const takeOut = (name: string) => onChange(names.filter((one) => one !== name));
   const found = choices
@@ -45,7 +56,7 @@ export function NamesField({ names, onChange, choices, placeholder, ...texts }: 
     if ((event.key === "Enter" || event.key === ",") && text.trim() !== "" && !isPicking) {
       event.preventDefault();
       event.stopPropagation();
-      add(text);
+      addAndGoOn(text);
     } else if (event.key === "Backspace" && text === "") {
       const last = names.at(-1);
       if (last !== undefined) takeOut(last);
@@ -55,14 +66,16 @@ export function NamesField({ names, onChange, choices, placeholder, ...texts }: 
   return (
     <div className={clsx("flex min-w-0 flex-col gap-2", className)}>
       <ComboBox
+        key={round}
+        autoFocus={round > 0}
         items={found}
         value={null}
         onChange={(key) => {
-          if (key !== null) add(String(key));
+          if (key !== null) addAndGoOn(String(key));
         }}
         inputValue={text}
-        onInputChange={setText}
-        onBlur={() => add(text)}
+        onInputChange={type}
+        onBlur={() => add(latest.current)}
         allowsCustomValue
         allowsEmptyCollection={false}
         menuTrigger="input"
@@ -80,10 +93,7 @@ export function NamesField({ names, onChange, choices, placeholder, ...texts }: 
               spellCheck="false"
               className={clsx(inputBox, "mono pr-10 text-[0.9375rem]")}
             />
-            <Button
-              aria-label={`Show what there is: ${label}`}
-              className="absolute inset-y-1 right-1 flex w-8 items-center justify-center rounded text-ink-soft hover:bg-ink/8"
-            >
+            <Button className="absolute inset-y-1 right-1 flex w-8 items-center justify-center rounded text-ink-soft hover:bg-ink/8">
               <Icon name="chevron-down" />
             </Button>
           </span>

@@ -176,7 +176,9 @@ export async function findRankedFaults(
       signals: faults.signals,
       pins: faults.pins,
       serial: units.serial,
-      rank: sql<number>`ts_rank(${written}, websearch_to_tsquery('english', ${query}))`.mapWith(Number),
+      // ts_rank divides by the number of words asked for; a long question is no worse a one.
+      rank: sql<number>`ts_rank(${written}, websearch_to_tsquery('english', ${query}))
+        * (numnode(websearch_to_tsquery('english', ${query})) + 1) / 2`.mapWith(Number),
     })
     .from(faults)
     .innerJoin(units, eq(units.id, faults.unitId))
