@@ -11,7 +11,12 @@ type Props = { label: string; lines: readonly FamilyLine[]; project: string; act
 /** Figures in columns, with their source under each; the name stays in sight while the figures go by. */
 export function FamilyTable({ label, lines, project, acts }: Props) {
   return (
-    <div tabIndex={0} role="group" aria-label={`${label}, scrolls sideways`} className="relative -mx-4 overflow-x-auto sm:-mx-5">
+    <div
+      tabIndex={0}
+      role="group"
+      aria-label={`${label}, scrolls sideways`}
+      className="relative -mx-4 overflow-x-auto sm:-mx-5"
+    >
       <table aria-label={label} className="w-full border-separate border-spacing-0 text-left">
         <thead>
           <tr className="text-sm text-ink-soft">
