@@ -110,7 +110,9 @@ const PARTS = [
 /** What is not known yet is said in one line, not in seven empty ones. */
 function Record({ fault }: { fault: FaultView }) {
   const written = PARTS.filter(([key]) => fault[key] !== "");
-  const missing = PARTS.filter(([key]) => fault[key] === "").map(([, label]) => label.toLowerCase());
+  const missing = PARTS.filter(([key]) => fault[key] === "").map(([key, label]) =>
+    key === "nextRevision" ? "what the next revision should change" : label.toLowerCase(),
+  );
   return (
     <Panel>
       <dl className="grid gap-x-6 gap-y-3.5 sm:grid-cols-[9rem_minmax(0,1fr)]">

@@ -23,13 +23,11 @@ export function DoubtLines({ lines, serial }: { lines: readonly DoubtLineView[];
 }
 
 export function DoubtTitle({ line, serial }: { line: DoubtLineView; serial: string }) {
+  const stage = stageName(line.stage).toLowerCase();
   return (
     <p className="min-w-0">
-      {line.title}
-      <span className="text-ink-soft text-sm">
-        {" · "}
-        {line.serial === serial ? stageName(line.stage) : `${line.serial}, ${stageName(line.stage)}`}
-      </span>
+      {line.title}{" "}
+      <span className="text-ink-soft text-sm">({line.serial === serial ? stage : `${line.serial}, ${stage}`})</span>
     </p>
   );
 }

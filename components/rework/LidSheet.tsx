@@ -31,7 +31,7 @@ export function LidSheet({ project, zone, view, back, code, printedAt }: Props) 
       </div>
       {/* Paper is white and ink is black, whatever the theme of the screen. */}
       <div
-        className="overflow-x-auto border border-[#bbb] bg-[#fff] p-4 text-[#000] [--copper:#000] [--edge:#444] [--ink-faint:#333] [--ink-soft:#333] [--ink:#000] [--raised:#fff] [--rule-strong:#777] [--rule:#bbb] [--sheet:#fff] sm:p-[12mm] print:overflow-visible print:border-0 print:p-0"
+        className="overflow-x-auto border border-[#bbb] bg-[#fff] p-4 text-[#000] [--copper:#000] [--dot:#ccc] [--edge:#444] [--ink-faint:#333] [--ink-soft:#333] [--ink:#000] [--raised:#fff] [--rule-strong:#777] [--rule:#bbb] [--sheet:#fff] sm:p-[12mm] print:overflow-visible print:border-0 print:p-0"
         data-lid-sheet
         role="region"
         aria-label="The sheet"

@@ -27,13 +27,15 @@ export function WireDrawing({ connectors, wires }: Props) {
   return (
     <div className="flex flex-wrap gap-4">
       {drawn.map(({ reference, face, ends }) => (
-        <figure key={reference} className="border-rule grid-paper min-w-0 rounded-md border px-3 py-2">
-          <ConnectorFace
-            face={face}
-            lit={new Set(ends.map(({ pin }) => pin))}
-            label={`Connector ${reference}`}
-            className="w-full"
-          />
+        <figure key={reference} className="min-w-0">
+          <div className="border-rule grid-paper rounded-md border px-3 py-2">
+            <ConnectorFace
+              face={face}
+              lit={new Set(ends.map(({ pin }) => pin))}
+              label={`Connector ${reference}`}
+              className="w-full"
+            />
+          </div>
           <figcaption className="mt-1 text-sm">
             <span className="text-ink-soft">{reference}, from the card side: </span>
             <span className="mono">{ends.map(({ wire, pin }) => `${wire} ${pin}`).join("  ")}</span>
