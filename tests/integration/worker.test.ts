@@ -129,7 +129,8 @@ describe("jobs of a worker that is gone", () => {
     }
     await releaseStuckJobs();
     const held = await db.execute<{ locked_by: string }>(
-      sql`select locked_by from graphile_worker.jobs where locked_by is not null`,
+      // Workers that other tests ended in the middle of a job have left locks of their own.
+      sql`select locked_by from graphile_worker.jobs where locked_by in ('long-gone', 'busy')`,
     );
     expect(held.map((row) => row.locked_by)).toEqual(["busy"]);
     await db.execute(sql`delete from graphile_worker._private_jobs where task_id in
