@@ -40,7 +40,7 @@ export function SimilarFaults({ project, except, words, signals, pins, find }: P
   }, [project, key, find]);
 
   return (
-    <Panel title="Seen before?" level={3}>
+    <Panel title="Seen before?">
       <div aria-live="polite">
         {found === undefined || found.length === 0 ? (
           <p className="text-ink-soft text-sm">

@@ -61,7 +61,7 @@ export function DelaySheet({ project, view, line, can, offer, onEdit, onArchive 
         )}
         {limits && (
           <section
-            aria-label="Hand the window to a capture check"
+            aria-label={`Hand the window of ${line.name} to a capture check`}
             className="rounded border border-rule bg-raised px-4 py-3 print:hidden"
           >
             <h3 className="mb-2 text-base">Hand the window to a capture check</h3>

@@ -50,9 +50,10 @@ function Boards({ project, block }: { project: string; block: BlockLine }) {
         <Link
           key={code}
           href={`/projects/${project}/parts/boards/${code}`}
-          className="whitespace-nowrap hover:text-copper"
+          className="inline-flex min-h-6 items-center gap-1 whitespace-nowrap hover:text-copper"
         >
-          <span className="mono">{code}</span> <span className="text-ink-soft">× {count}</span>
+          <span className="mono">{code}</span>
+          <span className="text-ink-soft">× {count}</span>
         </Link>
       ))}
     </span>

@@ -88,7 +88,10 @@ function Boards({ project, line }: { project: string; line: OrderLine }) {
     <span className="flex flex-wrap gap-x-3 gap-y-0.5 text-sm">
       {line.perBoard.map(({ code, units, perUnit }) => (
         <span key={code} className="whitespace-nowrap">
-          <Link href={`/projects/${project}/parts/boards/${code}`} className="mono hover:text-copper">
+          <Link
+            href={`/projects/${project}/parts/boards/${code}`}
+            className="mono inline-flex min-h-6 items-center hover:text-copper"
+          >
             {code}
           </Link>{" "}
           <span className="text-ink-soft">{units === 1 ? perUnit : `${units} × ${perUnit}`}</span>

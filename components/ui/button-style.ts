@@ -23,7 +23,8 @@ const SIZES: Record<ButtonSize, string> = {
 export function buttonStyle(kind: ButtonKind = "plain", size: ButtonSize = "md", more?: string): string {
   return clsx(
     "relative inline-flex select-none items-center justify-center rounded-md border text-center font-text font-semibold leading-tight no-underline",
-    "transition-[background-color,border-color,filter] duration-100 active:translate-y-px",
+    // Only under the pointer: a button that becomes possible must be readable at once, not on its way there.
+    "duration-100 hover:transition-[background-color,border-color,filter] active:translate-y-px",
     "data-disabled:cursor-not-allowed data-disabled:border-rule-strong data-disabled:bg-transparent data-disabled:text-ink-faint data-disabled:active:translate-y-0",
     KINDS[kind],
     SIZES[size],
