@@ -21,10 +21,11 @@ export function whatGoesWithBoard({ units, revisions }: BoardView): string[] {
   ];
 }
 
-const recorded = ({ checks, attempts, files }: Holdings) => [
+const recorded = ({ checks, attempts, files, faults, reworks }: Holdings) => [
   attempts === 0
     ? `${counted(checks, "check goes", "checks go")}; nothing was recorded on ${checks === 1 ? "it" : "them"}.`
     : `${counted(checks, "check")} and ${counted(attempts, "attempt")} with every reading go. They are kept nowhere else.`,
+  ...(faults + reworks === 0 ? [] : [`${counted(faults, "fault")} and ${counted(reworks, "rework")} go.`]),
   ...(files === 0 ? [] : [`${counted(files, "file goes", "files go")}.`]),
 ];
 

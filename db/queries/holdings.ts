@@ -8,6 +8,8 @@ export type UnitHoldings = {
   checks: number;
   attempts: number;
   files: number;
+  faults: number;
+  reworks: number;
   /** Prerequisites by which checks of other units wait for this one … */
   waitsOfOtherUnits: number;
   /** … and those among them that belong to units of other boards. */
@@ -40,6 +42,8 @@ export async function findHoldings(
       (select count(*)::int from checks c where c.unit_id = held.id) as checks,
       (select count(*)::int from attempts t where t.unit_id = held.id) as attempts,
       (select count(*)::int from attachments a where a.unit_id = held.id and ${filesOf(scope, unitIds)}) as files,
+      (select count(*)::int from faults f where f.unit_id = held.id) as faults,
+      (select count(*)::int from reworks w where w.unit_id = held.id) as reworks,
       (select count(*)::int from waits where waits.unit_id = held.id) as "waitsOfOtherUnits",
       (select count(*)::int from waits where waits.unit_id = held.id and waits.board_id <> held.board_id) as "waitsOfOtherBoards"
     from held`);

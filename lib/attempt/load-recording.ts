@@ -36,6 +36,8 @@ async function findFreeEvidence(
         inArray(attachments.id, input.attachmentIds),
         isNull(attachments.attemptId),
         isNull(attachments.logEntryId),
+        isNull(attachments.faultId),
+        isNull(attachments.reworkId),
         isNull(attachments.archivedAt),
       ),
     )

@@ -20,7 +20,13 @@ export async function placePictures(
 ): Promise<void> {
   const ids = pictures.map((picture) => picture.id);
   const ours = eq(attachments.projectId, scope.projectId);
-  const free = and(isNull(attachments.logEntryId), isNull(attachments.checkId), isNull(attachments.attemptId));
+  const free = and(
+    isNull(attachments.logEntryId),
+    isNull(attachments.checkId),
+    isNull(attachments.attemptId),
+    isNull(attachments.faultId),
+    isNull(attachments.reworkId),
+  );
   const usable = ids.length
     ? await tx
         .select({ id: attachments.id })

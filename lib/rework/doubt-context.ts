@@ -28,7 +28,7 @@ type InProject = { projectId: string };
 /** Nothing that a rework names has more pins on one board. */
 const MOST_POINTS = 20_000;
 
-/** All that decides which checks a rework of the unit puts in doubt. Four queries whatever the size. */
+/** All that decides which checks a rework of the unit puts in doubt. Four queries whatever the size of the machine. */
 export async function loadDoubtGround(
   db: Queryable,
   scope: InProject,

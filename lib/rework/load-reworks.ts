@@ -1,4 +1,4 @@
-import { and, asc, eq, isNull, ne } from "drizzle-orm";
+import { and, asc, eq, inArray, isNull, ne } from "drizzle-orm";
 import { database } from "@/db/client";
 import { findReworkEvidence } from "@/db/queries/attachments";
 import { findConnectorsOfBoard } from "@/db/queries/connectors";
@@ -88,8 +88,8 @@ async function findOrigins(scope: ProjectScope, ids: readonly string[]) {
     .select({ id: reworks.id, serial: units.serial, number: reworks.number })
     .from(reworks)
     .innerJoin(units, eq(units.id, reworks.unitId))
-    .where(eq(reworks.projectId, scope.projectId));
-  return new Map(rows.filter(({ id }) => ids.includes(id)).map(({ id, serial, number }) => [id, { serial, number }]));
+    .where(and(eq(reworks.projectId, scope.projectId), inArray(reworks.id, [...ids])));
+  return new Map(rows.map(({ id, serial, number }) => [id, { serial, number }]));
 }
 
 export type ReworkComparison = { other: { serial: string; revision: string }; pairs: Comparison[] };

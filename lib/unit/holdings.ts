@@ -9,6 +9,8 @@ export function addHoldings(each: readonly Holdings[]): Holdings {
     checks: sum("checks"),
     attempts: sum("attempts"),
     files: sum("files"),
+    faults: sum("faults"),
+    reworks: sum("reworks"),
     waitsOfOtherUnits: sum("waitsOfOtherUnits"),
     waitsOfOtherBoards: sum("waitsOfOtherBoards"),
   };

@@ -4,6 +4,7 @@ import { describe, expect, it } from "vitest";
 import { boards, slots, units } from "@/db/schema/boards";
 import { events } from "@/db/schema/events";
 import { attachments, logEntries } from "@/db/schema/evidence";
+import { faults, reworks } from "@/db/schema/faults";
 import { procedures } from "@/db/schema/procedures";
 import { attempts, checkPrerequisites, checks } from "@/db/schema/travelers";
 import { archiveBoard } from "@/lib/board/archive-board";
@@ -15,6 +16,8 @@ import { archiveUnit } from "@/lib/unit/archive-unit";
 import { purgeUnit } from "@/lib/unit/purge-unit";
 import { checkOf, conforms, must, refusal, send, state, stateOf } from "../support/bench";
 import { one, useDatabase } from "../support/database";
+import { fault } from "../support/faults";
+import { rework } from "../support/reworks";
 import { makeBoard, makeEvidence, makeProject, makeUnit } from "../support/project";
 
 const db = useDatabase();
@@ -51,6 +54,28 @@ async function saidOf({ project }: Machine, kind: string) {
 }
 
 describe("purging a unit", () => {
+  it("takes its faults and reworks, and lets go what those put in doubt elsewhere", async () => {
+    const given = await machine();
+    const { maintainer, builder, psu, tim, rail, project } = given;
+    await must(send(builder, rail.id, { record: conforms }));
+    await state(builder, tim, "Clock runs", conforms);
+    const { number } = await must(fault(builder, { unit: "PSU-01", checkId: rail.id }));
+    const { id: faultId } = one(
+      await db
+        .select()
+        .from(faults)
+        .where(and(eq(faults.projectId, project.id), eq(faults.number, number))),
+    );
+    await must(rework(builder, psu, { rails: ["+5V"], added: [{ checkId: rail.id, reason: "" }] }));
+    expect(await stateOf(tim, "Clock runs")).toBe("doubtful");
+    const input = await archivedUnit(given);
+    await must(purgeUnit(maintainer, input));
+    expect(await db.select().from(faults).where(eq(faults.id, faultId))).toEqual([]);
+    expect(await db.select().from(reworks).where(eq(reworks.projectId, project.id))).toEqual([]);
+    expect(await stateOf(tim, "Clock runs")).toBe("passed");
+    expect(await recomputeAll(db, project.id)).toEqual([]);
+  });
+
   it("is refused while it is in work, and unless its serial number is typed exactly", async () => {
     const given = await machine();
     const early = { ...given.write(), unitId: given.psu.id, confirmation: "PSU-01" };
