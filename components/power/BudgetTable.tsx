@@ -18,7 +18,7 @@ export function BudgetTable({ boards, rails, machine, chosen, addressOf }: Props
   const shown = rails.filter(({ name }) => boards.some((board) => drawOf(board, name)));
   return (
     <div
-      className="min-w-0 overflow-x-auto"
+      className="relative min-w-0 overflow-x-auto"
       tabIndex={0}
       role="group"
       aria-label="What each board draws, scrolls sideways"

@@ -25,7 +25,7 @@ export function DropDrawing({ rail, drops, slots }: Props) {
     return position === rail.sourceSlot ? [{ x: x(index), y: y(0), drop: null }] : [];
   });
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="group" aria-label={`${rail.name} along the slots`}>
+    <div className="relative overflow-x-auto" tabIndex={0} role="group" aria-label={`${rail.name} along the slots`}>
       <div className="min-w-max">
         <div className="grid-paper relative h-24 border border-rule print:[print-color-adjust:exact]">
           <Level at={y(0)} text={quantity(rail.volts, "V")} className="border-ink-soft" />
