@@ -34,9 +34,14 @@ test("A netlist of 2,000 nets is taken, six of its signals are probed by keyboar
   await awake(page);
   await page.getByText("Some signals").click();
   const signals = page.getByRole("combobox", { name: "Add a signal" });
+  const chosen = page.getByRole("list", { name: "Signals of the round" });
   for (const signal of ["A", "B", "C", "D", "E", "F"]) {
-    await signals.fill(signal);
-    await page.getByRole("option", { name: signal, exact: true }).click();
+    // The field empties itself after a choice; what is typed in that moment is typed again.
+    await expect(async () => {
+      await signals.fill(signal);
+      await page.getByRole("option", { name: signal, exact: true }).click({ timeout: 2000 });
+      await expect(chosen.getByText(signal, { exact: true })).toBeVisible({ timeout: 2000 });
+    }).toPass();
   }
   await page.getByRole("button", { name: /^Start with \d+ probes$/ }).click();
   await page.waitForURL(/\/probe\//);
