@@ -31,6 +31,13 @@ export function FaultAside({ project, zone, fault, face }: Props) {
               <StateWord state={check.state} size="sm" />
             </p>
           )}
+          {fault.probePlanId && (
+            <p>
+              <Link href={`${unit}/probing/${fault.probePlanId}`} className="link" prefetch={false}>
+                The round of probing that found it
+              </Link>
+            </p>
+          )}
           {signals.length > 0 && (
             <p className="mono text-sm">
               {signals.map((name, index) => (

@@ -57,31 +57,33 @@ export function ReworksPlace({ project, zone, view, comparison, canRecord, evide
         ) : undefined
       }
     >
-      {wires.length > 0 && (
-        <Panel title="Bodge wires" note={String(wires.length)}>
-          <div className="grid gap-4">
-            <WireTable wires={wires} />
-            <WireDrawing connectors={view.connectors} wires={wires.map(({ wire }) => wire)} />
-          </div>
-        </Panel>
-      )}
-      {view.reworks.length === 0 ? (
-        <EmptyState title="As it came from the iron" action={mayRecord && record}>
-          Nothing was reworked on {serial}. A bodge wire, a cut track, a swapped part, a reflow, another table: each is
-          written down here, and what it touches is repeated.
-        </EmptyState>
-      ) : (
-        <section aria-label="All reworks" className="border-rule bg-sheet divide-rule divide-y rounded-lg border">
-          {view.reworks.map((rework, index) => (
-            <ReworkCard
-              key={rework.id}
-              {...{ project, zone, serial, rework, evidence }}
-              isNewest={index === 0}
-              others={canRecord ? view.others.map((other) => other.serial) : []}
-            />
-          ))}
-        </section>
-      )}
+      <div className="flex flex-col gap-5">
+        {wires.length > 0 && (
+          <Panel title="Bodge wires" note={String(wires.length)}>
+            <div className="grid gap-4">
+              <WireTable wires={wires} />
+              <WireDrawing connectors={view.connectors} wires={wires.map(({ wire }) => wire)} />
+            </div>
+          </Panel>
+        )}
+        {view.reworks.length === 0 ? (
+          <EmptyState title="As it came from the iron" action={mayRecord && record}>
+            Nothing was reworked on {serial}. A bodge wire, a cut track, a swapped part, a reflow, another table: each
+            is written down here, and what it touches is repeated.
+          </EmptyState>
+        ) : (
+          <section aria-label="All reworks" className="border-rule bg-sheet divide-rule divide-y rounded-lg border">
+            {view.reworks.map((rework, index) => (
+              <ReworkCard
+                key={rework.id}
+                {...{ project, zone, serial, rework, evidence }}
+                isNewest={index === 0}
+                others={canRecord ? view.others.map((other) => other.serial) : []}
+              />
+            ))}
+          </section>
+        )}
+      </div>
     </Page>
   );
 }
@@ -89,5 +91,5 @@ export function ReworksPlace({ project, zone, view, comparison, canRecord, evide
 function lede(reworks: number, wires: number): string {
   if (reworks === 0) return "Nothing was changed since it was built.";
   const first = `${reworks} ${reworks === 1 ? "rework" : "reworks"} since it was built`;
-  return wires === 0 ? `${first}.` : `${first}, ${wires} bodge ${wires === 1 ? "wire" : "wires"} among them.`;
+  return wires === 0 ? `${first}.` : `${first}; ${wires} bodge ${wires === 1 ? "wire is" : "wires are"} in.`;
 }

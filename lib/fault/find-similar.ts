@@ -23,7 +23,7 @@ const MOST = 4;
  * By ts_rank a shared word weighs about 0.6 in the title, 0.24 in symptom, cause and mend, 0.12 elsewhere. One in the title
  * or two in the symptom say something; a shared signal says more. Common practice, no source.
  */
-const LEAST_RANK = 0.3;
+const LEAST_RANK = 0.4;
 const PER_NAME = 1;
 
 /** Earlier faults of this project that share signals, pins or words, the likest first. */

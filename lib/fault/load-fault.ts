@@ -31,6 +31,8 @@ export type FaultView = FaultTexts & {
   check: { id: string; title: string; state: CheckState; stage: Stage } | null;
   /** The attempt that showed it. */
   attemptId: string | null;
+  /** The round of probing that found it. */
+  probePlanId: string | null;
   attempts: SeenAttempt[];
   reworks: { id: string; number: number; serial: string; title: string; says: string; by: string; at: string }[];
   evidence: EvidenceView[];
@@ -73,6 +75,7 @@ export async function loadFault(scope: ProjectScope, number: number): Promise<Fa
         ? { id: fault.checkId, title: found.checkTitle, state: found.checkState, stage: found.checkStage }
         : null,
     attemptId: fault.attemptId,
+    probePlanId: fault.probePlanId,
     attempts,
     reworks: reworks.map((row) => ({
       ...{ id: row.id, number: row.number, serial: row.serial, title: nameRework(row) },

@@ -6,7 +6,7 @@ import { procedureChecks } from "@/db/schema/procedures";
 import { checks } from "@/db/schema/travelers";
 import type { ProjectScope } from "@/lib/access/scope";
 import { loadBoardNames, type BoardNames } from "@/lib/board/load-board-names";
-import { attemptsOf } from "./attempts-of";
+import { attemptsOf, type SeenAttempt } from "./attempts-of";
 
 export type NewFaultView = {
   units: { serial: string; board: string }[];
@@ -64,11 +64,7 @@ export async function loadNewFault(
     attemptId: seen?.attempt?.id ?? null,
     probePlanId: round?.id ?? null,
     title: found?.title ?? (seen ? `${seen.check.title}: does not conform` : ""),
-    symptom: found
-      ? found.symptom
-      : seen?.attempt
-        ? [seen.attempt.summary, seen.attempt.note].filter(Boolean).join(". ")
-        : "",
+    symptom: found?.symptom ?? (seen?.attempt ? told(seen.attempt) : ""),
     signals: found?.signals ?? seen?.check.covers.signals ?? [],
     pins: found?.pins ?? seen?.check.covers.pins ?? [],
     names,
@@ -94,3 +90,7 @@ async function seenAt(scope: ProjectScope, unitId: string, checkId: string) {
   const attempts = await attemptsOf(db, scope, check.id, 20);
   return { check, attempt: attempts.find(({ verdict }) => verdict === "does-not-conform") };
 }
+
+/** The bare verdict says no more than the title does. */
+const told = ({ summary, note }: SeenAttempt): string =>
+  [summary === "does not conform" ? "" : summary, note].filter(Boolean).join(". ");
