@@ -8,7 +8,7 @@ import { Dialog } from "@/components/ui/Dialog";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { Panel } from "@/components/ui/Panel";
 import { Table } from "@/components/ui/Table";
-import { Disclosure } from "@/components/workshop/Disclosure";
+import { ArchivedList } from "@/components/workshop/ArchivedList";
 import type { BoardLine, BoardsView } from "@/lib/board/load-boards";
 import type { BoardActs, SlotActs } from "./board-acts";
 import { columnsFor, PhoneBoard } from "./board-columns";
@@ -71,32 +71,26 @@ export function BoardsPlace({ project, zone, view, canEdit, canPlace, boardActs,
           />
         </Panel>
         <SlotsPanel project={project} zone={zone} view={view} canEdit={canPlace} acts={slotActs} />
-        {archived.length > 0 && (
-          <Disclosure summary={archived.length === 1 ? "1 archived board" : `${archived.length} archived boards`}>
-            <ul className="flex flex-col gap-2">
-              {archived.map((board) => (
-                <li key={board.id} className="flex flex-wrap items-center gap-x-4 gap-y-1">
-                  <Link href={`/projects/${project}/boards/${board.code}`} className="link">
-                    <span className="mono text-sm">{board.code}</span> {board.name}
-                  </Link>
-                  {canEdit && (
-                    <Button
-                      size="sm"
-                      onPress={() =>
-                        void act(
-                          () => boardActs.restore({ project, writeId: crypto.randomUUID(), boardId: board.id }),
-                          () => `${board.name} is back with its units.`,
-                        )
-                      }
-                    >
-                      Restore
-                    </Button>
-                  )}
-                </li>
-              ))}
-            </ul>
-          </Disclosure>
-        )}
+        <ArchivedList
+          what="archived board"
+          items={archived}
+          keyOf={({ id }) => id}
+          nameOf={({ name }) => name}
+          show={({ code, name }) => (
+            <Link href={`/projects/${project}/boards/${code}`} className="link">
+              <span className="mono text-sm">{code}</span> {name}
+            </Link>
+          )}
+          restore={
+            canEdit
+              ? ({ id, name }) =>
+                  void act(
+                    () => boardActs.restore({ project, writeId: crypto.randomUUID(), boardId: id }),
+                    () => `${name} is back with its units.`,
+                  )
+              : undefined
+          }
+        />
       </div>
     </Page>
   );

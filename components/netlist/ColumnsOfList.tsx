@@ -1,111 +1,28 @@
 "use client";
 
-import { Checkbox } from "@/components/ui/Checkbox";
+import { ColumnTable } from "@/components/table-file/ColumnTable";
 import { Select } from "@/components/ui/Select";
-import { LIST_COLUMNS, type ListColumn, type ListMapping } from "@/lib/netlist/guess-pin-columns";
+import type { ListColumn } from "@/lib/netlist/guess-pin-columns";
 import { PIN_LIST_UNITS } from "@/lib/netlist/schema";
-import { DELIMITERS, type Delimiter } from "@/lib/pin-map-file/split-table";
 import type { Corrections, NetlistRead } from "./use-netlist-file";
 
-const SHOWN = 5;
-const LEFT_OUT = "out";
 const NAMES: Record<ListColumn, string> = { net: "Net", part: "Part", pin: "Pin", x: "X", y: "Y" };
-const OPTIONS = [{ id: LEFT_OUT, label: "Left out" }, ...LIST_COLUMNS.map((id) => ({ id, label: NAMES[id] }))];
-const SEPARATORS: Record<Delimiter, string> = { tab: "Tab", semicolon: "Semicolon", comma: "Comma" };
-// Object.keys() gives the very keys of the record; the compiler widens them to string.
-const DELIMITER_IDS = Object.keys(DELIMITERS) as Delimiter[];
 
 type Props = { read: NonNullable<NetlistRead["table"]>; correct: (change: Corrections) => void };
 
-/** The first rows as they were understood; a person corrects the separator, the headings and each column. */
+/** How a pin list was read; the unit is asked for when it has places. */
 export function ColumnsOfList({ read: { table, hasHeadings, mapping, unit }, correct }: Props) {
-  const rows = (hasHeadings ? table.rows.slice(1) : table.rows).slice(0, SHOWN);
-  const headings = hasHeadings ? (table.rows[0]?.cells ?? []) : [];
   return (
-    <div className="flex flex-col gap-4">
-      <div className="flex flex-wrap items-end gap-x-6 gap-y-2">
+    <ColumnTable {...{ table, hasHeadings, mapping, correct }} names={NAMES}>
+      {(mapping.includes("x") || mapping.includes("y")) && (
         <Select
-          label="Separator"
-          className="w-40"
-          options={DELIMITER_IDS.map((id) => ({ id, label: SEPARATORS[id] }))}
-          value={table.delimiter}
-          onChange={(id) =>
-            // Another separator makes another table: what was corrected of the old one goes.
-            correct({
-              delimiter: DELIMITER_IDS.find((one) => one === id) ?? "comma",
-              hasHeadings: undefined,
-              mapping: undefined,
-            })
-          }
+          label="Places are in"
+          className="w-32"
+          options={PIN_LIST_UNITS.map((id) => ({ id, label: id }))}
+          value={unit}
+          onChange={(id) => correct({ unit: PIN_LIST_UNITS.find((one) => one === id) ?? "mm" })}
         />
-        {(mapping.includes("x") || mapping.includes("y")) && (
-          <Select
-            label="Places are in"
-            className="w-32"
-            options={PIN_LIST_UNITS.map((id) => ({ id, label: id }))}
-            value={unit}
-            onChange={(id) => correct({ unit: PIN_LIST_UNITS.find((one) => one === id) ?? "mm" })}
-          />
-        )}
-        <Checkbox
-          label="The first row names the columns"
-          value={hasHeadings}
-          onChange={(isOn) => correct({ hasHeadings: isOn })}
-        />
-      </div>
-      <div
-        tabIndex={0}
-        role="group"
-        aria-label="First rows of the file, scrolls sideways"
-        className="relative -mx-4 overflow-x-auto px-4 pb-1 sm:-mx-5 sm:px-5"
-      >
-        <table className="border-collapse text-left text-sm">
-          <thead>
-            <tr>
-              <th scope="col" className="pr-3 align-bottom font-semibold text-ink-soft">
-                <span className="sr-only">Line</span>
-              </th>
-              {mapping.map((column, at) => (
-                <th key={at} scope="col" className="min-w-36 max-w-56 pb-2 pr-2 align-bottom font-normal">
-                  <span className="mono block truncate pb-1 text-xs text-ink-soft">
-                    {headings[at] ?? `column ${at + 1}`}
-                  </span>
-                  <Select
-                    label={`What ${headings[at] ?? `column ${at + 1}`} is`}
-                    isLabelHidden
-                    options={OPTIONS}
-                    value={column === "" ? LEFT_OUT : column}
-                    onChange={(id) => correct({ mapping: withColumn(mapping, at, id) })}
-                  />
-                </th>
-              ))}
-            </tr>
-          </thead>
-          <tbody>
-            {rows.map(({ line, cells }) => (
-              <tr key={line} className="border-t border-rule">
-                <th scope="row" className="mono py-1.5 pr-3 text-right text-xs font-normal text-ink-soft">
-                  {line}
-                </th>
-                {mapping.map((column, at) => (
-                  <td
-                    key={at}
-                    className={`mono max-w-56 truncate py-1.5 pr-3 text-xs ${column === "" ? "text-ink-faint" : ""}`}
-                  >
-                    {cells[at] ?? ""}
-                  </td>
-                ))}
-              </tr>
-            ))}
-          </tbody>
-        </table>
-      </div>
-    </div>
+      )}
+    </ColumnTable>
   );
-}
-
-/** A column has one meaning, and a meaning one column: what had it before is left out. */
-function withColumn(mapping: ListMapping, at: number, id: string): ListMapping {
-  const wanted = LIST_COLUMNS.find((column) => column === id) ?? "";
-  return mapping.map((column, other) => (other === at ? wanted : column === wanted ? "" : column));
 }

@@ -3,13 +3,11 @@
 import Link from "next/link";
 import { useAct } from "@/components/board/use-act";
 import { Page } from "@/components/shell/Page";
-import { Button } from "@/components/ui/Button";
 import { ButtonLink } from "@/components/ui/ButtonLink";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { Panel } from "@/components/ui/Panel";
 import { Table } from "@/components/ui/Table";
-import { counted } from "@/components/workshop/counted";
-import { Disclosure } from "@/components/workshop/Disclosure";
+import { ArchivedList } from "@/components/workshop/ArchivedList";
 import type { BlockLine } from "@/lib/block/load-blocks";
 import { BlockDrawing } from "./BlockDrawing";
 import { columnsFor, PhoneBlock } from "./block-columns";
@@ -54,33 +52,26 @@ export function BlocksPlace({ project, blocks, canEdit, restore }: Props) {
             />
           </Panel>
         )}
-        {archived.length > 0 && (
-          <Disclosure summary={counted(archived.length, "archived block")}>
-            <ul className="flex flex-col gap-2">
-              {archived.map(({ id, name }) => (
-                <li key={id} className="flex flex-wrap items-center gap-x-4 gap-y-1">
-                  <Link href={`/projects/${project}/parts/blocks/${id}`} className="link">
-                    {name}
-                  </Link>
-                  {canEdit && (
-                    <Button
-                      size="sm"
-                      aria-label={`Restore ${name}`}
-                      onPress={() =>
-                        void act(
-                          () => restore({ project, writeId: crypto.randomUUID(), block: id }),
-                          () => `${name} is back.`,
-                        )
-                      }
-                    >
-                      Restore
-                    </Button>
-                  )}
-                </li>
-              ))}
-            </ul>
-          </Disclosure>
-        )}
+        <ArchivedList
+          what="archived block"
+          items={archived}
+          keyOf={({ id }) => id}
+          nameOf={({ name }) => name}
+          show={({ id, name }) => (
+            <Link href={`/projects/${project}/parts/blocks/${id}`} className="link">
+              {name}
+            </Link>
+          )}
+          restore={
+            canEdit
+              ? ({ id, name }) =>
+                  void act(
+                    () => restore({ project, writeId: crypto.randomUUID(), block: id }),
+                    () => `${name} is back.`,
+                  )
+              : undefined
+          }
+        />
       </div>
     </Page>
   );

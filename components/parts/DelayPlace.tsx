@@ -7,8 +7,7 @@ import { Page } from "@/components/shell/Page";
 import { Button } from "@/components/ui/Button";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { Panel } from "@/components/ui/Panel";
-import { counted } from "@/components/workshop/counted";
-import { Disclosure } from "@/components/workshop/Disclosure";
+import { ArchivedList } from "@/components/workshop/ArchivedList";
 import type { DelayPathLine, DelayView } from "@/lib/delay-path/load-delay-paths";
 import { DelayEditor } from "./DelayEditor";
 import { DelaySheet } from "./DelaySheet";
@@ -94,22 +93,14 @@ export function DelayPlace({ project, view, can, acts }: Props) {
             />
           ),
         )}
-        {archived.length > 0 && (
-          <Disclosure summary={counted(archived.length, "archived path")}>
-            <ul className="flex flex-col gap-2">
-              {archived.map((path) => (
-                <li key={path.id} className="flex flex-wrap items-center gap-x-4 gap-y-1">
-                  {path.name}
-                  {can.edit && (
-                    <Button size="sm" aria-label={`Restore ${path.name}`} onPress={() => void restore(path)}>
-                      Restore
-                    </Button>
-                  )}
-                </li>
-              ))}
-            </ul>
-          </Disclosure>
-        )}
+        <ArchivedList
+          what="archived path"
+          items={archived}
+          keyOf={({ id }) => id}
+          nameOf={({ name }) => name}
+          show={({ name }) => name}
+          restore={can.edit ? (path) => void restore(path) : undefined}
+        />
       </div>
     </Page>
   );

@@ -7,8 +7,7 @@ import { EmptyState } from "@/components/ui/EmptyState";
 import { Panel } from "@/components/ui/Panel";
 import { Table } from "@/components/ui/Table";
 import type { TableColumn } from "@/components/ui/table-column";
-import { counted } from "@/components/workshop/counted";
-import { Disclosure } from "@/components/workshop/Disclosure";
+import { ArchivedList } from "@/components/workshop/ArchivedList";
 import { builtInName } from "@/lib/part/built-in-name";
 import type { PartLine, PartsView } from "@/lib/part/load-parts";
 import { PartDialog } from "./PartDialog";
@@ -118,24 +117,16 @@ export function OwnParts({ project, view, canEdit, acts }: Props) {
           </EmptyState>
         }
       />
-      {archived.length > 0 && (
-        <div className="mt-3">
-          <Disclosure summary={counted(archived.length, "archived part")}>
-            <ul className="flex flex-col gap-2">
-              {archived.map((part) => (
-                <li key={part.id} className="flex flex-wrap items-center gap-x-4 gap-y-1">
-                  <span className="mono text-sm">{part.number}</span>
-                  {canEdit && (
-                    <Button size="sm" aria-label={`Restore ${part.number}`} onPress={() => void restore(part)}>
-                      Restore
-                    </Button>
-                  )}
-                </li>
-              ))}
-            </ul>
-          </Disclosure>
-        </div>
-      )}
+      <div className="mt-3 empty:hidden">
+        <ArchivedList
+          what="archived part"
+          items={archived}
+          keyOf={({ id }) => id}
+          nameOf={({ number }) => number}
+          show={({ number }) => <span className="mono text-sm">{number}</span>}
+          restore={canEdit ? (part) => void restore(part) : undefined}
+        />
+      </div>
     </Panel>
   );
 }

@@ -22,52 +22,62 @@ import type { RecordAttemptInput } from "./schema";
  * to arrive counts; nothing is recorded past an open hold point or prerequisite.
  */
 export async function recordAttempt(scope: ProjectScope, input: RecordAttemptInput): Promise<Answer<RecordedAttempt>> {
-  const { projectId, viewer } = scope;
+  const { viewer } = scope;
   if (input.madeBy !== undefined && input.madeBy !== viewer.userId) {
     return refuse("signed-out", "This was recorded by somebody else on this device. It goes out when they sign in.");
   }
-  return change({ writeId: input.id, userId: viewer.userId, action: "record-attempt" }, async (tx) => {
-    await shareStructure(tx, projectId);
-    const recording = await loadRecording(tx, scope, input);
-    const { check } = recording;
-    const kind = checkKind(check.kind);
-    const { entry, judged } = judgeAttempt(scope, input, recording);
+  return change({ writeId: input.id, userId: viewer.userId, action: "record-attempt" }, (tx) =>
+    recordAttemptIn(tx, scope, input),
+  );
+}
 
-    await (check.hasDependants ? lockAffectedUnits(tx, projectId, [check.unitId]) : lockOneCheck(tx, check));
-    const before = await findStanding(tx, check.id, viewer.userId);
-    if (!before || before.retired) return rejectRetired(check.title);
-    if (before.blocked) return rejectBlocked(tx, projectId, check);
+/** The same within a change that has more to do, such as closing a round of probing. */
+export async function recordAttemptIn(
+  tx: Transaction,
+  scope: ProjectScope,
+  input: RecordAttemptInput,
+): Promise<RecordedAttempt> {
+  const { projectId, viewer } = scope;
+  await shareStructure(tx, projectId);
+  const recording = await loadRecording(tx, scope, input);
+  const { check } = recording;
+  const kind = checkKind(check.kind);
+  const { entry, judged } = judgeAttempt(scope, input, recording);
 
-    const summary = kind.summary(check.spec, entry, judged.readings);
-    const { verdict } = judged;
-    const inserted = await insertAttempt(tx, scope, { ...recording, input, entry, judged });
-    const now = movesNoOther(check, before.state, verdict)
-      ? await settleCheck(tx, projectId, check.id, { id: input.id, verdict })
-      : await refreshed(tx, scope, check);
-    const subject = { projectId, actorId: viewer.userId, unitId: check.unitId, checkId: check.id, subjectId: input.id };
-    await recordEvent(tx, subject, "attempt.recorded", {
-      serial: check.serial,
-      title: check.title,
-      verdict,
-      reading: summary,
-      from: before.state,
-      to: now.state,
-      firstPass: !before.attempted && verdict !== "does-not-conform",
-    });
-    return {
-      attemptId: input.id,
-      checkId: check.id,
-      arrival: inserted.arrival,
-      recordedAt: inserted.recordedAt.toISOString(),
-      verdict,
-      summary,
-      sentences: inserted.sentences,
-      from: before.state,
-      state: now.state,
-      stateReason: now.reason,
-      overtook: overtaken(before, input.seenArrival, kind, check.spec),
-    };
+  await (check.hasDependants ? lockAffectedUnits(tx, projectId, [check.unitId]) : lockOneCheck(tx, check));
+  const before = await findStanding(tx, check.id, viewer.userId);
+  if (!before || before.retired) return rejectRetired(check.title);
+  if (before.blocked) return rejectBlocked(tx, projectId, check);
+
+  const summary = kind.summary(check.spec, entry, judged.readings);
+  const { verdict } = judged;
+  const inserted = await insertAttempt(tx, scope, { ...recording, input, entry, judged });
+  const now = movesNoOther(check, before.state, verdict)
+    ? await settleCheck(tx, projectId, check.id, { id: input.id, verdict })
+    : await refreshed(tx, scope, check);
+  const subject = { projectId, actorId: viewer.userId, unitId: check.unitId, checkId: check.id, subjectId: input.id };
+  await recordEvent(tx, subject, "attempt.recorded", {
+    serial: check.serial,
+    title: check.title,
+    verdict,
+    reading: summary,
+    from: before.state,
+    to: now.state,
+    firstPass: !before.attempted && verdict !== "does-not-conform",
   });
+  return {
+    attemptId: input.id,
+    checkId: check.id,
+    arrival: inserted.arrival,
+    recordedAt: inserted.recordedAt.toISOString(),
+    verdict,
+    summary,
+    sentences: inserted.sentences,
+    from: before.state,
+    state: now.state,
+    stateReason: now.reason,
+    overtook: overtaken(before, input.seenArrival, kind, check.spec),
+  };
 }
 
 async function refreshed(tx: Transaction, { projectId, viewer }: ProjectScope, check: CheckRow) {

@@ -1,12 +1,8 @@
 import type { CheckState, Verdict } from "@/db/schema/travelers";
+import { nameCheck } from "@/lib/calc/check-graph";
 import type { Blocker, CheckHistory } from "./check-history";
 import type { Doubt } from "./find-doubt";
 import { isReworked } from "./is-reworked";
-
-/** Names a check from the point of view of a unit: the serial only when it is another one. */
-export function nameCheck(check: { serial: string; title: string }, fromSerial: string): string {
-  return check.serial === fromSerial ? `“${check.title}”` : `“${check.title}” of ${check.serial}`;
-}
 
 /** "the hold point “Rails to ground” and 2 more". */
 export function nameBlockers(blockers: readonly Blocker[], fromSerial: string): string {

@@ -1,6 +1,6 @@
 import { phrases, type SentenceContext, type SentencePart } from "./phrases";
 import { eventPayloads, type EventKind, type EventPayload } from "./schema";
-import { WRITERS } from "./sentence-writers";
+import { WRITERS } from "./sentences/list";
 
 export type { SentenceContext, SentencePart } from "./phrases";
 

@@ -3,15 +3,14 @@ import { findStandingChecks } from "@/db/queries/travelers";
 import { checkPrerequisites, type CheckState } from "@/db/schema/travelers";
 import type { ProjectScope } from "@/lib/access/scope";
 import { reject, type Answer } from "@/lib/actions/answer";
+import { nameCheck } from "@/lib/calc/check-graph";
 import { insist, NO_SUCH_CHECK } from "@/lib/check/lock-check";
 import { lockStructure } from "@/lib/check/lock-states";
 import { refreshStates } from "@/lib/check/refresh-states";
 import { standingFromRow } from "@/lib/check/standing-from-row";
-import { nameCheck } from "@/lib/check/state-reason";
 import { change } from "@/lib/event/change";
 import { recordEvent } from "@/lib/event/record-event";
 import { describeCircle, findCircle, waitsFor } from "./find-circle";
-
 import type { PrerequisiteInput } from "./schema";
 
 /** One check waits for another from now on, also across units. Never in a circle. */

@@ -1,4 +1,4 @@
-import { nameCheck } from "@/lib/check/state-reason";
+import { describeCircle as describe, shortestWayRound } from "@/lib/calc/check-graph";
 import { groupUnits } from "@/lib/check/unit-order";
 
 type Placed = { id: string; unitId: string; position: number; holdPoint: boolean; needs: readonly string[] };
@@ -18,35 +18,10 @@ export function waitsFor(checks: readonly Placed[]): Map<string, string[]> {
 
 /** The shortest way from a check through what it waits for back to itself, the check first; undefined when there is none. */
 export function findCircle(edges: ReadonlyMap<string, readonly string[]>, start: string): string[] | undefined {
-  const cameFrom = new Map<string, string>();
-  const queue = [start];
-  for (let at = queue.shift(); at !== undefined; at = queue.shift()) {
-    for (const next of edges.get(at) ?? []) {
-      if (next === start) return wayBack(cameFrom, start, at);
-      if (cameFrom.has(next)) continue;
-      cameFrom.set(next, at);
-      queue.push(next);
-    }
-  }
-  return undefined;
+  const circle = shortestWayRound(start, (id) => edges.get(id) ?? []);
+  return circle.length === 0 ? undefined : circle;
 }
 
-function wayBack(cameFrom: ReadonlyMap<string, string>, start: string, end: string): string[] {
-  const way = [end];
-  for (let at = end; at !== start;) {
-    const before = cameFrom.get(at);
-    if (before === undefined) break;
-    way.unshift(before);
-    at = before;
-  }
-  return way;
-}
-
-/** "“A” would wait for “B”, which waits for “C” of TIM-01, which waits for “A”." */
-export function describeCircle(members: readonly { serial: string; title: string }[]): string {
-  const [first, ...rest] = members;
-  if (!first) return "";
-  const name = (check: { serial: string; title: string }) => nameCheck(check, first.serial);
-  if (rest.length === 0) return `${name(first)} would wait for itself.`;
-  return `${name(first)} would wait for ${[...rest, first].map(name).join(", which waits for ")}.`;
-}
+/** Of a circle that a change would close: "“A” would wait for “B”, which waits for “A”." */
+export const describeCircle = (members: readonly { serial: string; title: string }[]): string =>
+  describe(members, "would wait");

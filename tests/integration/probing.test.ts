@@ -3,6 +3,7 @@ import { describe, expect, it } from "vitest";
 import { database } from "@/db/client";
 import { eq } from "drizzle-orm";
 import { probeResults } from "@/db/schema/netlists";
+import { attempts } from "@/db/schema/travelers";
 import { askAgain } from "@/lib/probing/ask-again";
 import { closeRound } from "@/lib/probing/close-round";
 import { loadRound } from "@/lib/probing/load-round";
@@ -111,6 +112,18 @@ describe("A round of probing", () => {
     expect(await must(closeRound(at.builder, input))).toMatchObject({ conforms: false });
     expect(await must(closeRound(at.builder, input))).toMatchObject({ conforms: false });
     expect(await stateOf(at.unit, CHECK)).toBe("failed");
+  });
+
+  it("that two people close at once leaves one attempt", async () => {
+    const at = await bench();
+    await probeAll(at, sound);
+    const check = await checkOf(at.unit, CHECK);
+    const closed = await Promise.all(
+      [at.builder, at.maintainer].map((scope) => closeRound(scope, closing(at, check.id))),
+    );
+    expect(closed.map(({ ok }) => ok).sort()).toEqual([false, true]);
+    expect(closed.flatMap((one) => (one.ok ? [] : [one.error.code]))).toEqual(["gone"]);
+    expect(await database().select().from(attempts).where(eq(attempts.checkId, check.id))).toHaveLength(1);
   });
 
   it("names the open net and its lost pin", async () => {

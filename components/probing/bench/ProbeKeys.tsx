@@ -1,4 +1,5 @@
 import { BottomSheet } from "@/components/bench/BottomSheet";
+import { KeyTable } from "@/components/bench/KeyTable";
 
 const KEYS = [
   { keys: "Space, Enter", does: "it beeps" },
@@ -12,18 +13,7 @@ const KEYS = [
 export function ProbeKeys({ onClose }: { onClose: () => void }) {
   return (
     <BottomSheet title="Keys while probing" onClose={onClose}>
-      <table className="w-full">
-        <tbody>
-          {KEYS.map(({ keys, does }) => (
-            <tr key={keys} className="border-b border-rule">
-              <th scope="row" className="mono w-32 py-2.5 pr-4 text-left font-semibold">
-                {keys}
-              </th>
-              <td className="py-2.5">{does}</td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
+      <KeyTable keys={KEYS} />
       <p className="mt-3 text-sm text-ink-soft">A foot pedal that sends one of these keys works as the key.</p>
     </BottomSheet>
   );

@@ -1,5 +1,5 @@
 export { byName } from "./by-name";
 export { describeCircle, nameCheck } from "./name-check";
-export { putInOrder, turnedRound, type Edges, type InOrder } from "./put-in-order";
+export { putInOrder, shortestWayRound, turnedRound, type Edges, type InOrder } from "./put-in-order";
 export { openGraph, readGraph, type CheckGraph } from "./read-graph";
 export { CHECK_STAGES, holds, type CheckStage, type CheckState, type StandingCheck } from "./standing-check";

@@ -43,7 +43,8 @@ function findCircle(edges: Edges, free: ReadonlySet<string>): string[] {
   return at === undefined ? [] : firstKeyFirst(shortestWayRound(at, stuck), edges);
 }
 
-function shortestWayRound(start: string, waitsFor: (id: string) => string[]): string[] {
+/** The shortest way from an id through what it waits for back to itself, the id first; empty when there is none. */
+export function shortestWayRound(start: string, waitsFor: (id: string) => readonly string[]): string[] {
   const cameFrom = new Map<string, string>();
   const queue = [start];
   for (const at of queue) {
