@@ -62,7 +62,7 @@ export function WiringPlace(props: Props) {
       title="Wiring"
       lede={
         has
-          ? `${figures} Checked as you type: ${countsSentence(findings)}`
+          ? `${figures} ${canEdit ? "Checked as you type" : "Checked"}: ${countsSentence(findings)}`
           : "Which signal is on which pin of which connector."
       }
       actions={
